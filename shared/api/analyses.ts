@@ -1,0 +1,76 @@
+import * as z from 'zod';
+import type { AnalysisResult, AnalysisSpecification } from '#shared/analysis';
+
+const idSchema = z.string().min(1).max(100);
+
+export const analysisSpecificationSchema = z.object({
+  schemaVersion: z.literal(1),
+  outcome: z.object({
+    outcomeId: idSchema,
+    columnId: idSchema,
+    eventLevelIds: z.array(idSchema).min(1, 'Pick at least one level that counts as the event.'),
+  }),
+  exposure: z.object({ columnId: idSchema, referenceLevelId: idSchema }),
+  stratumColumnIds: z.array(idSchema).max(3),
+  restrictions: z.array(z.object({ columnId: idSchema, levelIds: z.array(idSchema).min(1) })).max(20),
+  level: z.number().gt(0.5).lt(1),
+  methods: z.object({
+    risk: idSchema,
+    riskDifference: idSchema,
+    riskRatio: idSchema,
+    oddsRatio: idSchema,
+  }),
+  adjustment: z.enum(['crude', 'mantelHaenszel']),
+  trendScores: z.record(z.string(), z.number()).nullable(),
+  standing: z.object({
+    planned: z.enum(['prespecified', 'postHoc']),
+    importance: z.enum(['primary', 'secondary']),
+    analysisSet: z.string().trim().max(200),
+  }),
+}) satisfies z.ZodType<AnalysisSpecification>;
+
+export const newAnalysisRequestSchema = z.object({
+  name: z.string().trim().min(1, 'Give the analysis a name.').max(200),
+  cutId: idSchema,
+  specification: analysisSpecificationSchema,
+});
+
+export const analysisChangeRequestSchema = newAnalysisRequestSchema.extend({
+  baseVersion: z.int(),
+  /** Required once a report uses the analysis and a method, level or contrast changes. */
+  reason: z.string().trim().max(1000).nullable(),
+});
+
+export const analysisSummarySchema = z.object({
+  id: z.string(),
+  number: z.string(),
+  name: z.string(),
+  cutId: z.string(),
+  cutNumber: z.int(),
+  dataSetId: z.string(),
+  dataSetName: z.string(),
+  version: z.int(),
+  updatedAt: z.string(),
+  usedIn: z.array(z.object({ reportId: z.string(), title: z.string(), blocks: z.int() })),
+});
+
+export const analysisViewSchema = analysisSummarySchema.extend({
+  specification: analysisSpecificationSchema,
+  codeBookNumber: z.int(),
+  cutDataDate: z.string(),
+  resultId: z.string(),
+  result: z.custom<AnalysisResult>((value) => typeof value === 'object' && value !== null),
+  changes: z.array(
+    z.object({
+      version: z.int(),
+      at: z.string(),
+      person: z.string(),
+      reason: z.string().nullable(),
+    }),
+  ),
+});
+
+export type NewAnalysisRequest = z.infer<typeof newAnalysisRequestSchema>;
+export type AnalysisChangeRequest = z.infer<typeof analysisChangeRequestSchema>;
+export type AnalysisSummary = z.infer<typeof analysisSummarySchema>;
+export type AnalysisView = z.infer<typeof analysisViewSchema>;

@@ -1,0 +1,208 @@
+import * as z from 'zod';
+import { COLUMN_KINDS, type CodeBook } from '#shared/code-book';
+
+const labelSchema = z.string().trim().min(1, 'Give a label.').max(200);
+const idSchema = z.string().min(1).max(100);
+
+const levelSchema = z.object({
+  id: idSchema,
+  codes: z.array(z.string().max(1000)),
+  label: labelSchema,
+  sentenceLabel: labelSchema,
+});
+
+const bandSchema = z.object({
+  id: idSchema,
+  lower: z.number().nullable(),
+  upper: z.number().nullable(),
+  label: labelSchema,
+  sentenceLabel: labelSchema,
+});
+
+const columnSchema = z.object({
+  id: idSchema,
+  name: z.string().max(1000),
+  kind: z.enum(COLUMN_KINDS),
+  label: labelSchema,
+  sentenceLabel: labelSchema,
+  unit: z.string().max(60).nullable(),
+  levels: z.array(levelSchema).max(5000),
+  bands: z.array(bandSchema).max(100),
+  missingCodes: z.array(z.object({ code: z.string().max(1000), reason: labelSchema })).max(1000),
+  referenceLevelId: idSchema.nullable(),
+});
+
+/** Shape of a code book; what it must satisfy beyond shape is `validateCodeBook`'s to say. */
+export const codeBookSchema = z.object({
+  schemaVersion: z.literal(1),
+  layout: z.discriminatedUnion('kind', [
+    z.object({ kind: z.literal('records') }),
+    z.object({ kind: z.literal('count'), columnId: idSchema }),
+    z.object({
+      kind: z.literal('eventsAndTotal'),
+      eventsColumnId: idSchema,
+      totalColumnId: idSchema,
+    }),
+    z.object({
+      kind: z.literal('casesAndControls'),
+      casesColumnId: idSchema,
+      controlsColumnId: idSchema,
+    }),
+  ]),
+  columns: z.array(columnSchema).min(1).max(2000),
+}) satisfies z.ZodType<CodeBook>;
+
+/** How the file is to be read; null lets the reader find out. */
+export const readingOptionsSchema = z.object({
+  delimiter: z.string().min(1).max(1).nullable().default(null),
+  encoding: z.enum(['utf-8', 'windows-1252']).nullable().default(null),
+  decimalMark: z.enum(['.', ',']).nullable().default(null),
+  sheet: z.string().max(200).nullable().default(null),
+});
+
+/** Something odd in a column or in the file, in plain words. */
+export const intakeWarningSchema = z.object({
+  code: z.string(),
+  columnId: z.string().nullable(),
+  message: z.string(),
+});
+
+/** What a column holds. `values` lists the commonest values, in order of first appearance. */
+export const columnProfileSchema = z.object({
+  columnId: z.string(),
+  name: z.string(),
+  guessedKind: z.enum(COLUMN_KINDS),
+  distinct: z.int(),
+  blank: z.int(),
+  numeric: z.int(),
+  minimum: z.number().nullable(),
+  maximum: z.number().nullable(),
+  sum: z.number().nullable(),
+  values: z.array(z.object({ value: z.string(), count: z.int() })),
+  truncated: z.boolean(),
+});
+
+export const cutProfileSchema = z.object({
+  fileName: z.string(),
+  rows: z.int(),
+  columns: z.array(columnProfileSchema),
+  warnings: z.array(intakeWarningSchema),
+  usedOptions: readingOptionsSchema,
+  sheets: z.array(z.string()),
+});
+
+export const uploadViewSchema = z.object({
+  id: z.string(),
+  fileName: z.string(),
+  state: z.enum(['reading', 'profiled', 'storing', 'stored', 'failed']),
+  /** Share of the file read, 0..1. */
+  progress: z.number(),
+  rowsRead: z.int(),
+  profile: cutProfileSchema.nullable(),
+  /** The suggestion to start from: guesses, or the data set's code book carried over. */
+  proposedCodeBook: codeBookSchema.nullable(),
+  problem: z.object({ code: z.string(), message: z.string(), wayOut: z.string() }).nullable(),
+  cutId: z.string().nullable(),
+  dataSetId: z.string().nullable(),
+});
+
+export const storeCutRequestSchema = z.object({
+  /** An existing data set for a new cut, or null with a name for a new one. */
+  dataSetId: z.string().nullable(),
+  dataSetName: z.string().trim().min(1, 'Give the data set a name.').max(200),
+  dataDate: z.iso.date('Give the date of the data, such as 2026-03-31.'),
+  codeBook: codeBookSchema,
+});
+
+/** Counts typed into a grid: one row a level (and stratum), events and total. */
+export const typedCountsRequestSchema = z.object({
+  dataSetName: z.string().trim().min(1, 'Give the data set a name.').max(200),
+  dataDate: z.iso.date('Give the date of the data, such as 2026-03-31.'),
+  exposureLabel: labelSchema,
+  outcomeLabel: labelSchema,
+  stratumLabel: z.string().trim().max(200).nullable(),
+  layout: z.enum(['eventsAndTotal', 'casesAndControls']),
+  rows: z
+    .array(
+      z.object({
+        level: labelSchema,
+        stratum: z.string().trim().max(200).nullable(),
+        events: z.int('Counts are whole numbers.').min(0, 'A count cannot be negative.'),
+        other: z.int('Counts are whole numbers.').min(0, 'A count cannot be negative.'),
+      }),
+    )
+    .min(2, 'Type at least two rows: one for each group that is compared.')
+    .max(1000),
+});
+
+export const cutSummarySchema = z.object({
+  id: z.string(),
+  number: z.int(),
+  dataDate: z.string(),
+  fileName: z.string(),
+  rows: z.int(),
+  sha256: z.string(),
+  createdAt: z.string(),
+  createdBy: z.string(),
+});
+
+export const dataSetViewSchema = z.object({
+  id: z.string(),
+  name: z.string(),
+  cuts: z.array(cutSummarySchema),
+  codeBookNumber: z.int(),
+});
+
+export const cutViewSchema = cutSummarySchema.extend({
+  dataSetId: z.string(),
+  dataSetName: z.string(),
+  profile: cutProfileSchema,
+});
+
+export const codeBookViewSchema = z.object({
+  dataSetId: z.string(),
+  number: z.int(),
+  content: codeBookSchema,
+});
+
+export const codeBookChangeRequestSchema = z.object({
+  baseNumber: z.int(),
+  content: codeBookSchema,
+});
+
+export const tallyRequestSchema = z.object({
+  columnIds: z.array(idSchema).min(1).max(8),
+  restrictions: z
+    .array(z.object({ columnId: idSchema, levelIds: z.array(idSchema).min(1) }))
+    .max(20)
+    .default([]),
+});
+
+export const tallySchema = z.object({
+  axes: z.array(z.object({ columnId: z.string(), levelIds: z.array(z.string()) })),
+  cells: z.array(z.object({ at: z.array(z.int()), count: z.int() })),
+  counted: z.int(),
+  restricted: z.int(),
+  leftOut: z.array(z.object({ columnId: z.string(), reason: z.string(), count: z.int() })),
+});
+
+export const recordsPageSchema = z.object({
+  columns: z.array(z.string()),
+  rows: z.array(z.array(z.string())),
+  offset: z.int(),
+  total: z.int(),
+});
+
+export type ReadingOptions = z.infer<typeof readingOptionsSchema>;
+export type IntakeWarning = z.infer<typeof intakeWarningSchema>;
+export type ColumnProfile = z.infer<typeof columnProfileSchema>;
+export type CutProfile = z.infer<typeof cutProfileSchema>;
+export type UploadView = z.infer<typeof uploadViewSchema>;
+export type StoreCutRequest = z.infer<typeof storeCutRequestSchema>;
+export type TypedCountsRequest = z.infer<typeof typedCountsRequestSchema>;
+export type CutSummary = z.infer<typeof cutSummarySchema>;
+export type DataSetView = z.infer<typeof dataSetViewSchema>;
+export type CutView = z.infer<typeof cutViewSchema>;
+export type CodeBookView = z.infer<typeof codeBookViewSchema>;
+export type CodeBookChangeRequest = z.infer<typeof codeBookChangeRequestSchema>;
+export type RecordsPage = z.infer<typeof recordsPageSchema>;

@@ -1,0 +1,90 @@
+import * as z from 'zod';
+import type { HouseStyle } from '#shared/house-style';
+import type { PinnedAnalysis } from '#shared/report';
+import { REPORT_STAGES } from '#shared/report/report';
+import { FRAMINGS } from '#shared/wording/phrase';
+
+const idSchema = z.string().min(1).max(100);
+
+export const newReportRequestSchema = z.object({
+  title: z.string().trim().min(1, 'Give the report a title.').max(300),
+  houseStyleId: idSchema.default('open-clinical'),
+});
+
+export const reportSummarySchema = z.object({
+  id: z.string(),
+  studyId: z.string(),
+  title: z.string(),
+  stage: z.enum(REPORT_STAGES),
+  seq: z.int(),
+  blockCount: z.int(),
+  updatedAt: z.string(),
+  updatedBy: z.string().nullable(),
+});
+
+export const blockSchema = z.object({
+  id: idSchema,
+  kind: z.string().max(60),
+  orderKey: z.string().max(200),
+  content: z.unknown(),
+  version: z.int(),
+  positionVersion: z.int(),
+  removedAt: z.string().nullable(),
+});
+
+/** A step as plain data; `#shared/report` parses `step` by its kind before applying it. */
+export const stepSubmissionSchema = z.object({
+  id: z.uuid(),
+  groupId: z.uuid(),
+  undoes: z.uuid().nullable(),
+  step: z.looseObject({ kind: z.string() }),
+});
+
+export const stepsRequestSchema = z.object({
+  steps: z.array(stepSubmissionSchema).min(1).max(200),
+});
+
+export const acceptedStepSchema = stepSubmissionSchema.extend({
+  seq: z.int(),
+  person: z.string(),
+  personId: z.string(),
+  at: z.string(),
+  inverse: z.looseObject({ kind: z.string() }),
+});
+
+export const stepsViewSchema = z.object({ seq: z.int(), steps: z.array(acceptedStepSchema) });
+
+export const draftSchema = z.object({
+  blockId: z.string(),
+  baseVersion: z.int(),
+  content: z.unknown(),
+  savedAt: z.string(),
+});
+
+export const draftRequestSchema = z.object({ baseVersion: z.int(), content: z.unknown() });
+
+export const reportViewSchema = z.object({
+  report: z.object({
+    id: z.string(),
+    studyId: z.string(),
+    title: z.string(),
+    framing: z.enum(FRAMINGS),
+    houseStyleId: z.string(),
+    stage: z.enum(REPORT_STAGES),
+    seq: z.int(),
+    blocks: z.array(blockSchema),
+  }),
+  pins: z.array(z.custom<PinnedAnalysis>((value) => typeof value === 'object' && value !== null)),
+  houseStyle: z.custom<HouseStyle>((value) => typeof value === 'object' && value !== null),
+  drafts: z.array(draftSchema),
+});
+
+export type NewReportRequest = z.infer<typeof newReportRequestSchema>;
+export type ReportSummary = z.infer<typeof reportSummarySchema>;
+export type StepSubmission = z.infer<typeof stepSubmissionSchema>;
+export type StepsRequest = z.infer<typeof stepsRequestSchema>;
+export type AcceptedStep = z.infer<typeof acceptedStepSchema>;
+export type StepsView = z.infer<typeof stepsViewSchema>;
+export type DraftView = z.infer<typeof draftSchema>;
+export type DraftRequest = z.infer<typeof draftRequestSchema>;
+export type ReportView = z.infer<typeof reportViewSchema>;

@@ -1,0 +1,11 @@
+export { COLUMN_KINDS, COUNTED_OUTCOME_COLUMN_ID } from './code-book';
+export type {
+  CodeBook,
+  CodeBookBand,
+  CodeBookColumn,
+  CodeBookLevel,
+  ColumnKind,
+  CountLayout,
+  FactorLevel,
+  MissingCode,
+} from './code-book';

@@ -1,0 +1,4 @@
+export { assertNever } from './assert-never';
+export type { Issue } from './issue';
+export { failure, success } from './result';
+export type { Result } from './result';

@@ -1,0 +1,1 @@
+export type { HouseStyle } from './house-style';

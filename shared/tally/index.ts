@@ -1,0 +1,1 @@
+export type { LeftOut, Restriction, Tally, TallyAxis, TallyCell, TallyRequest } from './tally';
