@@ -1,0 +1,20 @@
+import { ensureNodePackages } from './node-packages.mjs';
+import { releaseSignals } from './run-command.mjs';
+
+const SERVER = {
+  name: 'server',
+  command: 'tsx watch --clear-screen=false server/main.ts',
+};
+const CLIENT = { name: 'client', command: 'ng serve' };
+
+process.chdir(new URL('../..', import.meta.url).pathname);
+
+if (await ensureNodePackages()) {
+  releaseSignals();
+  const { default: concurrently } = await import('concurrently');
+  await concurrently([SERVER, CLIENT], { killOthersOn: ['failure', 'success'] }).result.catch(
+    () => (process.exitCode = 1),
+  );
+} else {
+  process.exitCode = 1;
+}

@@ -1,0 +1,19 @@
+import { buildAll } from './build-steps.mjs';
+import { ensureNodePackages } from './node-packages.mjs';
+import { releaseSignals, say } from './run-command.mjs';
+
+process.chdir(new URL('../..', import.meta.url).pathname);
+
+if ((await ensureNodePackages()) && (await buildAll())) {
+  say('Server: starting …');
+  await serve();
+} else {
+  process.exitCode = 1;
+}
+
+/** The server runs in this very process, so that a signal sent to it arrives. */
+async function serve() {
+  releaseSignals();
+  process.setSourceMapsEnabled(true);
+  await import('../../dist/server/main.js');
+}
