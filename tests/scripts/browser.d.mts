@@ -1,0 +1,2 @@
+export declare function findBrowser(): string | undefined;
+export declare function ensureBrowser(): Promise<boolean>;
