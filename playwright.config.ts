@@ -5,7 +5,7 @@ const executablePath = findBrowser();
 
 export default defineConfig({
   testDir: 'tests/e2e',
-  outputDir: 'test-results',
+  outputDir: 'test-results/e2e',
   forbidOnly: Boolean(process.env.CI),
   workers: 1,
   timeout: 60_000,

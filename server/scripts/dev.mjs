@@ -1,3 +1,4 @@
+import { fileURLToPath } from 'node:url';
 import { ensureNodePackages } from './node-packages.mjs';
 import { releaseSignals } from './run-command.mjs';
 
@@ -7,7 +8,7 @@ const SERVER = {
 };
 const CLIENT = { name: 'client', command: 'ng serve' };
 
-process.chdir(new URL('../..', import.meta.url).pathname);
+process.chdir(fileURLToPath(new URL('../..', import.meta.url)));
 
 if (await ensureNodePackages()) {
   releaseSignals();

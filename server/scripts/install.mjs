@@ -1,3 +1,4 @@
+import { fileURLToPath } from 'node:url';
 import { ensureNodePackages } from './node-packages.mjs';
 
 /**
@@ -7,7 +8,7 @@ import { ensureNodePackages } from './node-packages.mjs';
  * --outside-readers   the programs that read exported files independently
  */
 const wanted = new Set(process.argv.slice(2));
-process.chdir(new URL('../..', import.meta.url).pathname);
+process.chdir(fileURLToPath(new URL('../..', import.meta.url)));
 
 const outcomes = [await ensureNodePackages()];
 if (wanted.has('--browser')) {

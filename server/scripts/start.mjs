@@ -1,8 +1,9 @@
+import { fileURLToPath } from 'node:url';
 import { buildAll } from './build-steps.mjs';
 import { ensureNodePackages } from './node-packages.mjs';
 import { releaseSignals, say } from './run-command.mjs';
 
-process.chdir(new URL('../..', import.meta.url).pathname);
+process.chdir(fileURLToPath(new URL('../..', import.meta.url)));
 
 if ((await ensureNodePackages()) && (await buildAll())) {
   say('Server: starting …');

@@ -1,3 +1,4 @@
+import { fileURLToPath } from 'node:url';
 import { mkdirSync, rmSync } from 'node:fs';
 import { ensureNodePackages } from '../../server/scripts/node-packages.mjs';
 import { buildAll } from '../../server/scripts/build-steps.mjs';
@@ -25,7 +26,7 @@ const STEPS = [
   { name: 'Browser tests', run: browserTests },
 ];
 
-process.chdir(new URL('../..', import.meta.url).pathname);
+process.chdir(fileURLToPath(new URL('../..', import.meta.url)));
 rmSync(RESULTS, { recursive: true, force: true });
 mkdirSync(RESULTS, { recursive: true });
 
