@@ -9,6 +9,7 @@ export type EstimationIssueCode =
   | 'fewerThanTwoStrata'
   | 'fewerThanTwoLevels'
   | 'notGivenByDesign'
+  | 'notOrdered'
   | 'invalidCounts'
   | 'invalidLevel'
   | 'tooLarge';

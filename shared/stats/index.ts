@@ -1,3 +1,16 @@
+export type { ContingencyTable, ScoredGroup } from './contingency-table';
+export {
+  betaCumulative,
+  betaQuantile,
+  chiSquareUpperTail,
+  criticalValue,
+  hypergeometricProbability,
+  logGamma,
+  normalCumulative,
+  normalQuantile,
+  normalUpperTail,
+} from './distributions';
+export type { Urn } from './distributions';
 export type {
   Estimate,
   EstimationIssue,
@@ -6,3 +19,44 @@ export type {
   TestOutcome,
 } from './estimate';
 export type { FourfoldTable, GroupCount, StratifiedTable, TableStratum } from './fourfold-table';
+export {
+  ODDS_RATIO_INTERVALS,
+  RISK_DIFFERENCE_INTERVALS,
+  RISK_INTERVALS,
+  RISK_RATIO_INTERVALS,
+} from './intervals';
+export type {
+  IntervalMethod,
+  MethodWords,
+  OddsRatioIntervalId,
+  RiskDifferenceIntervalId,
+  RiskIntervalId,
+  RiskRatioIntervalId,
+} from './intervals';
+export { POOLING_METHODS, TEST_METHODS } from './method-words';
+export type { PoolingMethodId, TestMethodId } from './method-words';
+export {
+  cochranMantelHaenszel,
+  issueOfOddsRatioStratum,
+  issueOfRiskRatioStratum,
+  oddsRatioHomogeneity,
+  partStrata,
+  pooledOddsRatio,
+  pooledRiskDifference,
+  pooledRiskRatio,
+  riskDifferenceHomogeneity,
+  riskRatioHomogeneity,
+} from './stratified';
+export type {
+  ContinuityCorrection,
+  HomogeneityTest,
+  PooledDifferenceVariance,
+  StrataUsed,
+  UnusedStratum,
+} from './stratified';
+export {
+  cochranArmitage,
+  fisherOfFourfold,
+  pearsonOfFourfold,
+  pearsonOfTable,
+} from './tests-of-association';

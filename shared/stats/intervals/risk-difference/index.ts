@@ -1,0 +1,15 @@
+import { agrestiCaffo } from './agresti-caffo';
+import { miettinenNurminen } from './miettinen-nurminen';
+import { newcombe } from './newcombe';
+import { wald } from './wald';
+
+/** Interval methods for a risk difference, in the order in which they are offered. */
+export const RISK_DIFFERENCE_INTERVALS = {
+  newcombe,
+  wald,
+  agrestiCaffo,
+  miettinenNurminen,
+} as const;
+
+/** Id of an interval method for a risk difference. */
+export type RiskDifferenceIntervalId = keyof typeof RISK_DIFFERENCE_INTERVALS;

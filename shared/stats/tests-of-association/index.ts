@@ -1,0 +1,3 @@
+export { cochranArmitage } from './cochran-armitage';
+export { fisherOfFourfold } from './fisher';
+export { pearsonOfFourfold, pearsonOfTable } from './pearson';
