@@ -1,1 +1,14 @@
-export type { HouseStyle } from './house-style';
+export type {
+  CaptionStyle,
+  DenominatorStep,
+  DifferenceUnit,
+  FigureStyle,
+  HouseStyle,
+  IntervalStyle,
+  NumberStyle,
+  PageStyle,
+  PercentStyle,
+  PValueStyle,
+  SentenceStyle,
+  TableStyle,
+} from './house-style';
