@@ -1,3 +1,5 @@
+export { cellsOf, issueOfGroup, issueOfTable, marginsOf } from './check-counts';
+export type { FourfoldCells, FourfoldMargins } from './check-counts';
 export type { ContingencyTable, ScoredGroup } from './contingency-table';
 export {
   betaCumulative,
@@ -33,6 +35,7 @@ export type {
   RiskIntervalId,
   RiskRatioIntervalId,
 } from './intervals';
+export { oddsRatioOf, riskDifferenceOf, riskRatioOf } from './point-estimates';
 export { POOLING_METHODS, TEST_METHODS } from './method-words';
 export type { PoolingMethodId, TestMethodId } from './method-words';
 export {

@@ -1,3 +1,4 @@
+/// <reference path="./jstat.d.ts" />
 import jstat from 'jstat';
 
 /** Natural logarithm of the gamma function, for x > 0. Source: jstat. */

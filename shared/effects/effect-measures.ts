@@ -1,0 +1,17 @@
+import type { EffectMeasure } from './effect-measure';
+import type { EffectMeasureId } from './measure-ids';
+import { oddsRatio } from './measures/odds-ratio/odds-ratio';
+import { riskDifference } from './measures/risk-difference/risk-difference';
+import { riskRatio } from './measures/risk-ratio/risk-ratio';
+
+/** The effect measures, in the order in which they are offered. */
+export const EFFECT_MEASURES: Readonly<Record<EffectMeasureId, EffectMeasure>> = {
+  riskDifference,
+  riskRatio,
+  oddsRatio,
+};
+
+/** Whether a measure has an interval method of this id. */
+export function hasInterval(measureId: EffectMeasureId, intervalId: string): boolean {
+  return Object.hasOwn(EFFECT_MEASURES[measureId].intervals, intervalId);
+}

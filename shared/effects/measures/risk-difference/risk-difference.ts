@@ -1,0 +1,34 @@
+import {
+  RISK_DIFFERENCE_INTERVALS,
+  issueOfTable,
+  pooledRiskDifference,
+  riskDifferenceHomogeneity,
+  riskDifferenceOf,
+} from '#shared/stats';
+import type { FourfoldTable } from '#shared/stats';
+import type { ExactFraction } from '../../effect-measure';
+import { makeMeasure } from '../../make-measure';
+import { designGivesRisk } from '../../study-design';
+
+/** Risk of the index group minus risk of the reference group, from -1 to 1. */
+export const riskDifference = makeMeasure({
+  id: 'riskDifference',
+  scale: 'difference',
+  label: 'Risk difference',
+  abbreviation: 'RD',
+  intervals: RISK_DIFFERENCE_INTERVALS,
+  defaultIntervalId: 'newcombe',
+  givenBy: designGivesRisk,
+  valueOf: riskDifferenceOf,
+  fractionOf,
+  issueOfStratum: issueOfTable,
+  pooled: pooledRiskDifference,
+  homogeneity: riskDifferenceHomogeneity,
+});
+
+function fractionOf({ index, reference }: FourfoldTable): ExactFraction {
+  const plus = index.events * reference.total;
+  const minus = reference.events * index.total;
+  const safe = Number.isSafeInteger(plus) && Number.isSafeInteger(minus);
+  return { numerator: safe ? plus - minus : NaN, denominator: index.total * reference.total };
+}
