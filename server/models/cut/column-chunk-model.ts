@@ -1,0 +1,33 @@
+import {
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  type Model,
+  type ModelStatic,
+  type Sequelize,
+} from 'sequelize';
+import { bytes, key } from '../columns';
+
+/** What a chunk is a piece of: the codes of the rows, or the values they stand for. */
+export type ChunkPart = 'codes' | 'dictionary';
+
+/** At most 256 KiB of a column. */
+export interface ColumnChunkModel
+  extends Model<InferAttributes<ColumnChunkModel>, InferCreationAttributes<ColumnChunkModel>> {
+  cutId: string;
+  columnId: string;
+  part: ChunkPart;
+  chunk: number;
+  bytes: Buffer;
+}
+
+/** Binds the table of column chunks to a database. */
+export function defineColumnChunks(sequelize: Sequelize): ModelStatic<ColumnChunkModel> {
+  return sequelize.define<ColumnChunkModel>('column_chunks', {
+    cutId: key(),
+    columnId: key(),
+    part: key(),
+    chunk: key(DataTypes.INTEGER),
+    bytes: bytes(),
+  });
+}

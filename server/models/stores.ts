@@ -1,0 +1,37 @@
+import type { Sequelize } from 'sequelize';
+import { CodeBookStore } from './code-book/code-book-store';
+import { DataSetStore } from './data-set/data-set-store';
+import { MailStore } from './mail/mail-store';
+import { SessionStore } from './session/session-store';
+import { SiteSettingStore } from './site-setting/site-setting-store';
+import { MembershipStore } from './study/membership-store';
+import { MilestoneStore } from './study/milestone-store';
+import { OutcomeStore } from './study/outcome-store';
+import { StudyStore } from './study/study-store';
+import { TokenStore } from './token/token-store';
+import { TrailStore } from './trail/trail-store';
+import { UserStore } from './user/user-store';
+
+const STORES = {
+  users: UserStore,
+  sessions: SessionStore,
+  tokens: TokenStore,
+  mail: MailStore,
+  siteSettings: SiteSettingStore,
+  studies: StudyStore,
+  outcomes: OutcomeStore,
+  milestones: MilestoneStore,
+  memberships: MembershipStore,
+  trail: TrailStore,
+  dataSets: DataSetStore,
+  codeBooks: CodeBookStore,
+} as const;
+
+/** Every store by name. A new one is a line in the table above. */
+export type Stores = { readonly [Name in keyof typeof STORES]: InstanceType<(typeof STORES)[Name]> };
+
+/** Binds every store to a database. */
+export function createStores(sequelize: Sequelize): Stores {
+  const entries = Object.entries(STORES).map(([name, Store]) => [name, new Store(sequelize)]);
+  return Object.fromEntries(entries) as Stores;
+}
