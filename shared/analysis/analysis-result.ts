@@ -76,7 +76,12 @@ export interface PooledContrastResult {
   readonly measures: Readonly<Record<EffectMeasureId, Result<Estimate, EstimationIssue>>>;
   readonly homogeneity: Readonly<Record<EffectMeasureId, Result<TestOutcome, EstimationIssue>>>;
   readonly conditionalIndependence: Result<TestOutcome, EstimationIssue>;
+  /** Strata that no pooled number of the contrast could use (an empty group, for instance). */
   readonly leftOut: readonly StratumLeftOut[];
+  /** Strata that tell nothing about one measure's pooled estimate; includes those of `leftOut`. */
+  readonly measureLeftOut?: Readonly<Record<EffectMeasureId, readonly StratumLeftOut[]>>;
+  /** Strata that one measure's test of homogeneity could not use. */
+  readonly homogeneityLeftOut?: Readonly<Record<EffectMeasureId, readonly StratumLeftOut[]>>;
 }
 
 /**

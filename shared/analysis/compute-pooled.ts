@@ -1,0 +1,69 @@
+import { failure } from '#shared/core';
+import { EFFECT_MEASURES, EFFECT_MEASURE_IDS } from '#shared/effects';
+import type { EffectMeasureId } from '#shared/effects';
+import { cochranMantelHaenszel } from '#shared/stats';
+import type { HomogeneityTest, StratifiedTable } from '#shared/stats';
+import type { PooledContrastResult, ResultFrame, StratumLeftOut } from './analysis-result';
+import { byMeasure, ifGiven, tableOf } from './compute-layer';
+import type { AnalysisSpecification } from './specification';
+import type { AnalysisCounts } from './tables';
+
+/** One level against the reference, pooled over strata, with what was left out of which number. */
+export function computePooled(
+  { level }: AnalysisSpecification,
+  frame: ResultFrame,
+  counts: AnalysisCounts,
+  indexLevelId: string,
+): PooledContrastResult {
+  const { referenceLevelId } = frame.exposure;
+  const strata: StratifiedTable = [...counts.strata].map(([id, layer]) => ({
+    id,
+    table: tableOf(layer, indexLevelId, referenceLevelId),
+  }));
+  const homogeneity = byMeasure((id) => homogeneityOf(id, frame, strata));
+  const measureLeftOut = byMeasure((id) => leftOutOf(id, frame, strata));
+  return {
+    indexLevelId,
+    referenceLevelId,
+    measures: byMeasure((id) =>
+      ifGiven(id, frame, () => EFFECT_MEASURES[id].pooled(strata, level)),
+    ),
+    homogeneity: byMeasure((id) => homogeneity[id].outcome),
+    conditionalIndependence: cochranMantelHaenszel(strata),
+    leftOut: leftOutOfAll(measureLeftOut, frame),
+    measureLeftOut,
+    homogeneityLeftOut: byMeasure((id) => homogeneity[id].leftOut),
+  };
+}
+
+function homogeneityOf(
+  id: EffectMeasureId,
+  frame: ResultFrame,
+  strata: StratifiedTable,
+): HomogeneityTest {
+  const measure = EFFECT_MEASURES[id];
+  return measure.givenBy(frame.design)
+    ? measure.homogeneity(strata)
+    : { outcome: failure({ code: 'notGivenByDesign' }), leftOut: [] };
+}
+
+function leftOutOf(
+  id: EffectMeasureId,
+  frame: ResultFrame,
+  strata: StratifiedTable,
+): readonly StratumLeftOut[] {
+  const measure = EFFECT_MEASURES[id];
+  return measure.givenBy(frame.design) ? measure.uninformative(strata) : [];
+}
+
+/** Strata that none of the measures which the design gives could use. */
+function leftOutOfAll(
+  byId: Readonly<Record<EffectMeasureId, readonly StratumLeftOut[]>>,
+  frame: ResultFrame,
+): readonly StratumLeftOut[] {
+  const given = EFFECT_MEASURE_IDS.filter((id) => EFFECT_MEASURES[id].givenBy(frame.design));
+  const [first, ...others] = given.map((id) => byId[id]);
+  const everywhere = ({ stratumId }: StratumLeftOut): boolean =>
+    others.every((list) => list.some((other) => other.stratumId === stratumId));
+  return (first ?? []).filter(everywhere);
+}

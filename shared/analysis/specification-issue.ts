@@ -1,0 +1,59 @@
+import { EFFECT_MEASURE_IDS, hasInterval } from '#shared/effects';
+import { RISK_INTERVALS } from '#shared/stats';
+import type { RiskIntervalId } from '#shared/stats';
+import type { AnalysisIssue } from './analysis-issue';
+import type { ResultFrame } from './analysis-result';
+import type { AnalysisSpecification } from './specification';
+
+/** Why a specification cannot be computed under a frame, whatever the counts; null if it can. */
+export function issueOfSpecification(
+  specification: AnalysisSpecification,
+  frame: ResultFrame,
+): AnalysisIssue | null {
+  return (
+    issueOfLevel(specification.level) ??
+    issueOfMethods(specification) ??
+    issueOfScores(specification, frame) ??
+    issueOfReference(specification, frame)
+  );
+}
+
+function issueOfLevel(level: number): AnalysisIssue | null {
+  return level > 0 && level < 1 ? null : { code: 'invalidLevel', facts: { level } };
+}
+
+function issueOfMethods({ methods }: AnalysisSpecification): AnalysisIssue | null {
+  if (!isRiskInterval(methods.risk)) {
+    return { code: 'unknownMethod', facts: { estimand: 'risk', methodId: methods.risk } };
+  }
+  const wrong = EFFECT_MEASURE_IDS.find((id) => !hasInterval(id, methods[id]));
+  return wrong
+    ? { code: 'unknownMethod', facts: { estimand: wrong, methodId: methods[wrong] } }
+    : null;
+}
+
+/** Whether an id names an interval method for a risk. */
+export function isRiskInterval(id: string): id is RiskIntervalId {
+  return Object.hasOwn(RISK_INTERVALS, id);
+}
+
+function issueOfScores(
+  { trendScores }: AnalysisSpecification,
+  frame: ResultFrame,
+): AnalysisIssue | null {
+  const missing = frame.exposure.levels.find(
+    ({ id }) => trendScores !== null && !Number.isFinite(trendScores[id]),
+  );
+  return missing ? { code: 'trendScoreMissing', facts: { levelId: missing.id } } : null;
+}
+
+function issueOfReference(
+  { exposure }: AnalysisSpecification,
+  frame: ResultFrame,
+): AnalysisIssue | null {
+  const levelId = exposure.referenceLevelId;
+  const named = frame.exposure.referenceLevelId === levelId;
+  const present = frame.exposure.levels.some(({ id }) => id === levelId);
+  const facts = { columnId: exposure.columnId, levelId, role: 'reference' };
+  return named && present ? null : { code: 'levelMissing', facts };
+}
