@@ -73,6 +73,8 @@ export default tseslint.config(
       ],
       '@angular-eslint/prefer-on-push-component-change-detection': 'error',
       '@angular-eslint/prefer-signals': 'error',
+      // Material types its options as classes and takes literals.
+      '@typescript-eslint/no-unsafe-class-instance-assignment': 'off',
     },
   },
   {

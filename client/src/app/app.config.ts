@@ -1,15 +1,37 @@
-import { provideHttpClient, withFetch, withXsrfConfiguration } from '@angular/common/http';
-import { provideBrowserGlobalErrorListeners, type ApplicationConfig } from '@angular/core';
-import { provideRouter, withComponentInputBinding } from '@angular/router';
+import { provideHttpClient, withInterceptors, withXsrfConfiguration } from '@angular/common/http';
+import {
+  inject,
+  provideAppInitializer,
+  provideBrowserGlobalErrorListeners,
+  type ApplicationConfig,
+} from '@angular/core';
+import {
+  provideRouter,
+  withComponentInputBinding,
+  withInMemoryScrolling,
+  withRouterConfig,
+} from '@angular/router';
 import { routes } from './app.routes';
+import { ThemeStore } from './frame/theme-choice';
+import { problemInterceptor } from './server-api/problem-interceptor';
 
+/** What the whole client shares. */
 export const appConfig: ApplicationConfig = {
   providers: [
     provideBrowserGlobalErrorListeners(),
-    provideRouter(routes, withComponentInputBinding()),
+    provideRouter(
+      routes,
+      withComponentInputBinding(),
+      withInMemoryScrolling({ anchorScrolling: 'enabled' }),
+      withRouterConfig({ paramsInheritanceStrategy: 'always' }),
+    ),
+    // Not over fetch: it cannot tell how much of an upload was sent.
     provideHttpClient(
-      withFetch(),
+      withInterceptors([problemInterceptor]),
       withXsrfConfiguration({ cookieName: 'XSRF-TOKEN', headerName: 'X-XSRF-TOKEN' }),
     ),
+    provideAppInitializer(() => {
+      inject(ThemeStore);
+    }),
   ],
 };

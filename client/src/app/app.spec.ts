@@ -1,14 +1,35 @@
+import { provideHttpClient } from '@angular/common/http';
+import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
 import { TestBed } from '@angular/core/testing';
 import { provideRouter, Router } from '@angular/router';
+import type { SessionView } from '#shared/api';
 import { expect, it } from 'vitest';
 import { App } from './app';
 import { routes } from './app.routes';
 
-it('opens the desk at the root address', async () => {
-  TestBed.configureTestingModule({ providers: [provideRouter(routes)] });
-  const fixture = TestBed.createComponent(App);
-  await TestBed.inject(Router).navigateByUrl('/');
-  await expect
-    .poll(() => (fixture.nativeElement as HTMLElement).querySelector('h1')?.textContent)
-    .toBe('Your desk');
+const NOBODY: SessionView = {
+  person: null,
+  firstAdministratorNeeded: false,
+  demonstrationAccounts: [],
+  demonstrationPassword: null,
+};
+
+async function openRoot(session: SessionView): Promise<string> {
+  TestBed.configureTestingModule({
+    providers: [provideRouter(routes), provideHttpClient(), provideHttpClientTesting()],
+  });
+  TestBed.createComponent(App);
+  const arrival = TestBed.inject(Router).navigateByUrl('/');
+  TestBed.inject(HttpTestingController).expectOne('/api/session').flush(session);
+  await arrival;
+  return TestBed.inject(Router).url;
+}
+
+it('asks a stranger to sign in', async () => {
+  expect(await openRoot(NOBODY)).toBe('/sign-in');
+});
+
+it('asks for the first administrator when there is none', async () => {
+  const url = await openRoot({ ...NOBODY, firstAdministratorNeeded: true });
+  expect(url).toBe('/first-administrator');
 });

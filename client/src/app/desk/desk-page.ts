@@ -1,12 +1,10 @@
 import { ChangeDetectionStrategy, Component } from '@angular/core';
+import { Bar } from '../ui/bar/bar';
 
 @Component({
   selector: 'eh-desk-page',
-  template: `
-    <main>
-      <h1>Your desk</h1>
-    </main>
-  `,
+  imports: [Bar],
+  template: '<eh-bar heading="Desk" />',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class DeskPage {}
