@@ -1,3 +1,4 @@
+export { addressKey, parseAddress } from './address-key';
 export type { AnalysisIssue, AnalysisIssueCode } from './analysis-issue';
 export type {
   AnalysisResult,
@@ -20,7 +21,13 @@ export { ENGINE_VERSION } from './engine-version';
 export { keptLevels } from './factor-levels';
 export { frameOf } from './frame';
 export type { FrameStudy } from './frame';
+export { listValues } from './list-values';
+export type { AddressedValue } from './list-values';
+export { numberOf } from './quantity';
 export type { Quantity } from './quantity';
+export { readValue } from './read-value';
+export type { ValueIssue } from './read-value';
+export { contrastTable, layerAt, pooledAt } from './result-places';
 export type {
   Adjustment,
   AnalysisSpecification,
@@ -28,4 +35,5 @@ export type {
   IntervalMethodChoice,
 } from './specification';
 export { tallyRequestOf } from './tally-request';
+export { isAddressFacet, isAddressedQuantity } from './value-address';
 export type { AddressedQuantity, AddressFacet, ResultScope, ValueAddress } from './value-address';

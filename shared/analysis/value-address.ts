@@ -1,23 +1,32 @@
-import type { EffectMeasureId } from '#shared/effects';
+import { EFFECT_MEASURE_IDS } from '#shared/effects/measure-ids';
+import type { EffectMeasureId } from '#shared/effects/measure-ids';
+
+const PLAIN_QUANTITIES = [
+  'events',
+  'total',
+  'risk',
+  ...EFFECT_MEASURE_IDS,
+  'numberNeeded',
+  'pearson',
+  'fisher',
+  'association',
+  'trend',
+  'conditionalIndependence',
+  'counted',
+  'leftOut',
+] as const;
 
 /** Which number family of a result an address points into. */
-export type AddressedQuantity =
-  | 'events'
-  | 'total'
-  | 'risk'
-  | EffectMeasureId
-  | 'numberNeeded'
-  | 'pearson'
-  | 'fisher'
-  | 'association'
-  | 'trend'
-  | 'conditionalIndependence'
-  | `homogeneity:${EffectMeasureId}`
-  | 'counted'
-  | 'leftOut';
+export type AddressedQuantity = (typeof PLAIN_QUANTITIES)[number] | `homogeneity:${EffectMeasureId}`;
 
-/** Which number of the family. */
-export type AddressFacet = 'value' | 'lower' | 'upper' | 'pValue' | 'statistic';
+const ADDRESS_FACETS = ['value', 'lower', 'upper', 'pValue', 'statistic'] as const;
+
+/**
+ * Which number of the family. The `lower` and `upper` of a number needed are the smaller and the
+ * larger count; where its limits run through infinity, `lower` is the count for one fewer event and
+ * `upper` the count for one more.
+ */
+export type AddressFacet = (typeof ADDRESS_FACETS)[number];
 
 /** Where in a result: over all records, within one stratum, or pooled over strata. */
 export type ResultScope =
@@ -35,4 +44,21 @@ export interface ValueAddress {
   readonly levelId: string | null;
   readonly scope: ResultScope;
   readonly facet: AddressFacet;
+}
+
+const QUANTITIES: ReadonlySet<string> = new Set([
+  ...PLAIN_QUANTITIES,
+  ...EFFECT_MEASURE_IDS.map((id) => `homogeneity:${id}`),
+]);
+
+/** Whether a text names a quantity that an address can point to. */
+export function isAddressedQuantity(text: string | undefined): text is AddressedQuantity {
+  return text !== undefined && QUANTITIES.has(text);
+}
+
+const FACETS: ReadonlySet<string> = new Set(ADDRESS_FACETS);
+
+/** Whether a text names a facet of an address. */
+export function isAddressFacet(text: string | undefined): text is AddressFacet {
+  return text !== undefined && FACETS.has(text);
 }
