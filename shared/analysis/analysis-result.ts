@@ -30,6 +30,8 @@ export interface ResultFrame {
     readonly ordered: boolean;
     readonly levels: readonly FactorLevel[];
     readonly referenceLevelId: string;
+    /** The column's pattern for the people at a level; null leaves it to the phrasebook. */
+    readonly groupPattern?: string | null;
   };
   /** One entry per combination of the stratifying columns; empty for an unstratified analysis. */
   readonly strata: readonly FactorLevel[];

@@ -34,6 +34,7 @@ function combine(
       id: `${outer.id}|${inner.id}`,
       label: `${outer.label}, ${inner.label}`,
       sentenceLabel: `${outer.sentenceLabel}, ${inner.sentenceLabel}`,
+      within: [...(outer.within ?? []), ...(inner.within ?? [])],
     })),
   );
 }

@@ -43,7 +43,7 @@ export function frameOf(
         population: study.population,
         outcome,
         exposure: exposureFrame(exposure, specification.exposure.referenceLevelId),
-        strata: combinations(strata.map((factor) => factor.levels)),
+        strata: combinations(strata.map(stratumLevels)),
         strataLabel: strata.length > 0 ? strata.map(({ column }) => column.label).join(', ') : null,
       });
 }
@@ -140,5 +140,14 @@ function exposureFrame(
     ordered: column.kind === 'orderedCategory' || column.kind === 'number',
     levels,
     referenceLevelId,
+    groupPattern: column.groupPattern ?? null,
   };
+}
+
+function stratumLevels({ column, levels }: Factor): readonly FactorLevel[] {
+  const { sentenceLabel: columnLabel, withinPattern } = column;
+  return levels.map((level) => ({
+    ...level,
+    within: [{ columnLabel, levelLabel: level.sentenceLabel, pattern: withinPattern ?? null }],
+  }));
 }

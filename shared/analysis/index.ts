@@ -36,4 +36,10 @@ export type {
 } from './specification';
 export { tallyRequestOf } from './tally-request';
 export { isAddressFacet, isAddressedQuantity } from './value-address';
-export type { AddressedQuantity, AddressFacet, ResultScope, ValueAddress } from './value-address';
+export type {
+  AddressedQuantity,
+  AddressFacet,
+  CaseControlQuantity,
+  ResultScope,
+  ValueAddress,
+} from './value-address';

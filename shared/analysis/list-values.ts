@@ -2,6 +2,7 @@ import { EFFECT_MEASURE_IDS } from '#shared/effects/measure-ids';
 import type { AnalysisResult } from './analysis-result';
 import type { Quantity } from './quantity';
 import { readValue } from './read-value';
+import { CASE_CONTROL_QUANTITIES } from './value-address';
 import type { AddressedQuantity, AddressFacet, ResultScope, ValueAddress } from './value-address';
 
 /** A number of a result with its place. */
@@ -48,11 +49,25 @@ function layerPlaces(result: AnalysisResult, scope: ResultScope): readonly Place
   return [
     ...placesAt(scope, null, VALUE, ['events', 'total', 'risk']),
     ...placesAt(scope, null, TEST, ['association', 'trend']),
+    ...caseControlPlaces(result, scope),
     ...levels.flatMap(({ id }) => [
       ...placesAt(scope, id, VALUE, ['events', 'total']),
       ...placesAt(scope, id, ESTIMATE, ['risk']),
       ...(id === referenceLevelId ? [] : contrastPlaces(scope, id)),
     ]),
+  ];
+}
+
+/** Elsewhere than in a case–control study these places hold nothing. */
+function caseControlPlaces({ frame }: AnalysisResult, scope: ResultScope): readonly Place[] {
+  if (frame.design !== 'caseControl') {
+    return [];
+  }
+  return [
+    ...placesAt(scope, null, VALUE, ['controls']),
+    ...frame.exposure.levels.flatMap(({ id }) =>
+      placesAt(scope, id, VALUE, CASE_CONTROL_QUANTITIES),
+    ),
   ];
 }
 

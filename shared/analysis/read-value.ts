@@ -11,9 +11,15 @@ import type {
   TestOutcome,
 } from '#shared/stats';
 import type { AnalysisResult, LayerResult, PooledContrastResult } from './analysis-result';
+import { readCaseControl } from './read-case-control';
 import { contrastTable, layerAt, pooledAt } from './result-places';
 import type { Quantity } from './quantity';
-import type { AddressedQuantity, AddressFacet, ValueAddress } from './value-address';
+import type {
+  AddressedQuantity,
+  AddressFacet,
+  CaseControlQuantity,
+  ValueAddress,
+} from './value-address';
 
 /** Why an address gives no number: nothing is there, the number is infinite, or not estimable. */
 export type ValueIssue = Issue<EstimationIssueCode | 'addressNotInResult' | 'infinite'>;
@@ -59,7 +65,20 @@ const READERS: Readonly<
       result.leftOut.reduce((sum, { count }) => sum + count, 0),
       address,
     ),
+  controls: caseControl('controls'),
+  shareOfCases: caseControl('shareOfCases'),
+  shareOfControls: caseControl('shareOfControls'),
+  comparedCases: caseControl('comparedCases'),
+  comparedControls: caseControl('comparedControls'),
+  shareOfComparedCases: caseControl('shareOfComparedCases'),
+  shareOfComparedControls: caseControl('shareOfComparedControls'),
 };
+
+function caseControl(
+  quantity: CaseControlQuantity,
+): (result: AnalysisResult, address: ValueAddress) => Reading {
+  return (result, address) => readCaseControl(result, { ...address, quantity });
+}
 
 function readWholeCount(count: number, { levelId, scope, facet }: ValueAddress): Reading {
   const there = levelId === null && scope.kind === 'crude' && facet === 'value';

@@ -1,6 +1,20 @@
 import { EFFECT_MEASURE_IDS } from '#shared/effects/measure-ids';
 import type { EffectMeasureId } from '#shared/effects/measure-ids';
 
+/** What only cases and controls give; `compared…` counts a level and the reference only. */
+export const CASE_CONTROL_QUANTITIES = [
+  'controls',
+  'shareOfCases',
+  'shareOfControls',
+  'comparedCases',
+  'comparedControls',
+  'shareOfComparedCases',
+  'shareOfComparedControls',
+] as const;
+
+/** One of the quantities of a case–control study. */
+export type CaseControlQuantity = (typeof CASE_CONTROL_QUANTITIES)[number];
+
 const PLAIN_QUANTITIES = [
   'events',
   'total',
@@ -14,6 +28,7 @@ const PLAIN_QUANTITIES = [
   'conditionalIndependence',
   'counted',
   'leftOut',
+  ...CASE_CONTROL_QUANTITIES,
 ] as const;
 
 /** Which number family of a result an address points into. */

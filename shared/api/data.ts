@@ -30,6 +30,8 @@ const columnSchema = z.object({
   bands: z.array(bandSchema).max(100),
   missingCodes: z.array(z.object({ code: z.string().max(1000), reason: labelSchema })).max(1000),
   referenceLevelId: idSchema.nullable(),
+  groupPattern: z.string().trim().max(200).nullable().optional(),
+  withinPattern: z.string().trim().max(200).nullable().optional(),
 });
 
 /** Shape of a code book; what it must satisfy beyond shape is `validateCodeBook`'s to say. */

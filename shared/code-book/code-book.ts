@@ -42,7 +42,11 @@ export interface MissingCode {
 }
 
 /**
- * One column. `levels` are in print order. A numeric column becomes usable as a factor through
+ * One column. `groupPattern` says how the people at a level are named in a sentence: "{people}"
+ * stands for the study's people, "{level}" for the level's sentence label, as in
+ * "{people} with {level}", "{people} who {level}", "{level} {people}" or "{level}" alone;
+ * `withinPattern` how a stratum is, as in "in {level}" or "among {level}". Null leaves both to the
+ * phrasebook, which names column and level. `levels` are in print order. A numeric column becomes usable as a factor through
  * `bands`. `referenceLevelId` names a level or a band.
  */
 export interface CodeBookColumn {
@@ -56,6 +60,8 @@ export interface CodeBookColumn {
   readonly bands: readonly CodeBookBand[];
   readonly missingCodes: readonly MissingCode[];
   readonly referenceLevelId: string | null;
+  readonly groupPattern?: string | null;
+  readonly withinPattern?: string | null;
 }
 
 /** How a row counts: as one record, by a count column, or by two (a synthetic outcome column). */
@@ -78,9 +84,17 @@ export interface CodeBook {
   readonly columns: readonly CodeBookColumn[];
 }
 
-/** A level or band as a factor uses it, in print order. */
+/** One column's part in the name of a stratum; `pattern` is the column's `withinPattern`. */
+export interface StratumWords {
+  readonly columnLabel: string;
+  readonly levelLabel: string;
+  readonly pattern: string | null;
+}
+
+/** A level or band as a factor uses it, in print order. A stratum also has `within`. */
 export interface FactorLevel {
   readonly id: string;
   readonly label: string;
   readonly sentenceLabel: string;
+  readonly within?: readonly StratumWords[];
 }

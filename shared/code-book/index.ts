@@ -8,4 +8,5 @@ export type {
   CountLayout,
   FactorLevel,
   MissingCode,
+  StratumWords,
 } from './code-book';

@@ -1,7 +1,8 @@
+import { numberOf } from '#shared/analysis/quantity';
 import type { Quantity } from '#shared/analysis';
 import type { HouseStyle } from '#shared/house-style';
 import type { NumberText, SignDisplay } from './number-text';
-import { numberOf, rationalOf } from './rational';
+import { rationalOf } from './rational';
 import { roundRational } from './round';
 import { writeDecimal } from './write-decimal';
 

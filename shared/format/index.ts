@@ -13,7 +13,7 @@ export type { NumberText, SignDisplay } from './number-text';
 export { percentIsShown } from './percent-decimals';
 export { decimalsOf, decimalsUnder, precisionBasisOf } from './precision';
 export type { PrecisionBasis, PrintedDecimals } from './precision';
-export { numberOf, rationalOf } from './rational';
+export { rationalOf } from './rational';
 export type { Rational } from './rational';
 export { numberOfDecimal, roundRational } from './round';
 export type { Decimal } from './round';

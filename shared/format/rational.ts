@@ -24,20 +24,6 @@ export function rationalOf(quantity: Quantity): Rational {
   }
 }
 
-/** A quantity as the nearest double. */
-export function numberOf(quantity: Quantity): number {
-  switch (quantity.kind) {
-    case 'fraction':
-      return quantity.numerator / quantity.denominator;
-    case 'count':
-      return quantity.count;
-    case 'real':
-      return quantity.value;
-    default:
-      return assertNever(quantity);
-  }
-}
-
 /**
  * Engines differ in the last digits of exp and log, so that a tie must not hang on them: twelve
  * digits are the same everywhere.
