@@ -1,3 +1,4 @@
+import { factorLevels } from '#shared/code-book';
 import type { CodeBookColumn, FactorLevel } from '#shared/code-book';
 import type { Restriction } from '#shared/tally';
 
@@ -11,10 +12,7 @@ export function keptLevels(
 ): readonly FactorLevel[] {
   const own = restrictions.filter((restriction) => restriction.columnId === column.id);
   const kept = (id: string): boolean => own.every(({ levelIds }) => levelIds.includes(id));
-  const levels = column.kind === 'number' ? column.bands : column.levels;
-  return levels
-    .filter((level) => kept(level.id))
-    .map(({ id, label, sentenceLabel }) => ({ id, label, sentenceLabel }));
+  return factorLevels(column).filter((level) => kept(level.id));
 }
 
 /** Every combination of the levels of several factors; ids joined by "|", words by ", ". */

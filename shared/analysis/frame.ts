@@ -1,5 +1,6 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
+import { FACTOR_SOURCE } from '#shared/code-book';
 import type { CodeBook, CodeBookColumn, FactorLevel } from '#shared/code-book';
 import type { StudyDesign } from '#shared/effects';
 import type { AnalysisIssue, AnalysisIssueCode } from './analysis-issue';
@@ -137,7 +138,7 @@ function exposureFrame(
     label: column.label,
     sentenceLabel: column.sentenceLabel,
     unit: column.unit,
-    ordered: column.kind === 'orderedCategory' || column.kind === 'number',
+    ordered: column.kind === 'orderedCategory' || FACTOR_SOURCE[column.kind] === 'bands',
     levels,
     referenceLevelId,
     groupPattern: column.groupPattern ?? null,

@@ -21,6 +21,17 @@ export { ENGINE_VERSION } from './engine-version';
 export { keptLevels } from './factor-levels';
 export { frameOf } from './frame';
 export type { FrameStudy } from './frame';
+export { GUARDS, NOTHING_KNOWN, findGuards } from './guards';
+export type { GuardFinding, GuardId } from './guards';
+export type {
+  Guard,
+  GuardContext,
+  GuardFact,
+  GuardFacts,
+  GuardPlace,
+  GuardPoint,
+  GuardSeverity,
+} from './guards/guard';
 export { listValues } from './list-values';
 export type { AddressedValue } from './list-values';
 export { numberOf } from './quantity';
