@@ -45,7 +45,9 @@ function scopeOf(text: string | undefined): ResultScope | undefined {
   if (text === 'crude' || text === 'pooled') {
     return { kind: text };
   }
-  const stratumId = text?.startsWith('stratum:') ? decoded(text.slice('stratum:'.length)) : undefined;
+  const stratumId = text?.startsWith('stratum:')
+    ? decoded(text.slice('stratum:'.length))
+    : undefined;
   return stratumId === undefined ? undefined : { kind: 'stratum', stratumId };
 }
 

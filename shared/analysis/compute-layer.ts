@@ -75,9 +75,7 @@ function levelResult(
   count: GroupCount,
 ): LevelResult {
   const { events, total } = count;
-  const risk = designGivesRisk(frame.design)
-    ? riskOf(specification, count)
-    : failure(NOT_GIVEN);
+  const risk = designGivesRisk(frame.design) ? riskOf(specification, count) : failure(NOT_GIVEN);
   return { levelId, count: { events, total }, risk };
 }
 

@@ -1,5 +1,9 @@
 import { EFFECT_MEASURES } from '#shared/effects';
-import type { AnalysisSpecification, AnalysisStanding, IntervalMethodChoice } from './specification';
+import type {
+  AnalysisSpecification,
+  AnalysisStanding,
+  IntervalMethodChoice,
+} from './specification';
 
 /** The interval methods that an analysis starts with. */
 export const DEFAULT_INTERVAL_METHODS: IntervalMethodChoice = {

@@ -16,9 +16,7 @@ export function keptLevels(
 }
 
 /** Every combination of the levels of several factors; ids joined by "|", words by ", ". */
-export function combinations(
-  factors: readonly (readonly FactorLevel[])[],
-): readonly FactorLevel[] {
+export function combinations(factors: readonly (readonly FactorLevel[])[]): readonly FactorLevel[] {
   const [first, ...rest] = factors;
   return first ? rest.reduce(combine, first) : [];
 }

@@ -34,7 +34,8 @@ export function frameOf(
     return factors;
   }
   const { exposure, strata } = factors.value;
-  const issue = issueOfOutcome(factors.value.outcome, specification) ??
+  const issue =
+    issueOfOutcome(factors.value.outcome, specification) ??
     issueOfExposure(exposure, specification);
   return issue
     ? failure(issue)

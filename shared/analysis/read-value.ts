@@ -51,7 +51,8 @@ const READERS: Readonly<
   numberNeeded: readNumberNeeded,
   pearson: (result, address) => readTest(contrastAt(result, address)?.pearson, address.facet),
   fisher: (result, address) => readTest(contrastAt(result, address)?.fisher, address.facet),
-  association: (result, address) => readTest(wholeLayer(result, address)?.association, address.facet),
+  association: (result, address) =>
+    readTest(wholeLayer(result, address)?.association, address.facet),
   trend: (result, address) => readTest(wholeLayer(result, address)?.trend, address.facet),
   conditionalIndependence: (result, address) =>
     readTest(pooledContrast(result, address)?.conditionalIndependence, address.facet),
@@ -85,18 +86,17 @@ function readWholeCount(count: number, { levelId, scope, facet }: ValueAddress):
   return there ? success({ kind: 'count', count }) : failure(NOT_THERE);
 }
 
-function readCount(
-  result: AnalysisResult,
-  address: ValueAddress,
-  part: keyof GroupCount,
-): Reading {
+function readCount(result: AnalysisResult, address: ValueAddress, part: keyof GroupCount): Reading {
   const count = groupCount(layerAt(result, address.scope), address.levelId);
   return count && address.facet === 'value'
     ? success({ kind: 'count', count: count[part] })
     : failure(NOT_THERE);
 }
 
-function groupCount(layer: LayerResult | undefined, levelId: string | null): GroupCount | undefined {
+function groupCount(
+  layer: LayerResult | undefined,
+  levelId: string | null,
+): GroupCount | undefined {
   return levelId === null
     ? layer?.total
     : layer?.levels.find((level) => level.levelId === levelId)?.count;
@@ -141,7 +141,11 @@ function estimateAt(
 }
 
 /** The fraction behind a contrast's estimate; null for pooled ones, which are sums of fractions. */
-function exactOf(id: EffectMeasureId, result: AnalysisResult, address: ValueAddress): Quantity | null {
+function exactOf(
+  id: EffectMeasureId,
+  result: AnalysisResult,
+  address: ValueAddress,
+): Quantity | null {
   const table = contrastTable(layerAt(result, address.scope), address.levelId);
   const fraction = table ? EFFECT_MEASURES[id].fraction(table) : null;
   return fraction && { kind: 'fraction', ...fraction };

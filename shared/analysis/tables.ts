@@ -45,7 +45,10 @@ export function countsOf(
       return failure(issue);
     }
     const events = specification.outcome.eventLevelIds.includes(cell.outcomeLevelId) ? count : 0;
-    places.forEach((place) => add(place as MutableCount, events, count));
+    for (const place of places as readonly MutableCount[]) {
+      place.events += events;
+      place.total += count;
+    }
   }
   return success({ crude, strata });
 }
@@ -83,10 +86,6 @@ function issueOfCell(
     return { code: 'invalidCounts', facts: { count } };
   }
   const facts = { levelId: cell.exposureLevelId, stratumId: cell.stratumId };
-  return places.includes(undefined) ? { code: 'tallyDoesNotFit', facts } : null;
-}
-
-function add(place: MutableCount, events: number, total: number): void {
-  place.events += events;
-  place.total += total;
+  const misplaced = cell.outcomeLevelId === '' || places.includes(undefined);
+  return misplaced ? { code: 'tallyDoesNotFit', facts } : null;
 }

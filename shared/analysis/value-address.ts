@@ -32,7 +32,8 @@ const PLAIN_QUANTITIES = [
 ] as const;
 
 /** Which number family of a result an address points into. */
-export type AddressedQuantity = (typeof PLAIN_QUANTITIES)[number] | `homogeneity:${EffectMeasureId}`;
+export type AddressedQuantity =
+  (typeof PLAIN_QUANTITIES)[number] | `homogeneity:${EffectMeasureId}`;
 
 const ADDRESS_FACETS = ['value', 'lower', 'upper', 'pValue', 'statistic'] as const;
 

@@ -1,21 +1,18 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
 import { partStrata } from '#shared/stats';
-import type {
-  Estimate,
-  EstimationIssue,
-  FourfoldTable,
-  IntervalMethod,
-} from '#shared/stats';
+import type { Estimate, EstimationIssue, FourfoldTable, IntervalMethod } from '#shared/stats';
 import type { EffectMeasure, EffectScale, ExactFraction } from './effect-measure';
 
 /** What a measure's file states; the rest follows from its scale. */
-export interface MeasureParts
-  extends Omit<EffectMeasure, 'nullValue' | 'estimate' | 'fraction' | 'reverse' | 'uninformative'> {
-  valueOf(table: FourfoldTable): number;
-  fractionOf(table: FourfoldTable): ExactFraction;
+export interface MeasureParts extends Omit<
+  EffectMeasure,
+  'nullValue' | 'estimate' | 'fraction' | 'reverse' | 'uninformative'
+> {
+  readonly valueOf: (table: FourfoldTable) => number;
+  readonly fractionOf: (table: FourfoldTable) => ExactFraction;
   /** Why a stratum tells nothing about the pooled estimate, or null. */
-  issueOfStratum(table: FourfoldTable): EstimationIssue | null;
+  readonly issueOfStratum: (table: FourfoldTable) => EstimationIssue | null;
 }
 
 /** Makes a measure of its parts. */

@@ -21,7 +21,5 @@ export function riskRatioOf({ index, reference }: FourfoldTable): number {
 /** Odds of the index group over odds of the reference group; Infinity or NaN with zero cells. */
 export function oddsRatioOf(table: FourfoldTable): number {
   const cells = cellsOf(table);
-  return (
-    (cells.indexEvents * cells.referenceOthers) / (cells.indexOthers * cells.referenceEvents)
-  );
+  return (cells.indexEvents * cells.referenceOthers) / (cells.indexOthers * cells.referenceEvents);
 }

@@ -14,8 +14,7 @@ export const commonOutcome = {
   id: 'commonOutcome',
   severity: 'caution',
   source:
-    'Davies HTO, Crombie IK, Tavakoli M. When can odds ratios mislead? ' +
-    'BMJ 1998;316:989-991.',
+    'Davies HTO, Crombie IK, Tavakoli M. When can odds ratios mislead? ' + 'BMJ 1998;316:989-991.',
   find: (result) => result.crude.contrasts.flatMap((contrast) => pointsOf(result, contrast)),
 } as const satisfies Guard<'commonOutcome'>;
 

@@ -2,7 +2,7 @@ import type { AnalysisResult } from '../analysis-result';
 import { allOrNoEvents } from './all-or-no-events';
 import { commonOutcome } from './common-outcome';
 import { emptyGroup } from './empty-group';
-import type { GuardContext, GuardPoint, GuardSeverity } from './guard';
+import type { Guard, GuardContext, GuardPoint, GuardSeverity } from './guard';
 import { levelsOutOfOrder } from './levels-out-of-order';
 import { noRiskByDesign } from './no-risk-by-design';
 import { oneLevelExposure } from './one-level-exposure';
@@ -49,7 +49,8 @@ export function findGuards(
   context: GuardContext = NOTHING_KNOWN,
 ): readonly GuardFinding[] {
   return (Object.keys(GUARDS) as GuardId[]).flatMap((guardId) => {
-    const { severity, find } = GUARDS[guardId];
-    return find(result, context).map((point) => ({ ...point, guardId, severity }));
+    const guard: Guard<GuardId> = GUARDS[guardId];
+    const { severity } = guard;
+    return guard.find(result, context).map((point) => ({ ...point, guardId, severity }));
   });
 }

@@ -11,7 +11,8 @@ import { WHOLE } from './places';
 export const levelsOutOfOrder = {
   id: 'levelsOutOfOrder',
   severity: 'caution',
-  source: 'Armitage P. Tests for linear trends in proportions and frequencies. Biometrics 1955;11:375-386.',
+  source:
+    'Armitage P. Tests for linear trends in proportions and frequencies. Biometrics 1955;11:375-386.',
   find({ frame }) {
     const { ordered, levels } = frame.exposure;
     const labels = levels.map(({ label }) => label);

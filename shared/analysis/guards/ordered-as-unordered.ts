@@ -12,7 +12,8 @@ const FEWEST_LEVELS = 3;
 export const orderedAsUnordered = {
   id: 'orderedAsUnordered',
   severity: 'note',
-  source: 'Armitage P. Tests for linear trends in proportions and frequencies. Biometrics 1955;11:375-386.',
+  source:
+    'Armitage P. Tests for linear trends in proportions and frequencies. Biometrics 1955;11:375-386.',
   find({ frame, specification }) {
     const { ordered, levels } = frame.exposure;
     const { ground } = orderCodes(levels.map(({ label }) => label));

@@ -7,8 +7,8 @@ const SMALLEST_EXPECTED = 5;
 
 /**
  * Cells of the outcome by exposure table with small expected counts: the chi-square test is an
- * approximation that they weaken. Facts: cells (how many are below), ofCells (all), smallestExpected,
- * limit, levelIds (of the levels with such a cell).
+ * approximation that they weaken. Facts: cells (how many are below), ofCells (all),
+ * smallestExpected, limit, levelIds (of the levels with such a cell).
  */
 export const sparseCells = {
   id: 'sparseCells',

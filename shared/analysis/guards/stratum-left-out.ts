@@ -18,13 +18,20 @@ function pointsOf({ pooled }: AnalysisResult, stratumId: string): readonly Guard
   const dropped = pooled.flatMap(({ indexLevelId, leftOut }) =>
     leftOut
       .filter((stratum) => stratum.stratumId === stratumId)
-      .map(({ issue }) => ({ indexLevelId, code: issue.code, group: issue.facts?.['group'] ?? '' })),
+      .map(({ issue }) => ({
+        indexLevelId,
+        code: issue.code,
+        group: issue.facts?.group ?? '',
+      })),
   );
   const reasons = new Map(dropped.map((one) => [`${one.code} ${String(one.group)}`, one]));
   return [...reasons.values()].map(({ code, group }) => {
     const same = dropped.filter((one) => one.code === code && one.group === group);
     const levelIds = same.map(({ indexLevelId }) => indexLevelId);
     const levelId = levelIds.length === 1 && pooled.length > 1 ? (levelIds[0] ?? null) : null;
-    return { place: { scope: { kind: 'stratum', stratumId }, levelId }, facts: { code, group, levelIds } };
+    return {
+      place: { scope: { kind: 'stratum', stratumId }, levelId },
+      facts: { code, group, levelIds },
+    };
   });
 }

@@ -1,3 +1,5 @@
+// The client compiles without this folder, so that the declarations have to come along.
+// eslint-disable-next-line @typescript-eslint/triple-slash-reference
 /// <reference path="./jstat.d.ts" />
 import jstat from 'jstat';
 

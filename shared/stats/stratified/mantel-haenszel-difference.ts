@@ -48,8 +48,7 @@ const VARIANCES: Readonly<
   sato: (strata, value) =>
     (value * sumOver(strata, satoSizePart) + sumOver(strata, satoEventPart)) /
     sumOver(strata, weight) ** 2,
-  greenlandRobins: (strata) =>
-    sumOver(strata, greenlandRobinsPart) / sumOver(strata, weight) ** 2,
+  greenlandRobins: (strata) => sumOver(strata, greenlandRobinsPart) / sumOver(strata, weight) ** 2,
 };
 
 function satoSizePart(table: FourfoldTable): number {

@@ -15,7 +15,8 @@ export function issueOfRiskRatioStratum(table: FourfoldTable): EstimationIssue |
   const { events, others } = marginsOf(table);
   const withoutEvents = events === 0;
   return (
-    issueOfTable(table) ?? (withoutEvents ? { code: 'emptyMargin', facts: { events, others } } : null)
+    issueOfTable(table) ??
+    (withoutEvents ? { code: 'emptyMargin', facts: { events, others } } : null)
   );
 }
 
@@ -43,7 +44,9 @@ export function pooledRiskRatio(
 }
 
 function riskRatioPoint(used: StratifiedTable): PooledPoint {
-  const numerator = sumOver(used, (table) => crossPart(table.index.events, table.reference.total, table));
+  const numerator = sumOver(used, (table) =>
+    crossPart(table.index.events, table.reference.total, table),
+  );
   const denominator = sumOver(used, (table) =>
     crossPart(table.reference.events, table.index.total, table),
   );

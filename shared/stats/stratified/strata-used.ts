@@ -38,10 +38,7 @@ export function invalidStratum(strata: StrataUsed): EstimationIssue | null {
 }
 
 /** Sum of a number over strata. */
-export function sumOver(
-  strata: StratifiedTable,
-  part: (table: FourfoldTable) => number,
-): number {
+export function sumOver(strata: StratifiedTable, part: (table: FourfoldTable) => number): number {
   return strata.reduce((sum, stratum) => sum + part(stratum.table), 0);
 }
 

@@ -26,7 +26,10 @@ export function cochranArmitage(
   const total = sumOf(used, (group) => group.total);
   const share = sumOf(used, (group) => group.events) / total;
   const centre = sumOf(used, (group) => group.total * group.score) / total;
-  const trend = sumOf(used, (group) => (group.events - share * group.total) * (group.score - centre));
+  const trend = sumOf(
+    used,
+    (group) => (group.events - share * group.total) * (group.score - centre),
+  );
   const spread = sumOf(used, (group) => group.total * (group.score - centre) ** 2);
   const statistic = (trend * trend) / (share * (1 - share) * spread);
   return success({
@@ -50,9 +53,6 @@ function issueOfTrend(groups: readonly ScoredGroup[]): EstimationIssue | null {
   return events === 0 || others === 0 ? { code: 'emptyMargin', facts: { events, others } } : null;
 }
 
-function sumOf(
-  groups: readonly ScoredGroup[],
-  part: (group: ScoredGroup) => number,
-): number {
+function sumOf(groups: readonly ScoredGroup[], part: (group: ScoredGroup) => number): number {
   return groups.reduce((sum, group) => sum + part(group), 0);
 }

@@ -96,7 +96,5 @@ function tail(start: number, end: number, urn: Urn): number {
 
 /** Probability of count + 1 over that of count. */
 function ratioUp(count: number, { marked, unmarked, drawn }: Urn): number {
-  return (
-    ((marked - count) / (count + 1)) * ((drawn - count) / (unmarked - drawn + count + 1))
-  );
+  return ((marked - count) / (count + 1)) * ((drawn - count) / (unmarked - drawn + count + 1));
 }

@@ -63,7 +63,9 @@ function statisticOf(
   return sum(
     rows.map((row) => {
       const share = sum(row) / total;
-      return sum(row.map((count, column) => squareOver(count, share * (columnTotals[column] ?? 0))));
+      return sum(
+        row.map((count, column) => squareOver(count, share * (columnTotals[column] ?? 0))),
+      );
     }),
   );
 }

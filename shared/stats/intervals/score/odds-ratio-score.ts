@@ -7,10 +7,7 @@ import { standardised } from './standardised';
  * `factor` enlarges the variance: 1 for Cornfield, N / (N - 1) for Miettinen and Nurminen.
  * Source: Cornfield (1956); Miettinen and Nurminen (1985) Statistics in Medicine 4:213-226.
  */
-export function oddsRatioScore(
-  table: FourfoldTable,
-  factor: number,
-): (logRatio: number) => number {
+export function oddsRatioScore(table: FourfoldTable, factor: number): (logRatio: number) => number {
   const { index, reference } = table;
   return (logRatio) => {
     const ratio = Math.exp(logRatio);
