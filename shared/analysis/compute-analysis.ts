@@ -15,10 +15,10 @@ import type { AnalysisCounts } from './tables';
  * Computes an analysis from its counts.
  *
  * Takes the specification, the frame that `frameOf` made for it, and the tally that
- * `tallyRequestOf` asked for. Gives every number of the analysis, plain and JSON-safe; a number that is not defined
- * is an issue in its place, never NaN. With adjustment "mantelHaenszel" the contrasts are also
- * pooled over strata. Fails as a whole only when specification, frame and tally do not fit each
- * other, or for an unknown method or level.
+ * `tallyRequestOf` asked for. Gives every number of the analysis, plain and JSON-safe; a number
+ * that is not defined is an issue in its place, never NaN. With adjustment "mantelHaenszel" the
+ * contrasts are also pooled over strata. Fails as a whole only when specification, frame and tally
+ * do not fit each other, or for an unknown method or level.
  */
 export function computeAnalysis(
   specification: AnalysisSpecification,
