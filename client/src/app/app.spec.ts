@@ -3,7 +3,7 @@ import { HttpTestingController, provideHttpClientTesting } from '@angular/common
 import { TestBed } from '@angular/core/testing';
 import { provideRouter, Router } from '@angular/router';
 import type { SessionView } from '#shared/api';
-import { expect, it } from 'vitest';
+import { expect, it, vi } from 'vitest';
 import { App } from './app';
 import { routes } from './app.routes';
 
@@ -20,7 +20,10 @@ async function openRoot(session: SessionView): Promise<string> {
   });
   TestBed.createComponent(App);
   const arrival = TestBed.inject(Router).navigateByUrl('/');
-  TestBed.inject(HttpTestingController).expectOne('/api/session').flush(session);
+  const server = TestBed.inject(HttpTestingController);
+  await vi.waitFor(() => {
+    server.expectOne('/api/session').flush(session);
+  });
   await arrival;
   return TestBed.inject(Router).url;
 }

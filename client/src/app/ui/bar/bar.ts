@@ -27,11 +27,11 @@ export class BarActions {
 }
 
 /**
- * Fills the bar from within a page; draws nothing where it stands. The title is the page's `h1` and
- * names the browser's tab.
+ * Fills the bar from within a page; draws nothing where it stands. The heading is the page's `h1`
+ * and names the browser's tab.
  *
  * ```html
- * Fills the bar from within a page and draws nothing itself. The title is the page's `h1` and
+ * <eh-bar [heading]="title" [contextText]="study.title" [contextLink]="['/studies', study.id]">
  *   <ng-template ehBarBeside><eh-stage-stamp stage="drafting" /></ng-template>
  *   <ng-template ehBarActions><button class="button primary">Download</button></ng-template>
  * </eh-bar>
