@@ -46,8 +46,8 @@ export interface MissingCode {
  * stands for the study's people, "{level}" for the level's sentence label, as in
  * "{people} with {level}", "{people} who {level}", "{level} {people}" or "{level}" alone;
  * `withinPattern` how a stratum is, as in "in {level}" or "among {level}". Null leaves both to the
- * phrasebook, which names column and level. `levels` are in print order. A numeric column becomes usable as a factor through
- * `bands`. `referenceLevelId` names a level or a band.
+ * phrasebook, which names column and level. `levels` are in print order. A numeric column becomes
+ * usable as a factor through `bands`. `referenceLevelId` names a level or a band.
  */
 export interface CodeBookColumn {
   readonly id: string;
@@ -68,8 +68,16 @@ export interface CodeBookColumn {
 export type CountLayout =
   | { readonly kind: 'records' }
   | { readonly kind: 'count'; readonly columnId: string }
-  | { readonly kind: 'eventsAndTotal'; readonly eventsColumnId: string; readonly totalColumnId: string }
-  | { readonly kind: 'casesAndControls'; readonly casesColumnId: string; readonly controlsColumnId: string };
+  | {
+      readonly kind: 'eventsAndTotal';
+      readonly eventsColumnId: string;
+      readonly totalColumnId: string;
+    }
+  | {
+      readonly kind: 'casesAndControls';
+      readonly casesColumnId: string;
+      readonly controlsColumnId: string;
+    };
 
 /** Column id of the outcome that two count columns stand for. */
 export const COUNTED_OUTCOME_COLUMN_ID = 'counted-outcome';
