@@ -11,11 +11,13 @@ import { bytes, key } from '../columns';
 /** What a chunk is a piece of: the codes of the rows, or the values they stand for. */
 export type ChunkPart = 'codes' | 'dictionary';
 
-/** At most 256 KiB of a column. */
-export interface ColumnChunkModel
-  extends Model<InferAttributes<ColumnChunkModel>, InferCreationAttributes<ColumnChunkModel>> {
+/** At most 256 KiB of a column, which its position in the file names. */
+export interface ColumnChunkModel extends Model<
+  InferAttributes<ColumnChunkModel>,
+  InferCreationAttributes<ColumnChunkModel>
+> {
   cutId: string;
-  columnId: string;
+  position: number;
   part: ChunkPart;
   chunk: number;
   bytes: Buffer;
@@ -25,7 +27,7 @@ export interface ColumnChunkModel
 export function defineColumnChunks(sequelize: Sequelize): ModelStatic<ColumnChunkModel> {
   return sequelize.define<ColumnChunkModel>('column_chunks', {
     cutId: key(),
-    columnId: key(),
+    position: key(DataTypes.INTEGER),
     part: key(),
     chunk: key(DataTypes.INTEGER),
     bytes: bytes(),

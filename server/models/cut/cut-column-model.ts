@@ -1,15 +1,24 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import {
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  type Model,
+  type ModelStatic,
+  type Sequelize,
+} from 'sequelize';
 import { key, text, whole } from '../columns';
 
 /**
- * One column of a cut. `width` is the number of bytes of a code; the codes and the dictionary lie
- * in chunks.
+ * One column of a cut, by its place in the file. `columnId` is what the code book calls it. `width`
+ * is the number of bytes of the widest code; the codes and the dictionary lie in chunks.
  */
-export interface CutColumnModel
-  extends Model<InferAttributes<CutColumnModel>, InferCreationAttributes<CutColumnModel>> {
+export interface CutColumnModel extends Model<
+  InferAttributes<CutColumnModel>,
+  InferCreationAttributes<CutColumnModel>
+> {
   cutId: string;
-  columnId: string;
   position: number;
+  columnId: string;
   name: string;
   width: number;
   dictionarySize: number;
@@ -19,8 +28,8 @@ export interface CutColumnModel
 export function defineCutColumns(sequelize: Sequelize): ModelStatic<CutColumnModel> {
   return sequelize.define<CutColumnModel>('cut_columns', {
     cutId: key(),
-    columnId: key(),
-    position: whole(),
+    position: key(DataTypes.INTEGER),
+    columnId: text(),
     name: text(),
     width: whole(),
     dictionarySize: whole(),

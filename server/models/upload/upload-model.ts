@@ -1,4 +1,10 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, optionalText, real, text, whole } from '../columns';
 
 /** How far an upload is. */
@@ -6,11 +12,13 @@ export type UploadState = 'reading' | 'profiled' | 'storing' | 'stored' | 'faile
 
 /**
  * A file on its way to become a cut. `filePath` is where the bytes are staged, relative to the data
- * directory. JSON: `options` ReadingOptions, `profile` CutProfile, `proposedCodeBook` CodeBook,
- * `problem` { code, message, wayOut }.
+ * directory. JSON: `options` ReadingOptions, `profile` CutProfile, `proposal` the code book to start
+ * from, `problem` { code, message, wayOut }.
  */
-export interface UploadModel
-  extends Model<InferAttributes<UploadModel>, InferCreationAttributes<UploadModel>> {
+export interface UploadModel extends Model<
+  InferAttributes<UploadModel>,
+  InferCreationAttributes<UploadModel>
+> {
   id: string;
   studyId: string;
   dataSetId: string | null;
@@ -23,7 +31,7 @@ export interface UploadModel
   rowsRead: number;
   options: string;
   profile: string | null;
-  proposedCodeBook: string | null;
+  proposal: string | null;
   problem: string | null;
   cutId: string | null;
   createdAt: string;
@@ -45,7 +53,7 @@ export function defineUploads(sequelize: Sequelize): ModelStatic<UploadModel> {
     rowsRead: whole(),
     options: text(),
     profile: optionalText(),
-    proposedCodeBook: optionalText(),
+    proposal: optionalText(),
     problem: optionalText(),
     cutId: optionalText(),
     createdAt: text(),

@@ -9,8 +9,8 @@ export const DATA_TABLES: readonly string[] = [
   'CREATE INDEX data_sets_by_study ON data_sets (study_id)',
   `CREATE TABLE cuts (
     id TEXT PRIMARY KEY NOT NULL,
-    data_set_id TEXT NOT NULL REFERENCES data_sets (id),
-    number INTEGER NOT NULL,
+    data_set_id TEXT REFERENCES data_sets (id),
+    number INTEGER,
     data_date TEXT NOT NULL,
     file_name TEXT NOT NULL,
     rows INTEGER NOT NULL,
@@ -19,26 +19,35 @@ export const DATA_TABLES: readonly string[] = [
     profile TEXT NOT NULL,
     created_at TEXT NOT NULL,
     created_by TEXT NOT NULL REFERENCES users (id),
-    UNIQUE (data_set_id, number)
+    UNIQUE (data_set_id, number),
+    CHECK (state = 'loading' OR (data_set_id IS NOT NULL AND number IS NOT NULL))
   )`,
+  `CREATE TRIGGER cuts_refuse_update BEFORE UPDATE ON cuts
+    WHEN OLD.state <> 'loading' AND NOT (OLD.state = 'ready' AND NEW.state = 'destroyed')
+    BEGIN SELECT RAISE(ABORT, 'a cut is immutable once it is ready'); END`,
   `CREATE TABLE cut_columns (
     cut_id TEXT NOT NULL REFERENCES cuts (id) ON DELETE CASCADE,
-    column_id TEXT NOT NULL,
     position INTEGER NOT NULL,
+    column_id TEXT NOT NULL,
     name TEXT NOT NULL,
     width INTEGER NOT NULL,
     dictionary_size INTEGER NOT NULL,
-    PRIMARY KEY (cut_id, column_id)
+    PRIMARY KEY (cut_id, position),
+    UNIQUE (cut_id, column_id)
   )`,
   `CREATE TABLE column_chunks (
-    cut_id TEXT NOT NULL,
-    column_id TEXT NOT NULL,
+    cut_id TEXT NOT NULL REFERENCES cuts (id) ON DELETE CASCADE,
+    position INTEGER NOT NULL,
     part TEXT NOT NULL CHECK (part IN ('codes', 'dictionary')),
     chunk INTEGER NOT NULL,
     bytes BLOB NOT NULL CHECK (length(bytes) <= 262144),
-    PRIMARY KEY (cut_id, column_id, part, chunk),
-    FOREIGN KEY (cut_id, column_id) REFERENCES cut_columns (cut_id, column_id) ON DELETE CASCADE
+    PRIMARY KEY (cut_id, position, part, chunk)
   )`,
+  `CREATE TRIGGER column_chunks_refuse_update BEFORE UPDATE ON column_chunks
+    BEGIN SELECT RAISE(ABORT, 'column chunks are immutable'); END`,
+  `CREATE TRIGGER column_chunks_refuse_insert BEFORE INSERT ON column_chunks
+    WHEN (SELECT state FROM cuts WHERE id = NEW.cut_id) IS NOT 'loading'
+    BEGIN SELECT RAISE(ABORT, 'a cut is immutable once it is ready'); END`,
   `CREATE TABLE code_books (
     id TEXT PRIMARY KEY NOT NULL,
     data_set_id TEXT NOT NULL REFERENCES data_sets (id),
@@ -62,7 +71,7 @@ export const DATA_TABLES: readonly string[] = [
     rows_read INTEGER NOT NULL,
     options TEXT NOT NULL,
     profile TEXT,
-    proposed_code_book TEXT,
+    proposal TEXT,
     problem TEXT,
     cut_id TEXT,
     created_at TEXT NOT NULL,
