@@ -1,16 +1,22 @@
-import express from 'express';
+import { readConfiguration } from './config';
+import { openDependencies } from './dependencies';
+import { serve } from './start-up/serve';
+import { welcome } from './start-up/welcome';
 
-const port = Number(process.env.PORT ?? 4600);
+const PATIENCE_IN_MILLISECONDS = 10_000;
 
-const app = express();
-app.get('/api/health', (_request, response) => {
-  response.json({ status: 'serving' });
-});
-
-const server = app.listen(port, (problem) => {
-  if (problem) throw problem;
-  console.log(`Evenhand is at http://localhost:${String(port)}`);
-});
-
-process.once('SIGTERM', () => server.close());
-process.once('SIGINT', () => server.close());
+try {
+  const config = readConfiguration(process.env);
+  console.log(`Data: ${config.dataDirectory}`);
+  const dependencies = await openDependencies(config);
+  const server = await serve(dependencies);
+  for (const line of await welcome(dependencies)) console.log(line);
+  for (const signal of ['SIGTERM', 'SIGINT'] as const) {
+    process.once(signal, () => {
+      void server.stop(PATIENCE_IN_MILLISECONDS);
+    });
+  }
+} catch (problem) {
+  console.error(problem instanceof Error ? `Evenhand can't start: ${problem.message}` : problem);
+  process.exitCode = 1;
+}

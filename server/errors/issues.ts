@@ -1,0 +1,150 @@
+/** What an issue becomes over HTTP. Titles may name facts in braces, as in {seconds}. */
+interface IssueAnswer {
+  readonly status: number;
+  readonly title: string;
+  readonly wayOut?: string;
+}
+
+/**
+ * The one table of everything the API can refuse. The code is the stable id of the problem's
+ * `type`; `title` says in plain words what is wrong and `wayOut` what to do. A new refusal is a
+ * line here.
+ */
+export const ISSUES = {
+  unreadableRequest: {
+    status: 400,
+    title: 'The request could not be read.',
+    wayOut: 'Send JSON as the description at /api/openapi.json says.',
+  },
+  invalidRequest: {
+    status: 422,
+    title: 'Some of what was sent cannot be used.',
+    wayOut: 'Correct the fields that are named and send it again.',
+  },
+  wrongContentType: {
+    status: 415,
+    title: 'The body has the wrong type: {expected} is needed here.',
+  },
+  bodyTooLarge: {
+    status: 413,
+    title: 'The request is larger than {limit} allows.',
+    wayOut: 'Send less at a time.',
+  },
+  fileTooLarge: {
+    status: 413,
+    title: 'The file is larger than {limit}, the most that can be loaded.',
+    wayOut: 'Leave out columns that the analysis does not need, or split the file.',
+  },
+  fileMissing: {
+    status: 422,
+    title: 'No file arrived.',
+    wayOut: 'Choose a file and send it again.',
+  },
+  signInNeeded: {
+    status: 401,
+    title: 'You are not signed in, or your session has ended.',
+    wayOut: 'Sign in and try again; what you typed stays in this page.',
+  },
+  signInFailed: {
+    status: 401,
+    title: 'The e-mail address and the password do not belong together.',
+    wayOut: 'Check both, or ask for a mail to set a new password.',
+  },
+  signInBlocked: {
+    status: 429,
+    title: 'Too many failed attempts for this account. Wait {seconds} seconds, then try again.',
+    wayOut: 'If you forgot the password, ask for a mail to set a new one.',
+  },
+  tooManyRequests: {
+    status: 429,
+    title: 'Too many attempts from this network address. Wait {seconds} seconds, then try again.',
+  },
+  forgedRequest: {
+    status: 403,
+    title: 'The request did not come from this application, or its page is out of date.',
+    wayOut: 'Reload the page and try again.',
+  },
+  notAllowed: {
+    status: 403,
+    title: 'Your role does not allow this.',
+    wayOut: 'Ask a lead of the study for a role that does.',
+  },
+  administratorNeeded: {
+    status: 403,
+    title: 'Only an administrator may do this.',
+    wayOut: 'Ask an administrator.',
+  },
+  notFound: {
+    status: 404,
+    title: 'There is nothing here, or it is not yours to see.',
+    wayOut: 'Check the address, or ask a lead of the study to add you.',
+  },
+  wrongCode: {
+    status: 403,
+    title: 'The code is not the one that the server printed when it started.',
+    wayOut: 'Look for the code in the output of the server; a restart prints a new one.',
+  },
+  firstAdministratorExists: {
+    status: 409,
+    title: 'An administrator exists already.',
+    wayOut: 'Sign in, or ask that administrator for an account.',
+  },
+  wrongPassword: {
+    status: 403,
+    title: 'The present password is not right.',
+    wayOut: 'Check it, or sign out and ask for a mail to set a new one.',
+  },
+  linkNotUsable: {
+    status: 410,
+    title: 'This link has been used already or is too old.',
+    wayOut: 'Ask for a new mail from the sign-in page.',
+  },
+  emailTaken: {
+    status: 409,
+    title: 'An account with this e-mail address exists already.',
+    wayOut: 'Use that account, or give another address.',
+  },
+  lastAdministrator: {
+    status: 409,
+    title: 'This is the last administrator who can sign in.',
+    wayOut: 'Make somebody else an administrator first.',
+  },
+  lastLead: {
+    status: 409,
+    title: 'This is the last lead of the study.',
+    wayOut: 'Make somebody else a lead first.',
+  },
+  memberExists: {
+    status: 409,
+    title: 'This person is a member of the study already.',
+    wayOut: 'Change the role in the list of members.',
+  },
+  accountDisabled: {
+    status: 409,
+    title: 'The account of this person is switched off.',
+    wayOut: 'Ask an administrator to switch it on first.',
+  },
+  outcomeInUse: {
+    status: 409,
+    title: 'An analysis uses this outcome: {analyses}.',
+    wayOut: 'Change or remove the analysis first.',
+  },
+  unexpected: {
+    status: 500,
+    title: 'Something went wrong on the server; it has been written to its log.',
+    wayOut: 'Try again. If it happens again, tell whoever runs this server.',
+  },
+  notServing: {
+    status: 503,
+    title: 'The server is about to stop.',
+    wayOut: 'Try again in a moment.',
+  },
+} as const satisfies Record<string, IssueAnswer>;
+
+/** Code of everything the API can refuse. */
+export type IssueCode = keyof typeof ISSUES;
+
+/** The answer that belongs to a code. */
+export function issueAnswer(code: IssueCode): IssueAnswer {
+  return ISSUES[code];
+}
