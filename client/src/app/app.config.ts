@@ -14,6 +14,7 @@ import {
 import { routes } from './app.routes';
 import { ThemeStore } from './frame/theme-choice';
 import { problemInterceptor } from './server-api/problem-interceptor';
+import { sessionInterceptor } from './session/session-interceptor';
 
 /** What the whole client shares. */
 export const appConfig: ApplicationConfig = {
@@ -27,7 +28,7 @@ export const appConfig: ApplicationConfig = {
     ),
     // Not over fetch: it cannot tell how much of an upload was sent.
     provideHttpClient(
-      withInterceptors([problemInterceptor]),
+      withInterceptors([sessionInterceptor, problemInterceptor]),
       withXsrfConfiguration({ cookieName: 'XSRF-TOKEN', headerName: 'X-XSRF-TOKEN' }),
     ),
     provideAppInitializer(() => {

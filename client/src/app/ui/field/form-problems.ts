@@ -1,4 +1,4 @@
-import { type Signal, signal } from '@angular/core';
+import { computed, type Signal, signal } from '@angular/core';
 import type { AbstractControl, FormGroup } from '@angular/forms';
 import { merge } from 'rxjs';
 import type { ApiProblem } from '../../server-api/api-problem';
@@ -14,8 +14,15 @@ export class FormProblems {
   private readonly version = signal(0);
   private readonly refused = signal<ApiProblem | null>(null);
 
-  /** What the server said about the request as a whole, when no field explains it. */
+  /** What the server refused last. */
   readonly problem: Signal<ApiProblem | null> = this.refused.asReadonly();
+
+  /** What the server refused, when no field of the form shows why. */
+  readonly unexplained = computed(() => {
+    const problem = this.refused();
+    const shown = problem?.fields.some((field) => this.form.get(field.path) !== null);
+    return shown === true ? null : problem;
+  });
 
   constructor(
     private readonly form: FormGroup,
