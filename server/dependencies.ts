@@ -1,12 +1,14 @@
 import type { Configuration } from './config';
 import type { ErrorLog } from './errors/error-handler';
 import { openDatabase, type Database } from './models/database';
+import { createBackground, type Background } from './runtime/background';
 import { systemClock, type Clock } from './runtime/clock';
 import { timeOrderedIds, type Ids } from './runtime/ids';
 import { systemRandomness, type Randomness } from './runtime/randomness';
 import { createBackOff, type BackOff } from './session/back-off';
 import { createPasswords, type Passwords } from './session/passwords';
 import { readSecrets, type Secrets } from './session/secrets';
+import { readLetters, type WriteLetter } from './mail/letters';
 import { createMailer, type Mailer } from './mail/mailer';
 
 /** What tests replace: time, ids, randomness, the log. */
@@ -25,6 +27,8 @@ export interface Dependencies extends Runtime {
   readonly passwords: Passwords;
   readonly backOff: BackOff;
   readonly mailer: Mailer;
+  readonly writeLetter: WriteLetter;
+  readonly background: Background;
   /** Lets the first administrator be made; printed at start when there are no accounts. */
   readonly firstAdministratorCode: string;
 }
@@ -54,6 +58,8 @@ export async function openDependencies(
     passwords: await createPasswords(config.passwordCost),
     backOff: createBackOff(runtime.clock),
     mailer: createMailer(config),
+    writeLetter: readLetters(config.templatesDirectory),
+    background: createBackground(runtime.log),
     firstAdministratorCode: firstAdministratorCode(runtime.randomness),
   };
 }

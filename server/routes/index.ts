@@ -1,4 +1,6 @@
+import { administrationRoutes } from './administration/administration-routes';
 import type { Route } from './route';
+import { accountRoutes } from './session/account-routes';
 import { sessionRoutes } from './session/session-routes';
 import { systemRoutes } from './system/system-routes';
 
@@ -19,4 +21,4 @@ import { systemRoutes } from './system/system-routes';
  *
  * Ids below a study must be looked up together with `study.id`: another study's are not found.
  */
-export const ROUTES: readonly Route[] = [...systemRoutes, ...sessionRoutes];
+export const ROUTES: readonly Route[] = [...systemRoutes(() => ROUTES), ...sessionRoutes, ...accountRoutes, ...administrationRoutes];

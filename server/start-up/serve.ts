@@ -22,6 +22,7 @@ export async function serve(dependencies: Dependencies): Promise<RunningServer> 
     stop: async (patience) => {
       application.stop();
       await close(server, patience);
+      await dependencies.background.idle();
       await dependencies.database.close();
     },
   };

@@ -64,6 +64,7 @@ export async function startTestApplication(
     },
     close: async () => {
       application.stop();
+      await dependencies.background.idle();
       await dependencies.database.close();
       await rm(dataDirectory, { recursive: true, force: true });
     },
