@@ -1,8 +1,9 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
-import { cellsOf, issueOfTable, marginsOf } from '../check-counts';
+import { cellsOf, issueOfTable } from '../check-counts';
 import { chiSquareUpperTail } from '../distributions';
 import type { EstimationIssue, TestOutcome } from '../estimate';
+import { fitOddsRatio } from '../fitted-odds-ratio';
 import type { FourfoldTable, GroupCount, StratifiedTable } from '../fourfold-table';
 import { riskDifferenceOf, riskRatioOf } from '../point-estimates';
 import { issueOfTest } from '../tests-of-association/fourfold-issue';
@@ -37,35 +38,11 @@ export function oddsRatioHomogeneity(strata: StratifiedTable): HomogeneityTest {
 }
 
 function breslowDayTarone(strata: StratifiedTable, oddsRatio: number): number {
-  const fits = strata.map(({ table }) => {
-    const expected = expectedEvents(table, oddsRatio);
-    const deviation = table.index.events - expected;
-    return { deviation, variance: varianceAround(table, expected) };
-  });
+  const fits = strata.map(({ table }) => fitOddsRatio(table, Math.log(oddsRatio)));
   const breslowDay = fits.reduce((sum, fit) => sum + fit.deviation ** 2 / fit.variance, 0);
   const deviation = fits.reduce((sum, fit) => sum + fit.deviation, 0);
   const variance = fits.reduce((sum, fit) => sum + fit.variance, 0);
   return breslowDay - deviation ** 2 / variance;
-}
-
-/** Events of the index group that its margins and an odds ratio lead to expect. */
-function expectedEvents(table: FourfoldTable, oddsRatio: number): number {
-  const { events } = marginsOf(table);
-  const square = 1 - oddsRatio;
-  const linear = table.reference.total - events + oddsRatio * (table.index.total + events);
-  const constant = -oddsRatio * table.index.total * events;
-  return (-2 * constant) / (linear + Math.sqrt(linear * linear - 4 * square * constant));
-}
-
-function varianceAround(table: FourfoldTable, expected: number): number {
-  const { events } = marginsOf(table);
-  const cells = [
-    expected,
-    table.index.total - expected,
-    events - expected,
-    table.reference.total - events + expected,
-  ];
-  return 1 / cells.reduce((sum, cell) => sum + 1 / cell, 0);
 }
 
 /**
