@@ -12,12 +12,14 @@ export interface RunOrigin {
   readonly addresses: readonly ValueAddress[];
 }
 
-/** Text in one style, with its origin. */
+/** Text in one style, with its origin. A line feed in `text` is a line break. */
 export interface Run {
   readonly text: string;
   readonly marks?: readonly RunMark[];
   readonly origin?: RunOrigin;
   readonly link?: string;
+  /** Block id of the table or figure that `text` ("Table 2") refers to, for a link inside. */
+  readonly reference?: string;
 }
 
 /** A number behind a printed cell, for formats that keep numbers as numbers. */
@@ -69,6 +71,8 @@ export interface ChartBar {
   readonly groupId: string;
   readonly events: number;
   readonly total: number;
+  /** The total as it prints, thousands grouped. */
+  readonly totalText: string;
   readonly value: number | null;
   readonly lower: number | null;
   readonly upper: number | null;
@@ -82,14 +86,19 @@ export interface ChartBar {
  */
 export interface GroupedBarFigure {
   readonly kind: 'groupedBars';
-  readonly categories: readonly { readonly id: string; readonly label: string; readonly note: string }[];
+  /** `note` is the n of each group in words, for where the bars are too narrow to print theirs. */
+  readonly categories: readonly {
+    readonly id: string;
+    readonly label: string;
+    readonly note: string;
+  }[];
   readonly groups: readonly { readonly id: string; readonly label: string }[];
   readonly groupsLabel: string | null;
   readonly categoriesLabel: string;
   readonly valueLabel: string;
   /** 100 prints percent. */
   readonly valueScale: number;
-  readonly decimalMark: '.' | ',';
+  readonly decimalMark: '.' | '·' | ',';
   readonly bars: readonly ChartBar[];
   readonly showValues: boolean;
   readonly ordered: boolean;
@@ -122,11 +131,18 @@ export interface ParagraphElement extends ElementBase {
   readonly runs: readonly Run[];
 }
 
+/** An item of a list; `ordered` says whether its own (perhaps nested) list is numbered. */
+export interface ListItem {
+  readonly depth: number;
+  readonly ordered: boolean;
+  readonly runs: readonly Run[];
+}
+
 /** A list; items are paragraphs of runs, one level deep or nested by `depth`. */
 export interface ListElement extends ElementBase {
   readonly kind: 'list';
   readonly ordered: boolean;
-  readonly items: readonly { readonly depth: number; readonly runs: readonly Run[] }[];
+  readonly items: readonly ListItem[];
 }
 
 /** A three-rule table. */

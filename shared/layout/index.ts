@@ -9,6 +9,7 @@ export type {
   HeadingElement,
   LayoutElement,
   ListElement,
+  ListItem,
   ParagraphElement,
   ProblemElement,
   Run,

@@ -1,0 +1,11 @@
+export { screenAppearance } from './appearance';
+export type { FigureAppearance } from './appearance';
+export { FIGURE_COLOURS } from './figure-colours';
+export type { FigureColours, FigureTheme } from './figure-colours';
+export { groupedBarSpec } from './grouped-bar-spec';
+export { groupLooks } from './group-looks';
+export type { GroupLook } from './group-looks';
+export { HATCHINGS } from './hatching';
+export type { Hatching } from './hatching';
+export { textWidth, vegaTextWidth } from './text-width';
+export type { FigureType, VegaTextItem } from './text-width';
