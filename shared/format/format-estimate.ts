@@ -25,8 +25,8 @@ export type EstimateSigns = 'signed' | 'none';
  * An estimate of a measure with its limits, as tables and sentences print it.
  *
  * `exact` is the estimate as a fraction of counts, null where there is none (a pooled estimate);
- * `decimals` are the analysis' `decimalsOf`. A difference is in the house style's unit. Limits never
- * round onto the null value; they get one more digit, and the estimate with them.
+ * `decimals` are the analysis' `decimalsOf`. A difference is in the house style's unit. Limits
+ * never round onto the null value; they get one more digit, and the estimate with them.
  */
 export function formatEstimate(
   measure: EffectMeasureId,
@@ -49,11 +49,7 @@ function differenceText(
   signs: EstimateSigns,
 ): EstimateText {
   const { scale } = DIFFERENCE_SCALES[style.difference.unit];
-  const decimals = decimalsOffTheNull(
-    interval,
-    { nullValue: 0, scale, decimals: column },
-    style,
-  );
+  const decimals = decimalsOffTheNull(interval, { nullValue: 0, scale, decimals: column }, style);
   const print = (quantity: Quantity, sign: 'minus' | 'plusAndMinus'): NumberText =>
     formatNumber(quantity, { scale, decimals, sign: signs === 'none' ? 'none' : sign }, style);
   return {

@@ -27,7 +27,10 @@ export function decimalsOffTheNull(
 ): number {
   const needed = [interval.lower, interval.upper].map((limit) => {
     let tried = decimals;
-    while (tried < MOST_DECIMALS && meetsNull(limit, { nullValue, scale, decimals: tried }, style)) {
+    while (
+      tried < MOST_DECIMALS &&
+      meetsNull(limit, { nullValue, scale, decimals: tried }, style)
+    ) {
       tried += 1;
     }
     return tried === MOST_DECIMALS ? decimals : tried;

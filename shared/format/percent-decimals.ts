@@ -29,7 +29,6 @@ function mostFrequent(votes: readonly number[]): number {
 function someShareIsSmall(groups: readonly GroupCount[], style: PercentStyle): boolean {
   const limit = style.oneMoreDecimalBelow;
   return (
-    limit !== null &&
-    groups.some(({ events, total }) => events > 0 && events * 100 < limit * total)
+    limit !== null && groups.some(({ events, total }) => events > 0 && events * 100 < limit * total)
   );
 }

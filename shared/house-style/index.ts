@@ -12,3 +12,5 @@ export type {
   SentenceStyle,
   TableStyle,
 } from './house-style';
+export { parseHouseStyle } from './parse-house-style';
+export type { HouseStyleIssue } from './field-readers';
