@@ -7,6 +7,7 @@ import { SiteSettingStore } from './site-setting/site-setting-store';
 import { MembershipStore } from './study/membership-store';
 import { MilestoneStore } from './study/milestone-store';
 import { OutcomeStore } from './study/outcome-store';
+import { StudyFiguresStore } from './study/study-figures-store';
 import { StudyStore } from './study/study-store';
 import { TokenStore } from './token/token-store';
 import { TrailStore } from './trail/trail-store';
@@ -19,6 +20,7 @@ const STORES = {
   mail: MailStore,
   siteSettings: SiteSettingStore,
   studies: StudyStore,
+  studyFigures: StudyFiguresStore,
   outcomes: OutcomeStore,
   milestones: MilestoneStore,
   memberships: MembershipStore,

@@ -2,6 +2,9 @@ import { administrationRoutes } from './administration/administration-routes';
 import type { Route } from './route';
 import { accountRoutes } from './session/account-routes';
 import { sessionRoutes } from './session/session-routes';
+import { memberRoutes } from './studies/member-routes';
+import { studyPartRoutes } from './studies/study-part-routes';
+import { studyRoutes } from './studies/study-routes';
 import { systemRoutes } from './system/system-routes';
 
 /**
@@ -21,4 +24,12 @@ import { systemRoutes } from './system/system-routes';
  *
  * Ids below a study must be looked up together with `study.id`: another study's are not found.
  */
-export const ROUTES: readonly Route[] = [...systemRoutes(() => ROUTES), ...sessionRoutes, ...accountRoutes, ...administrationRoutes];
+export const ROUTES: readonly Route[] = [
+  ...systemRoutes(() => ROUTES),
+  ...sessionRoutes,
+  ...accountRoutes,
+  ...administrationRoutes,
+  ...studyRoutes,
+  ...studyPartRoutes,
+  ...memberRoutes,
+];

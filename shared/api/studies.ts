@@ -3,8 +3,10 @@ import { STUDY_DESIGNS } from '#shared/effects/study-design';
 import { STUDY_ROLES } from '#shared/permissions';
 import { emailSchema } from './session';
 
+const idSchema = z.string().min(1).max(100);
+
 export const outcomeWordsSchema = z.object({
-  id: z.string(),
+  id: idSchema,
   noun: z.string().trim().min(1, 'Name the outcome, as in "hand eczema".').max(200),
   verbPhrase: z
     .string()
@@ -16,7 +18,7 @@ export const outcomeWordsSchema = z.object({
 });
 
 export const milestoneSchema = z.object({
-  id: z.string(),
+  id: idSchema,
   title: z.string().trim().min(1, 'Give the milestone a title.').max(200),
   dueDate: z.iso.date('Give a date such as 2026-03-31.'),
 });

@@ -31,10 +31,6 @@ export class MembershipStore {
     return (await this.memberships.findAll({ where: { userId } })).map(plain);
   }
 
-  async countLeads(studyId: string, unit: Unit): Promise<number> {
-    return this.memberships.count({ where: { studyId, role: 'lead' }, ...within(unit) });
-  }
-
   async insert(membership: Membership, unit: Unit): Promise<void> {
     await this.memberships.create(membership, within(unit));
   }

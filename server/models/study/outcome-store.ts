@@ -1,4 +1,5 @@
-import type { InferAttributes, ModelStatic, Sequelize } from 'sequelize';
+import { QueryTypes, type InferAttributes, type ModelStatic, type Sequelize } from 'sequelize';
+import type { AnalysisSpecification } from '#shared/analysis';
 import { plain, plainOrNull, within } from '../rows';
 import type { Unit } from '../unit-of-work';
 import { defineOutcomes, type OutcomeModel } from './outcome-model';
@@ -10,7 +11,7 @@ export type Outcome = Readonly<InferAttributes<OutcomeModel>>;
 export class OutcomeStore {
   private readonly outcomes: ModelStatic<OutcomeModel>;
 
-  constructor(sequelize: Sequelize) {
+  constructor(private readonly sequelize: Sequelize) {
     this.outcomes = defineOutcomes(sequelize);
   }
 
@@ -24,6 +25,19 @@ export class OutcomeStore {
     return plainOrNull(await this.outcomes.findOne({ where: { studyId, id }, ...within(unit) }));
   }
 
+  /** The names of the analyses whose present version counts this outcome. */
+  async analysesThatUse(studyId: string, id: string, unit?: Unit): Promise<readonly string[]> {
+    const rows = await this.sequelize.query<{ name: string; specification: string }>(
+      `SELECT analyses.name AS name, analysis_versions.specification AS specification
+       FROM analyses JOIN analysis_versions
+         ON analysis_versions.analysis_id = analyses.id
+         AND analysis_versions.number = analyses.version
+       WHERE analyses.removed_at IS NULL AND analyses.study_id = :studyId`,
+      { type: QueryTypes.SELECT, replacements: { studyId }, ...within(unit) },
+    );
+    return rows.filter(({ specification }) => usesOutcome(specification, id)).map(({ name }) => name);
+  }
+
   /** Inserts the outcome or replaces its words. */
   async put(outcome: Outcome, unit: Unit): Promise<void> {
     await this.outcomes.upsert(outcome, within(unit));
@@ -32,4 +46,8 @@ export class OutcomeStore {
   async remove(studyId: string, id: string, unit: Unit): Promise<void> {
     await this.outcomes.destroy({ where: { studyId, id }, ...within(unit) });
   }
+}
+
+function usesOutcome(specification: string, outcomeId: string): boolean {
+  return (JSON.parse(specification) as AnalysisSpecification).outcome.outcomeId === outcomeId;
 }
