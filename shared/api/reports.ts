@@ -18,6 +18,8 @@ export const reportSummarySchema = z.object({
   stage: z.enum(REPORT_STAGES),
   seq: z.int(),
   blockCount: z.int(),
+  /** Kinds of the first dozen blocks in view, in their order: the sketch on the desk is made of it. */
+  blockKinds: z.array(z.string()).max(12),
   updatedAt: z.string(),
   updatedBy: z.string().nullable(),
 });
@@ -73,6 +75,7 @@ export const reportViewSchema = z.object({
     stage: z.enum(REPORT_STAGES),
     seq: z.int(),
     blocks: z.array(blockSchema),
+    pins: z.record(z.string(), z.string()),
   }),
   pins: z.array(z.custom<PinnedAnalysis>((value) => typeof value === 'object' && value !== null)),
   houseStyle: z.custom<HouseStyle>((value) => typeof value === 'object' && value !== null),
