@@ -1,3 +1,4 @@
+export { numberOf } from '#shared/analysis/quantity';
 export { DIFFERENCE_SCALES } from './difference-decimals';
 export { footnoteMarker } from './footnote-marker';
 export { formatEstimate } from './format-estimate';

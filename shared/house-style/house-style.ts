@@ -82,7 +82,7 @@ export interface TableStyle {
   /** What a reference row prints for a ratio and for a difference. */
   readonly referenceRatio: string;
   readonly referenceDifference: string;
-  /** The mark of a cell without a value, and what the note says that it means. */
+  /** The mark of a cell without a value, and what it means in words; they may be the same. */
   readonly missingCell: { readonly mark: string; readonly meaning: string };
   readonly footnoteMarkers: 'letters' | 'symbols' | 'numbers';
   /** Symbols in their order; doubled when they are used up. */

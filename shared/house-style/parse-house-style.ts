@@ -96,7 +96,7 @@ const SENTENCE = recordOf<SentenceStyle>({
 const TABLE = recordOf<TableStyle>({
   referenceRatio: words(),
   referenceDifference: words(),
-  missingCell: recordOf<TableStyle['missingCell']>({ mark: words(), meaning: words('mayBeEmpty') }),
+  missingCell: recordOf<TableStyle['missingCell']>({ mark: words(), meaning: words() }),
   footnoteMarkers: oneOf('letters', 'symbols', 'numbers'),
   footnoteSymbols: listOf(words()),
   superscriptMarkers: yesOrNo,

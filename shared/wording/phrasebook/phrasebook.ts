@@ -1,10 +1,16 @@
 import type { EffectMeasureId, StudyDesign } from '#shared/effects';
+import { BALANCE_SLOTS } from './balance-slots';
 import { PRINT_SLOTS } from './print-slots';
 import { REASON_SLOTS } from './reason-slots';
 import { SENTENCE_SLOTS } from './sentence-slots';
 
 /** Every pattern that a phrasebook holds, with the slots that it may name. */
-export const PATTERN_SLOTS = { ...SENTENCE_SLOTS, ...REASON_SLOTS, ...PRINT_SLOTS } as const;
+export const PATTERN_SLOTS = {
+  ...SENTENCE_SLOTS,
+  ...REASON_SLOTS,
+  ...BALANCE_SLOTS,
+  ...PRINT_SLOTS,
+} as const;
 
 /** Key of a pattern. */
 export type PatternKey = keyof typeof PATTERN_SLOTS;

@@ -12,10 +12,8 @@ import type { Quantity } from '#shared/analysis';
 import { fillPattern, fillWords, joinParts } from '../phrasebook/fill-pattern';
 import type { Direction, PhrasePart } from '../phrase';
 import { intervalDetail, namedRatio } from './details';
+import { directionOfRatio, formOf, percentOfRatio, type RatioForm } from './ratio-form';
 import { addressOf, type WordingContext } from './wording-context';
-
-/** How a printed ratio is said: "49% higher", "4.5 times as high", or by its name at 1. */
-export type RatioForm = 'percent' | 'times' | 'named';
 
 /** The relative side of a claim, ready to be said. */
 export interface RatioWords {
@@ -51,7 +49,7 @@ export function ratioWords(
   const { interval } = estimate.value;
   return {
     form: formOf(printed),
-    direction: directionOf(printed),
+    direction: directionOfRatio(printed),
     isUnclear: interval.lower <= 1 && interval.upper >= 1,
     change: changeWords(context, printed, { quantity: measure, facet: 'value' }),
     named: namedRatio(context, measure, text),
@@ -65,31 +63,8 @@ export function ratioWords(
   };
 }
 
-/** What a printed ratio says of percent: 1.49 is 49% higher, 0.76 is 24% lower. */
-export function percentOfRatio({ units, decimals }: Decimal): Decimal {
-  const change = units - 10n ** BigInt(decimals);
-  const size = change < 0n ? -change : change;
-  return decimals < 2
-    ? { units: size * 10n ** BigInt(2 - decimals), decimals: 0 }
-    : { units: size, decimals: decimals - 2 };
-}
-
-/** Below twofold the printed ratio is said in percent, from twofold on in times. */
-export function formOf(printed: Decimal): RatioForm {
-  const one = 10n ** BigInt(printed.decimals);
-  if (printed.units === one) {
-    return 'named';
-  }
-  return printed.units >= 2n * one ? 'times' : 'percent';
-}
-
 function printedDecimal({ style }: WordingContext, value: Quantity, decimals: number): Decimal {
   return roundRational(rationalOf(value), 1, decimals, style.numbers.rounding);
-}
-
-function directionOf({ units, decimals }: Decimal): Direction {
-  const one = 10n ** BigInt(decimals);
-  return units === one ? 'same' : units > one ? 'higher' : 'lower';
 }
 
 interface RatioPlace {
@@ -104,7 +79,7 @@ function changeWords(
 ): readonly PhrasePart[] {
   const { book, style } = context;
   const form = formOf(printed);
-  const direction = directionOf(printed);
+  const direction = directionOfRatio(printed);
   if (form === 'named' || direction === 'same') {
     return fillPattern(book, 'compatible.none', {});
   }
