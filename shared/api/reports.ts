@@ -18,7 +18,7 @@ export const reportSummarySchema = z.object({
   stage: z.enum(REPORT_STAGES),
   seq: z.int(),
   blockCount: z.int(),
-  /** Kinds of the first dozen blocks in view, in their order: the sketch on the desk is made of it. */
+  /** Kinds of the first dozen blocks in view, in their order; the desk sketches the page by it. */
   blockKinds: z.array(z.string()).max(12),
   updatedAt: z.string(),
   updatedBy: z.string().nullable(),
