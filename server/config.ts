@@ -50,18 +50,18 @@ export function readConfiguration(
 ): Configuration {
   const root = projectRoot();
   const port = wholeNumber(environment, 'PORT', 4600, 65_535);
-  const address = publicUrl(environment['EVENHAND_PUBLIC_URL'], port);
+  const address = publicUrl(environment.EVENHAND_PUBLIC_URL, port);
   return {
     port,
     publicUrl: address,
-    dataDirectory: resolve(environment['EVENHAND_DATA'] ?? join(root, 'data')),
+    dataDirectory: resolve(environment.EVENHAND_DATA ?? join(root, 'data')),
     clientDirectory: join(root, 'dist', 'client'),
     templatesDirectory: join(root, 'templates'),
-    smtpUrl: filled(environment['EVENHAND_SMTP_URL']),
-    mailSender: filled(environment['EVENHAND_MAIL_FROM']) ?? 'Evenhand <evenhand@localhost>',
+    smtpUrl: filled(environment.EVENHAND_SMTP_URL),
+    mailSender: filled(environment.EVENHAND_MAIL_FROM) ?? 'Evenhand <evenhand@localhost>',
     trustedProxies: wholeNumber(environment, 'EVENHAND_TRUSTED_PROXIES', proxies(address), 16),
     ...DEFAULT_LIMITS,
-    demonstration: demonstration(environment['EVENHAND_DEMONSTRATION']),
+    demonstration: demonstration(environment.EVENHAND_DEMONSTRATION),
     answers: 'trusted',
   };
 }

@@ -1,3 +1,5 @@
+import type { HouseStyle } from '#shared/house-style';
+import type { Phrasebook } from '#shared/wording';
 import type { Configuration } from './config';
 import type { ErrorLog } from './errors/error-handler';
 import { openDatabase, type Database } from './models/database';
@@ -8,6 +10,8 @@ import { systemRandomness, type Randomness } from './runtime/randomness';
 import { createBackOff, type BackOff } from './session/back-off';
 import { createPasswords, type Passwords } from './session/passwords';
 import { readSecrets, type Secrets } from './session/secrets';
+import { readHouseStyles } from './templates/house-styles';
+import { readPhrasebook } from './templates/phrasebooks';
 import { readLetters, type WriteLetter } from './mail/letters';
 import { createMailer, type Mailer } from './mail/mailer';
 
@@ -29,6 +33,8 @@ export interface Dependencies extends Runtime {
   readonly mailer: Mailer;
   readonly writeLetter: WriteLetter;
   readonly background: Background;
+  readonly houseStyles: readonly HouseStyle[];
+  readonly phrasebook: Phrasebook;
   /** Lets the first administrator be made; printed at start when there are no accounts. */
   readonly firstAdministratorCode: string;
 }
@@ -60,6 +66,8 @@ export async function openDependencies(
     mailer: createMailer(config),
     writeLetter: readLetters(config.templatesDirectory),
     background: createBackground(runtime.log),
+    houseStyles: readHouseStyles(config.templatesDirectory),
+    phrasebook: readPhrasebook(config.templatesDirectory),
     firstAdministratorCode: firstAdministratorCode(runtime.randomness),
   };
 }

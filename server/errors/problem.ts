@@ -21,7 +21,7 @@ export function presentProblem(issue: ServerIssue): Problem {
 /** Answers a request with the problem details of an issue. */
 export function sendProblem(response: Response, issue: ServerIssue): void {
   const problem = presentProblem(issue);
-  const seconds = issue.facts?.['seconds'];
+  const seconds = issue.facts?.seconds;
   if (problem.status === 429 && typeof seconds === 'number') {
     response.set('Retry-After', String(seconds));
   }

@@ -30,7 +30,9 @@ const STORES = {
 } as const;
 
 /** Every store by name. A new one is a line in the table above. */
-export type Stores = { readonly [Name in keyof typeof STORES]: InstanceType<(typeof STORES)[Name]> };
+export type Stores = {
+  readonly [Name in keyof typeof STORES]: InstanceType<(typeof STORES)[Name]>;
+};
 
 /** Binds every store to a database. */
 export function createStores(sequelize: Sequelize): Stores {

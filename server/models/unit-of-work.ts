@@ -46,11 +46,14 @@ async function inTransaction<Value>(
   work: (unit: Unit) => Promise<Value>,
 ): Promise<Value> {
   try {
-    return await sequelize.transaction({ type: Transaction.TYPES.IMMEDIATE }, async (transaction) => {
-      const value = await work({ transaction });
-      if (isFailure(value)) throw new RolledBack(value);
-      return value;
-    });
+    return await sequelize.transaction(
+      { type: Transaction.TYPES.IMMEDIATE },
+      async (transaction) => {
+        const value = await work({ transaction });
+        if (isFailure(value)) throw new RolledBack(value);
+        return value;
+      },
+    );
   } catch (problem) {
     if (problem instanceof RolledBack) return problem.value as Value;
     throw problem;

@@ -56,7 +56,9 @@ function describeRoute(route: Route): Record<string, unknown> {
 function operationId({ method, path }: Route): string {
   const words = path.split('/').filter((part) => part !== '' && part !== 'api');
   const named = words.map((word) => (word.startsWith(':') ? `by-${word.slice(1)}` : word));
-  return [method, ...named].join('-').replace(/[-.](\w)/g, (_, letter: string) => letter.toUpperCase());
+  return [method, ...named]
+    .join('-')
+    .replace(/[-.](\w)/g, (_, letter: string) => letter.toUpperCase());
 }
 
 function pathParameters({ path }: Route): readonly unknown[] {
@@ -85,8 +87,10 @@ function queryParameters({ query }: Route): readonly unknown[] {
 function describeBody({ body, upload }: Route): Record<string, unknown> | null {
   if (upload !== null) {
     const fields = body === null ? {} : jsonSchema(body, 'input');
-    const file = { [upload.field]: { type: 'string', contentMediaType: 'application/octet-stream' } };
-    const properties = { ...(fields['properties'] as object | undefined), ...file };
+    const file = {
+      [upload.field]: { type: 'string', contentMediaType: 'application/octet-stream' },
+    };
+    const properties = { ...(fields.properties as object | undefined), ...file };
     const schema = { ...fields, type: 'object', properties };
     return { required: true, content: { 'multipart/form-data': { schema } } };
   }
@@ -110,15 +114,21 @@ function success(reply: Reply<unknown>): Record<string, unknown> {
 function refusals(route: Route): Record<string, unknown> {
   const schema = { $ref: '#/components/schemas/Problem' };
   const content = { 'application/problem+json': { schema } };
-  const described = refusalsOf(route).map((status) => [status, { description: 'Refused.', content }]);
-  return Object.fromEntries([...described, ['default', { description: 'Refused.', content }]]) as Record<
-    string,
-    unknown
-  >;
+  const described = refusalsOf(route).map((status) => [
+    status,
+    { description: 'Refused.', content },
+  ]);
+  return Object.fromEntries([
+    ...described,
+    ['default', { description: 'Refused.', content }],
+  ]) as Record<string, unknown>;
 }
 
 /** Checks that only code can make are left out; what they guard stays open in the description. */
 function jsonSchema(schema: z.ZodType, io: 'input' | 'output'): Record<string, unknown> {
-  const { $schema: _, ...described } = z.toJSONSchema(schema, { io, unrepresentable: 'any' });
+  const described: Record<string, unknown> = {
+    ...z.toJSONSchema(schema, { io, unrepresentable: 'any' }),
+  };
+  delete described.$schema;
   return described;
 }

@@ -28,7 +28,7 @@ export async function admit(
     case 'administrator':
       return person.administrator ? { ok: true, value: { person } } : refuse('administratorNeeded');
     case 'study':
-      return admitMember(person, String(request.params['studyId']), access.anyOf, dependencies);
+      return admitMember(person, String(request.params.studyId), access.anyOf, dependencies);
     default:
       return assertNever(access);
   }

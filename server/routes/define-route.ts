@@ -80,10 +80,7 @@ export function studyRoute<
   Query = undefined,
   Upload extends UploadField | undefined = undefined,
   Value = unknown,
->(
-  action: StudyAction,
-  details: RouteDetails<OnStudy, Path, Body, Query, Upload, Value>,
-): Route {
+>(action: StudyAction, details: RouteDetails<OnStudy, Path, Body, Query, Upload, Value>): Route {
   return toRoute({ kind: 'study', anyOf: [action], decide: null }, details);
 }
 
@@ -138,7 +135,7 @@ function toRoute<Who, Path extends string, Body, Query, Upload, Value>(
     body: details.body ?? null,
     query: details.query ?? null,
     upload: (details.upload as UploadField | undefined) ?? null,
-    reply: details.reply as Reply<unknown>,
+    reply: details.reply,
     limit: details.limit ?? null,
     handle: details.handle as unknown as Route['handle'],
   };

@@ -1,4 +1,5 @@
 import { administrationRoutes } from './administration/administration-routes';
+import { houseStyleRoutes } from './house-styles/house-style-routes';
 import type { Route } from './route';
 import { accountRoutes } from './session/account-routes';
 import { sessionRoutes } from './session/session-routes';
@@ -32,4 +33,5 @@ export const ROUTES: readonly Route[] = [
   ...studyRoutes,
   ...studyPartRoutes,
   ...memberRoutes,
+  ...houseStyleRoutes,
 ];

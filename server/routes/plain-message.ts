@@ -6,7 +6,9 @@ type RawIssue = Parameters<z.core.$ZodErrorMap>[0];
 export function plainMessage(issue: RawIssue): string {
   switch (issue.code) {
     case 'invalid_type':
-      return issue.input === undefined ? 'This is needed.' : `This must be ${typeInWords(issue.expected)}.`;
+      return issue.input === undefined
+        ? 'This is needed.'
+        : `This must be ${typeInWords(issue.expected)}.`;
     case 'invalid_value':
       return `This must be one of: ${issue.values.map(String).join(', ')}.`;
     case 'too_small':
@@ -37,14 +39,19 @@ function typeInWords(expected: string): string {
 
 function tooSmall(issue: z.core.$ZodRawIssue<z.core.$ZodIssueTooSmall>): string {
   const least = String(issue.minimum);
-  if (issue.origin === 'string') return least === '1' ? 'This is needed.' : `Use at least ${least} characters.`;
+  if (issue.origin === 'string')
+    return least === '1' ? 'This is needed.' : `Use at least ${least} characters.`;
   if (issue.origin === 'array') return `Give at least ${least}.`;
-  return issue.inclusive === false ? `This must be more than ${least}.` : `This must be ${least} or more.`;
+  return issue.inclusive === false
+    ? `This must be more than ${least}.`
+    : `This must be ${least} or more.`;
 }
 
 function tooBig(issue: z.core.$ZodRawIssue<z.core.$ZodIssueTooBig>): string {
   const most = String(issue.maximum);
   if (issue.origin === 'string') return `Use at most ${most} characters.`;
   if (issue.origin === 'array') return `Give at most ${most}.`;
-  return issue.inclusive === false ? `This must be less than ${most}.` : `This must be ${most} or less.`;
+  return issue.inclusive === false
+    ? `This must be less than ${most}.`
+    : `This must be ${most} or less.`;
 }

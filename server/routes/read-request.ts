@@ -63,7 +63,7 @@ function run(handler: RequestHandler, request: Request, response: Response): Pro
   return new Promise((resolve, reject) => {
     void handler(request, response, (problem?: unknown) => {
       if (problem === undefined) resolve();
-      else reject(problem instanceof Error ? problem : new Error(String(problem)));
+      else reject(problem instanceof Error ? problem : new Error('The body could not be read.'));
     });
   });
 }

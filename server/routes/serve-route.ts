@@ -17,7 +17,7 @@ export interface RouteSurroundings {
   readonly sessionOf: (request: Request, response: Response) => BrowserSession;
 }
 
-/** Serves one route: admit, read, decide, handle, answer. Later stages never run without earlier. */
+/** Serves one route: admit, read, decide, handle, answer; no stage runs without the one before. */
 export function serveRoute(route: Route, surroundings: RouteSurroundings): RequestHandler {
   return async (request, response) => {
     try {

@@ -57,7 +57,7 @@ function authenticate(
 ): Promise<Outcome<User>> {
   return new Promise((resolve, reject) => {
     const decided: Authenticated = (problem, user, issue) => {
-      if (problem != null) reject(problem instanceof Error ? problem : new Error('No answer.'));
+      if (problem !== null && problem !== undefined) reject(problem instanceof Error ? problem : new Error('No answer.'));
       else if (user === false || user === undefined) {
         resolve({ ok: false, issue: issue ?? { code: 'signInFailed' } });
       } else resolve({ ok: true, value: user });
@@ -87,7 +87,7 @@ async function end(request: Request, response: Response, config: Configuration):
 function called(act: (done: (problem?: unknown) => void) => void): Promise<void> {
   return new Promise((resolve, reject) => {
     act((problem) => {
-      if (problem == null) resolve();
+      if (problem === null || problem === undefined) resolve();
       else reject(problem instanceof Error ? problem : new Error('The session did not answer.'));
     });
   });

@@ -2,7 +2,7 @@ import sequelizeStore from 'connect-session-sequelize';
 import session, { type SessionData } from 'express-session';
 import type { Database } from '../models/database';
 import type { Clock } from '../runtime/clock';
-import { isNew, isOver } from './session-data';
+import { IDLE_LIMIT_IN_MILLISECONDS, isNew, isOver } from './session-data';
 
 const SequelizeStore = sequelizeStore(session.Store);
 const CLEARING_IN_MILLISECONDS = 15 * 60 * 1000;
@@ -21,25 +21,34 @@ export class QueuedSessionStore extends SequelizeStore {
 
   override get(sid: string, done: (problem: unknown, found?: SessionData | null) => void): void {
     super.get(sid, (problem: unknown, found) => {
-      const usable = found != null && !isOver(found, this.clock.now());
+      const usable = found !== null && found !== undefined && !isOver(found, this.clock.now());
       done(problem, usable ? found : null);
     });
   }
 
   override set(sid: string, data: SessionData, done?: (problem?: unknown) => void): void {
     const write = isNew(data)
-      ? (): Promise<void> => settled((settle) => { super.set(sid, data, settle); })
+      ? (): Promise<void> =>
+          settled((settle) => {
+            super.set(sid, data, settle);
+          })
       : (): Promise<void> => this.rewrite(sid, data);
     this.enqueue(write, done);
   }
 
   override destroy(sid: string, done?: (problem?: unknown) => void): void {
-    this.enqueue(() => settled((settle) => { super.destroy(sid, settle); }), done);
+    this.enqueue(
+      () =>
+        settled((settle) => {
+          super.destroy(sid, settle);
+        }),
+      done,
+    );
   }
 
   private rewrite(sid: string, data: SessionData): Promise<void> {
     const { sessions } = this.database.stores;
-    const expires = data.cookie.expires ?? new Date();
+    const expires = new Date(this.clock.now().getTime() + IDLE_LIMIT_IN_MILLISECONDS);
     return sessions.updateExisting(sid, JSON.stringify(data), expires);
   }
 

@@ -29,9 +29,12 @@ function secretFile(path: string, randomness: Randomness): string {
   try {
     writeFileSync(path, randomness(32).toString('hex'), { mode: 0o600, flag: 'wx' });
   } catch (problem) {
-    if (!(problem instanceof Error && 'code' in problem && problem.code === 'EEXIST')) throw problem;
+    if (!(problem instanceof Error && 'code' in problem && problem.code === 'EEXIST'))
+      throw problem;
   }
   const secret = readFileSync(path, 'utf8').trim();
   if (/^[0-9a-f]{64}$/.test(secret)) return secret;
-  throw new Error(`${path} does not hold a key; restore it from a back-up, or remove it for a new one.`);
+  throw new Error(
+    `${path} does not hold a key; restore it from a back-up, or remove it for a new one.`,
+  );
 }

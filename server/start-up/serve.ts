@@ -32,7 +32,9 @@ function listen(server: Server, port: number): Promise<void> {
   return new Promise((resolve, reject) => {
     server.once('error', (problem: NodeJS.ErrnoException) => {
       const taken = problem.code === 'EADDRINUSE';
-      reject(taken ? new Error(`Port ${String(port)} is taken; set PORT to another one.`) : problem);
+      reject(
+        taken ? new Error(`Port ${String(port)} is taken; set PORT to another one.`) : problem,
+      );
     });
     server.listen(port, resolve);
   });

@@ -4,7 +4,12 @@ import { readDemonstration } from '../services/demonstration/demonstration';
 /** What to say when the server is up: where to go, and how to get in. */
 export async function welcome(dependencies: Dependencies): Promise<readonly string[]> {
   const { config } = dependencies;
-  return ['', `Evenhand is ready. Open ${config.publicUrl}`, ...(await howToGetIn(dependencies)), ''];
+  return [
+    '',
+    `Evenhand is ready. Open ${config.publicUrl}`,
+    ...(await howToGetIn(dependencies)),
+    '',
+  ];
 }
 
 async function howToGetIn(dependencies: Dependencies): Promise<readonly string[]> {

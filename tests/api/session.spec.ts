@@ -1,5 +1,9 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { startTestApplication, TEST_PASSWORD, type TestApplication } from '../builders/test-application';
+import {
+  startTestApplication,
+  TEST_PASSWORD,
+  type TestApplication,
+} from '../builders/test-application';
 
 let application: TestApplication;
 

@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, optionalText, text, whole } from '../columns';
 
 /** An analysis of a study. `number` counts within the study (A2); `version` is the present one. */
-export interface AnalysisModel
-  extends Model<InferAttributes<AnalysisModel>, InferCreationAttributes<AnalysisModel>> {
+export interface AnalysisModel extends Model<
+  InferAttributes<AnalysisModel>,
+  InferCreationAttributes<AnalysisModel>
+> {
   id: string;
   studyId: string;
   number: number;

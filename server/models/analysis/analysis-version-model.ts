@@ -9,11 +9,10 @@ import {
 import { key, optionalText, text } from '../columns';
 
 /** One version of an analysis; immutable. `specification` is a JSON `AnalysisSpecification`. */
-export interface AnalysisVersionModel
-  extends Model<
-    InferAttributes<AnalysisVersionModel>,
-    InferCreationAttributes<AnalysisVersionModel>
-  > {
+export interface AnalysisVersionModel extends Model<
+  InferAttributes<AnalysisVersionModel>,
+  InferCreationAttributes<AnalysisVersionModel>
+> {
   analysisId: string;
   number: number;
   name: string;

@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, optionalText, text, whole } from '../columns';
 
 /** A block of a report. `content` is JSON of its kind; a removed block stays as a tombstone. */
-export interface BlockModel
-  extends Model<InferAttributes<BlockModel>, InferCreationAttributes<BlockModel>> {
+export interface BlockModel extends Model<
+  InferAttributes<BlockModel>,
+  InferCreationAttributes<BlockModel>
+> {
   reportId: string;
   id: string;
   kind: string;

@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, text, whole } from '../columns';
 
 /** One version of a data set's code book; immutable. `content` is a JSON `CodeBook`. */
-export interface CodeBookModel
-  extends Model<InferAttributes<CodeBookModel>, InferCreationAttributes<CodeBookModel>> {
+export interface CodeBookModel extends Model<
+  InferAttributes<CodeBookModel>,
+  InferCreationAttributes<CodeBookModel>
+> {
   id: string;
   dataSetId: string;
   number: number;

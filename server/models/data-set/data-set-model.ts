@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, text } from '../columns';
 
 /** A data set of a study; its cuts are the dated versions. */
-export interface DataSetModel
-  extends Model<InferAttributes<DataSetModel>, InferCreationAttributes<DataSetModel>> {
+export interface DataSetModel extends Model<
+  InferAttributes<DataSetModel>,
+  InferCreationAttributes<DataSetModel>
+> {
   id: string;
   studyId: string;
   name: string;

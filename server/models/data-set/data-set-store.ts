@@ -21,7 +21,10 @@ export class DataSetStore {
 
   /** The data sets of a study, oldest first. */
   async list(studyId: string, unit?: Unit): Promise<readonly DataSet[]> {
-    const order: [string, string][] = [['createdAt', 'ASC'], ['id', 'ASC']];
+    const order: [string, string][] = [
+      ['createdAt', 'ASC'],
+      ['id', 'ASC'],
+    ];
     return (await this.dataSets.findAll({ where: { studyId }, order, ...within(unit) })).map(plain);
   }
 

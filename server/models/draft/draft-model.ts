@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, text, whole } from '../columns';
 
 /** What a person has typed in a block and not yet made a step of; `content` is JSON. */
-export interface DraftModel
-  extends Model<InferAttributes<DraftModel>, InferCreationAttributes<DraftModel>> {
+export interface DraftModel extends Model<
+  InferAttributes<DraftModel>,
+  InferCreationAttributes<DraftModel>
+> {
   reportId: string;
   blockId: string;
   personId: string;

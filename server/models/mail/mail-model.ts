@@ -1,12 +1,20 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, optionalText, text } from '../columns';
 
 /** Where a mail went. */
 export type MailDelivery = 'outbox' | 'smtp' | 'failed';
 
 /** A mail that was sent. `text` never holds a live link: those are hidden before storing. */
-export interface MailModel
-  extends Model<InferAttributes<MailModel>, InferCreationAttributes<MailModel>> {
+export interface MailModel extends Model<
+  InferAttributes<MailModel>,
+  InferCreationAttributes<MailModel>
+> {
   id: string;
   toAddress: string;
   subject: string;

@@ -20,7 +20,10 @@ export class MailStore {
 
   /** The newest mails first, at most so many. */
   async newest(limit: number): Promise<readonly StoredMail[]> {
-    const order: [string, string][] = [['sentAt', 'DESC'], ['id', 'DESC']];
+    const order: [string, string][] = [
+      ['sentAt', 'DESC'],
+      ['id', 'DESC'],
+    ];
     return (await this.mail.findAll({ order, limit })).map(plain);
   }
 }

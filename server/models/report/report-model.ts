@@ -1,11 +1,19 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import type { ReportStage } from '#shared/report';
 import type { Framing } from '#shared/wording';
 import { key, optionalText, text, whole } from '../columns';
 
 /** A report. `seq` is the number of its last step; compare and set on it guards every change. */
-export interface ReportModel
-  extends Model<InferAttributes<ReportModel>, InferCreationAttributes<ReportModel>> {
+export interface ReportModel extends Model<
+  InferAttributes<ReportModel>,
+  InferCreationAttributes<ReportModel>
+> {
   id: string;
   studyId: string;
   title: string;

@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, text } from '../columns';
 
 /** The result that a report shows for an analysis. */
-export interface ReportPinModel
-  extends Model<InferAttributes<ReportPinModel>, InferCreationAttributes<ReportPinModel>> {
+export interface ReportPinModel extends Model<
+  InferAttributes<ReportPinModel>,
+  InferCreationAttributes<ReportPinModel>
+> {
   reportId: string;
   analysisId: string;
   resultId: string;

@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, text, whole } from '../columns';
 
 /** A stored result; immutable. `content` is a JSON `AnalysisResult` with the counts it used. */
-export interface ResultModel
-  extends Model<InferAttributes<ResultModel>, InferCreationAttributes<ResultModel>> {
+export interface ResultModel extends Model<
+  InferAttributes<ResultModel>,
+  InferCreationAttributes<ResultModel>
+> {
   id: string;
   analysisId: string;
   analysisVersion: number;

@@ -9,8 +9,10 @@ import {
 import { key, optionalText, text } from '../columns';
 
 /** A browser's session, written by the session store. `userId` lets sessions of a person end. */
-export interface SessionModel
-  extends Model<InferAttributes<SessionModel>, InferCreationAttributes<SessionModel>> {
+export interface SessionModel extends Model<
+  InferAttributes<SessionModel>,
+  InferCreationAttributes<SessionModel>
+> {
   sid: string;
   expires: Date;
   data: string;

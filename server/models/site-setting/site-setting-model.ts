@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, text } from '../columns';
 
 /** A setting of the whole installation; `content` is JSON. */
-export interface SiteSettingModel
-  extends Model<InferAttributes<SiteSettingModel>, InferCreationAttributes<SiteSettingModel>> {
+export interface SiteSettingModel extends Model<
+  InferAttributes<SiteSettingModel>,
+  InferCreationAttributes<SiteSettingModel>
+> {
   name: string;
   content: string;
 }

@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, optionalText, text, whole } from '../columns';
 
 /** An accepted step of a report; immutable. `forward` and `inverse` are JSON steps. */
-export interface StepModel
-  extends Model<InferAttributes<StepModel>, InferCreationAttributes<StepModel>> {
+export interface StepModel extends Model<
+  InferAttributes<StepModel>,
+  InferCreationAttributes<StepModel>
+> {
   reportId: string;
   /** Made by the client; a repeated one is applied once. */
   id: string;

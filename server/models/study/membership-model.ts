@@ -1,10 +1,18 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import type { StudyRole } from '#shared/permissions';
 import { key, text } from '../columns';
 
 /** The one role of a person on a study. */
-export interface MembershipModel
-  extends Model<InferAttributes<MembershipModel>, InferCreationAttributes<MembershipModel>> {
+export interface MembershipModel extends Model<
+  InferAttributes<MembershipModel>,
+  InferCreationAttributes<MembershipModel>
+> {
   studyId: string;
   userId: string;
   role: StudyRole;

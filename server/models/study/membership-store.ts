@@ -22,7 +22,10 @@ export class MembershipStore {
 
   /** The members of a study, oldest first. */
   async ofStudy(studyId: string, unit?: Unit): Promise<readonly Membership[]> {
-    const order: [string, string][] = [['createdAt', 'ASC'], ['userId', 'ASC']];
+    const order: [string, string][] = [
+      ['createdAt', 'ASC'],
+      ['userId', 'ASC'],
+    ];
     const rows = await this.memberships.findAll({ where: { studyId }, order, ...within(unit) });
     return rows.map(plain);
   }

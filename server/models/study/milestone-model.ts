@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, text } from '../columns';
 
 /** A milestone of a study; `dueDate` is a calendar date (YYYY-MM-DD). */
-export interface MilestoneModel
-  extends Model<InferAttributes<MilestoneModel>, InferCreationAttributes<MilestoneModel>> {
+export interface MilestoneModel extends Model<
+  InferAttributes<MilestoneModel>,
+  InferCreationAttributes<MilestoneModel>
+> {
   studyId: string;
   id: string;
   title: string;

@@ -16,7 +16,10 @@ export class MilestoneStore {
 
   /** The milestones of a study, by due date. */
   async list(studyId: string, unit?: Unit): Promise<readonly StoredMilestone[]> {
-    const order: [string, string][] = [['dueDate', 'ASC'], ['id', 'ASC']];
+    const order: [string, string][] = [
+      ['dueDate', 'ASC'],
+      ['id', 'ASC'],
+    ];
     const rows = await this.milestones.findAll({ where: { studyId }, order, ...within(unit) });
     return rows.map(plain);
   }

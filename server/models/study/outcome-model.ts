@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, optionalText, text, whole } from '../columns';
 
 /** An outcome of a study: the words for it. The id comes from the client and counts per study. */
-export interface OutcomeModel
-  extends Model<InferAttributes<OutcomeModel>, InferCreationAttributes<OutcomeModel>> {
+export interface OutcomeModel extends Model<
+  InferAttributes<OutcomeModel>,
+  InferCreationAttributes<OutcomeModel>
+> {
   studyId: string;
   id: string;
   position: number;

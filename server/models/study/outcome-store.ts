@@ -17,7 +17,10 @@ export class OutcomeStore {
 
   /** The outcomes of a study, in order. */
   async list(studyId: string, unit?: Unit): Promise<readonly Outcome[]> {
-    const order: [string, string][] = [['position', 'ASC'], ['id', 'ASC']];
+    const order: [string, string][] = [
+      ['position', 'ASC'],
+      ['id', 'ASC'],
+    ];
     return (await this.outcomes.findAll({ where: { studyId }, order, ...within(unit) })).map(plain);
   }
 
@@ -35,7 +38,9 @@ export class OutcomeStore {
        WHERE analyses.removed_at IS NULL AND analyses.study_id = :studyId`,
       { type: QueryTypes.SELECT, replacements: { studyId }, ...within(unit) },
     );
-    return rows.filter(({ specification }) => usesOutcome(specification, id)).map(({ name }) => name);
+    return rows
+      .filter(({ specification }) => usesOutcome(specification, id))
+      .map(({ name }) => name);
   }
 
   /** Inserts the outcome or replaces its words. */

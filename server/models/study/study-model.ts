@@ -1,10 +1,18 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import type { StudyDesign } from '#shared/effects';
 import { flag, key, text } from '../columns';
 
 /** A study. `invented` marks demonstration data. */
-export interface StudyModel
-  extends Model<InferAttributes<StudyModel>, InferCreationAttributes<StudyModel>> {
+export interface StudyModel extends Model<
+  InferAttributes<StudyModel>,
+  InferCreationAttributes<StudyModel>
+> {
   id: string;
   title: string;
   design: StudyDesign;

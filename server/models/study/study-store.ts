@@ -23,7 +23,10 @@ export class StudyStore {
 
   async findMany(ids: readonly string[], unit?: Unit): Promise<readonly Study[]> {
     const where = { id: { [Op.in]: [...ids] } };
-    const order: [string, string][] = [['updatedAt', 'DESC'], ['id', 'ASC']];
+    const order: [string, string][] = [
+      ['updatedAt', 'DESC'],
+      ['id', 'ASC'],
+    ];
     return (await this.studies.findAll({ where, order, ...within(unit) })).map(plain);
   }
 

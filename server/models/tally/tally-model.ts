@@ -1,9 +1,17 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, text } from '../columns';
 
 /** Stored counts. `hash` is made of the cut, the column-to-level maps and the restriction. */
-export interface TallyModel
-  extends Model<InferAttributes<TallyModel>, InferCreationAttributes<TallyModel>> {
+export interface TallyModel extends Model<
+  InferAttributes<TallyModel>,
+  InferCreationAttributes<TallyModel>
+> {
   hash: string;
   cutId: string;
   content: string;

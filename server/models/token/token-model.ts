@@ -1,12 +1,20 @@
-import type { InferAttributes, InferCreationAttributes, Model, ModelStatic, Sequelize } from 'sequelize';
+import type {
+  InferAttributes,
+  InferCreationAttributes,
+  Model,
+  ModelStatic,
+  Sequelize,
+} from 'sequelize';
 import { key, optionalText, text } from '../columns';
 
 /** What a mailed token lets its bearer do. */
 export type TokenPurpose = 'passwordReset' | 'invitation';
 
 /** A mailed token; only its hash is kept. */
-export interface TokenModel
-  extends Model<InferAttributes<TokenModel>, InferCreationAttributes<TokenModel>> {
+export interface TokenModel extends Model<
+  InferAttributes<TokenModel>,
+  InferCreationAttributes<TokenModel>
+> {
   hash: string;
   purpose: TokenPurpose;
   userId: string;

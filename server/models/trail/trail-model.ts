@@ -12,8 +12,10 @@ import { key, optionalText, text } from '../columns';
  * An entry of the trail; append-only. `chain` is a study's id, or `site`; `before` and `after` are
  * JSON or null; `mac` covers the entry and `previousMac`, the mac of the entry before it.
  */
-export interface TrailModel
-  extends Model<InferAttributes<TrailModel>, InferCreationAttributes<TrailModel>> {
+export interface TrailModel extends Model<
+  InferAttributes<TrailModel>,
+  InferCreationAttributes<TrailModel>
+> {
   chain: string;
   number: number;
   at: string;

@@ -36,7 +36,10 @@ export class UserStore {
 
   /** All accounts, by name. */
   async list(unit?: Unit): Promise<readonly User[]> {
-    const order: [string, string][] = [['name', 'ASC'], ['id', 'ASC']];
+    const order: [string, string][] = [
+      ['name', 'ASC'],
+      ['id', 'ASC'],
+    ];
     return (await this.users.findAll({ order, ...within(unit) })).map(plain);
   }
 

@@ -32,16 +32,19 @@ export const sessionRoutes: readonly Route[] = [
     handle: signOut,
   }),
 ];
-async function showSession({ dependencies, session, person }: Call & Partial<ByPerson>): Promise<
-  Outcome<SessionView>
-> {
+async function showSession({
+  dependencies,
+  session,
+  person,
+}: Call & Partial<ByPerson>): Promise<Outcome<SessionView>> {
   session.issueForgeryToken();
   return { ok: true, value: await viewSession(dependencies, person ?? null) };
 }
 
-async function signIn({ dependencies, session }: Call<unknown, SignInRequest>): Promise<
-  Outcome<SessionView>
-> {
+async function signIn({
+  dependencies,
+  session,
+}: Call<unknown, SignInRequest>): Promise<Outcome<SessionView>> {
   const found = await session.authenticate();
   if (!found.ok) return found;
   const person = await recordSignIn(dependencies, found.value);

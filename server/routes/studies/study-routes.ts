@@ -64,9 +64,11 @@ async function beginStudy({
   return { ok: true, value: await viewStudy(dependencies, study.id, 'lead') };
 }
 
-async function showStudy({ dependencies, study, role }: Call & OnStudy): Promise<
-  Outcome<StudyView>
-> {
+async function showStudy({
+  dependencies,
+  study,
+  role,
+}: Call & OnStudy): Promise<Outcome<StudyView>> {
   return { ok: true, value: await viewStudy(dependencies, study.id, role) };
 }
 

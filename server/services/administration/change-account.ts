@@ -2,7 +2,7 @@ import type { AccountChangeRequest } from '#shared/api';
 import type { Dependencies } from '../../dependencies';
 import { refuse, type Outcome } from '../../errors/server-issue';
 import type { Unit } from '../../models/unit-of-work';
-import type { User } from '../../models/user/user-store';
+import type { User, UserChange } from '../../models/user/user-store';
 import { appendToTrail } from '../trail/append-to-trail';
 
 /**
@@ -60,8 +60,10 @@ function recorded({ id, name, administrator, disabled }: User): Record<string, u
 }
 
 /** Only what the request really says; what it leaves out stays. */
-function withoutGaps(request: AccountChangeRequest): Partial<Omit<User, 'id'>> {
-  return Object.fromEntries(
-    Object.entries(request).filter(([, value]) => value !== undefined),
-  ) as Partial<Omit<User, 'id'>>;
+function withoutGaps({ name, administrator, disabled }: AccountChangeRequest): UserChange {
+  return {
+    ...(name === undefined ? {} : { name }),
+    ...(administrator === undefined ? {} : { administrator }),
+    ...(disabled === undefined ? {} : { disabled }),
+  };
 }

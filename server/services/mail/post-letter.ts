@@ -25,7 +25,12 @@ export async function postLetter<Name extends LetterName>(
 
 async function record(
   { database, clock, log }: Dependencies,
-  mail: { readonly id: string; readonly to: string; readonly subject: string; readonly text: string },
+  mail: {
+    readonly id: string;
+    readonly to: string;
+    readonly subject: string;
+    readonly text: string;
+  },
   delivery: Delivery,
 ): Promise<void> {
   const { id, to, subject, text } = mail;

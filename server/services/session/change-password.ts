@@ -31,7 +31,8 @@ async function provePassword(
   const seconds = backOff.secondsToWait(name);
   if (seconds > 0) return refuse('signInBlocked', { facts: { seconds } });
   backOff.recordFailure(name);
-  if (!(await passwords.verify(person.passwordHash, currentPassword))) return refuse('wrongPassword');
+  if (!(await passwords.verify(person.passwordHash, currentPassword)))
+    return refuse('wrongPassword');
   backOff.forget(name);
   return { ok: true, value: undefined };
 }

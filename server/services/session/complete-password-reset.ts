@@ -16,11 +16,14 @@ export async function completePasswordReset(
   if (person === null) return refuse('linkNotUsable');
   const hash = await hashNewPassword(dependencies, person, newPassword);
   if (!hash.ok) return hash;
-  const stored = await dependencies.database.unitOfWork<Outcome<undefined>>('site', async (unit) => {
-    if ((await bearerOf(dependencies, token, unit)) === null) return refuse('linkNotUsable');
-    await storePassword(dependencies, person, hash.value, null, unit);
-    return { ok: true, value: undefined };
-  });
+  const stored = await dependencies.database.unitOfWork<Outcome<undefined>>(
+    'site',
+    async (unit) => {
+      if ((await bearerOf(dependencies, token, unit)) === null) return refuse('linkNotUsable');
+      await storePassword(dependencies, person, hash.value, null, unit);
+      return { ok: true, value: undefined };
+    },
+  );
   if (stored.ok) announcePasswordChange(dependencies, person);
   return stored;
 }
@@ -31,7 +34,8 @@ async function bearerOf(
   unit?: Unit,
 ): Promise<User | null> {
   const found = await database.stores.tokens.find(hashToken(token), unit);
-  if (found === null || found.usedAt !== null || found.expiresAt <= timestamp(clock)) return null;
+  const isOpen = found?.usedAt === null && found.expiresAt > timestamp(clock);
+  if (!isOpen) return null;
   const person = await database.stores.users.findById(found.userId, unit);
-  return person === null || person.disabled ? null : person;
+  return person?.disabled === false ? person : null;
 }

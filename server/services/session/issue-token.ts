@@ -22,7 +22,14 @@ export async function issueToken(
   const now = clock.now();
   const expiresAt = new Date(now.getTime() + LIFETIME_IN_MILLISECONDS[purpose]).toISOString();
   await database.stores.tokens.insert(
-    { hash: hashToken(token), purpose, userId, createdAt: now.toISOString(), expiresAt, usedAt: null },
+    {
+      hash: hashToken(token),
+      purpose,
+      userId,
+      createdAt: now.toISOString(),
+      expiresAt,
+      usedAt: null,
+    },
     unit,
   );
   return linkTo(config.publicUrl, token);

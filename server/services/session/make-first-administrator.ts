@@ -30,7 +30,9 @@ export async function makeFirstAdministrator(
 /** Blanks, hyphens and case don't matter; the time taken says nothing about the code. */
 function isSameCode(given: string, expected: string): boolean {
   const [one, other] = [given, expected].map((code) =>
-    createHash('sha256').update(code.toUpperCase().replace(/[^A-Z0-9]/g, '')).digest(),
+    createHash('sha256')
+      .update(code.toUpperCase().replace(/[^A-Z0-9]/g, ''))
+      .digest(),
   );
   return one !== undefined && other !== undefined && timingSafeEqual(one, other);
 }

@@ -46,7 +46,7 @@ function leaves(password: string, words: readonly string[]): number {
 
 /** Whether every character but the first few follows the one before it, up or down. */
 function isSequence(password: string): boolean {
-  const codes = [...password].map((character) => character.codePointAt(0) ?? 0);
+  const codes = Array.from(password, (character) => character.codePointAt(0) ?? 0);
   const steps = codes.slice(1).map((code, index) => code - (codes[index] ?? 0));
   return steps.filter((step) => Math.abs(step) === 1).length >= steps.length - 1;
 }

@@ -9,11 +9,17 @@ export function presentPerson(user: User): Person {
 
 /** One or two capitals: of the first and the last word of a name. */
 export function initialsOf(name: string): string {
-  const words = name.trim().split(/\s+/).filter((word) => word !== '');
+  const words = name
+    .trim()
+    .split(/\s+/)
+    .filter((word) => word !== '');
   const chosen = words.length > 1 ? [words[0], words.at(-1)] : words;
-  return chosen.map((word) => firstCharacter(word ?? '')).join('').toLocaleUpperCase('en');
+  return chosen
+    .map((word) => firstCharacter(word ?? ''))
+    .join('')
+    .toLocaleUpperCase('en');
 }
 
 function firstCharacter(word: string): string {
-  return [...word][0] ?? '';
+  return Array.from(word)[0] ?? '';
 }

@@ -19,7 +19,12 @@ export async function createStudy(
   const now = timestamp(clock);
   const state = { invented: origin === 'invented', createdAt: now, updatedAt: now };
   const study = { id: ids.next(), ...request, ...state };
-  const membership = { studyId: study.id, userId: person.id, role: 'lead', createdAt: now } as const;
+  const membership = {
+    studyId: study.id,
+    userId: person.id,
+    role: 'lead',
+    createdAt: now,
+  } as const;
   await database.unitOfWork(`study:${study.id}`, async (unit) => {
     await database.stores.studies.insert(study, unit);
     await database.stores.memberships.insert(membership, unit);

@@ -13,7 +13,9 @@ export async function verifyTrail(
   chain: string,
 ): Promise<TrailCheck> {
   const entries = await database.stores.trail.list(chain);
-  const broken = entries.findIndex((entry, index) => !holds(entry, entries[index - 1], secrets.trail));
+  const broken = entries.findIndex(
+    (entry, index) => !holds(entry, entries[index - 1], secrets.trail),
+  );
   if (broken >= 0) return { whole: false, firstBroken: broken + 1 };
   return { whole: true, entries: entries.length, head: entries.at(-1)?.mac ?? '' };
 }
