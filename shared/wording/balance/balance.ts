@@ -11,7 +11,7 @@ export type BalanceSide =
       readonly unitText: string;
       /** "95% CI 9.7 to 23.4", signed like the size. */
       readonly intervalText: string;
-      /** Number needed, or the percent form of a ratio below twofold; null where neither is said. */
+      /** Number needed, or the percent form of a ratio below twofold; null where none is said. */
       readonly secondText: string | null;
     }
   | { readonly available: false; readonly reason: string };
@@ -25,9 +25,9 @@ export interface GaugeEdge {
 
 /**
  * What the gauge draws. `risks`: everything in shares of people, 0..1; the absolute edge is the
- * reference risk plus the difference with its limits, the relative edge the reference risk times the
- * ratio with its limits; the ends differ only in a pooled claim, and `gapText` says by how much.
- * `ratio`: a case–control claim has multiples only.
+ * reference risk plus the difference with its limits, the relative edge the reference risk times
+ * the ratio with its limits; the ends differ only in a pooled claim, and `gapText` says by how
+ * much. `ratio`: a case–control claim has multiples only.
  */
 export type BalanceGauge =
   | {

@@ -4,9 +4,9 @@ import { fillWords } from '../phrasebook/fill-pattern';
 import type { WordingContext } from '../sentence/wording-context';
 
 /**
- * The number needed of a claim with its limits: "NNTB 17 (9 to 102)" in a trial, "1 more for every 7
- * (5 to 11)" in a cohort. Where the difference's interval holds 0 the limits run through infinity.
- * Null where the design gives none, the house style says none, or nothing is estimable.
+ * The number needed of a claim with its limits: "NNTB 17 (9 to 102)" in a trial, "1 more for every
+ * 7 (5 to 11)" in a cohort. Where the difference's interval holds 0 the limits run through
+ * infinity. Null where the design gives none, the house style says none, or nothing is estimable.
  */
 export function numberNeededWords(context: WordingContext): string | null {
   const { claim, style } = context;
