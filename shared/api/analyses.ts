@@ -3,7 +3,8 @@ import type { AnalysisResult, AnalysisSpecification } from '#shared/analysis';
 
 const idSchema = z.string().min(1).max(100);
 
-export const analysisSpecificationSchema = z.object({
+/** Shape of a specification; whether it fits its code book is `frameOf`'s to say. */
+export const analysisSpecificationSchema: z.ZodType<AnalysisSpecification> = z.object({
   schemaVersion: z.literal(1),
   outcome: z.object({
     outcomeId: idSchema,
@@ -12,7 +13,9 @@ export const analysisSpecificationSchema = z.object({
   }),
   exposure: z.object({ columnId: idSchema, referenceLevelId: idSchema }),
   stratumColumnIds: z.array(idSchema).max(3),
-  restrictions: z.array(z.object({ columnId: idSchema, levelIds: z.array(idSchema).min(1) })).max(20),
+  restrictions: z
+    .array(z.object({ columnId: idSchema, levelIds: z.array(idSchema).min(1) }))
+    .max(20),
   level: z.number().gt(0.5).lt(1),
   methods: z.object({
     risk: idSchema,
@@ -27,7 +30,7 @@ export const analysisSpecificationSchema = z.object({
     importance: z.enum(['primary', 'secondary']),
     analysisSet: z.string().trim().max(200),
   }),
-}) satisfies z.ZodType<AnalysisSpecification>;
+});
 
 export const newAnalysisRequestSchema = z.object({
   name: z.string().trim().min(1, 'Give the analysis a name.').max(200),

@@ -35,7 +35,7 @@ const columnSchema = z.object({
 });
 
 /** Shape of a code book; what it must satisfy beyond shape is `validateCodeBook`'s to say. */
-export const codeBookSchema = z.object({
+export const codeBookSchema: z.ZodType<CodeBook> = z.object({
   schemaVersion: z.literal(1),
   layout: z.discriminatedUnion('kind', [
     z.object({ kind: z.literal('records') }),
@@ -52,7 +52,7 @@ export const codeBookSchema = z.object({
     }),
   ]),
   columns: z.array(columnSchema).min(1).max(2000),
-}) satisfies z.ZodType<CodeBook>;
+});
 
 /** How the file is to be read; null lets the reader find out. */
 export const readingOptionsSchema = z.object({

@@ -1,3 +1,11 @@
 import type { Routes } from '@angular/router';
+import { CodeBookListPage } from './code-book-list-page';
 
-export const codeBookRoutes: Routes = [];
+/** Pages of this feature. */
+export const codeBookRoutes: Routes = [
+  { path: '', component: CodeBookListPage },
+  {
+    path: ':dataSetId',
+    loadComponent: async () => (await import('./code-book-page')).CodeBookPage,
+  },
+];

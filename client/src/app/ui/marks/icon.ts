@@ -12,6 +12,8 @@ const PATHS = {
   right: 'm7 4.5 4.5 4.5L7 13.5',
   add: 'M9 3v12M3 9h12',
   swap: 'M3 6h11l-3-3M15 12H4l3 3',
+  drag: 'M7 5v.01M11 5v.01M7 9v.01M11 9v.01M7 13v.01M11 13v.01',
+  more: 'M9 4.5v.01M9 9v.01M9 13.5v.01',
   file: 'M5 2.5h5.5L14 6v9.5H5v-13Zm5.5 0V6H14',
 } as const;
 

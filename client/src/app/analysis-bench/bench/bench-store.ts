@@ -1,0 +1,144 @@
+import { computed, effect, inject, Injectable, linkedSignal, signal, untracked } from '@angular/core';
+import {
+  type AnalysisIssue,
+  type AnalysisResult,
+  computeAnalysis,
+  frameOf,
+  type ResultFrame,
+  type ResultScope,
+  tallyRequestOf,
+} from '#shared/analysis';
+import type { AnalysisView, CodeBookView, DataSetView } from '#shared/api';
+import type { Result } from '#shared/core';
+import type { HouseStyle } from '#shared/house-style';
+import type { ApiProblem } from '../../server-api/api-problem';
+import { CurrentStudy } from '../../session/current-study';
+import { type AnalysisDraft, emptyDraft, specificationOf } from '../draft/analysis-draft';
+import { CountsStore, wantedCounts, type WantedCounts } from './counts-store';
+import { type CutPlace, cutPlaceOf } from './cut-place';
+import { sameScope, scopesOf } from './result-scopes';
+
+/** Where the bench stands: nothing to compute yet, counting, computed, or why it cannot. */
+export type BenchState =
+  | { readonly kind: 'unpicked' }
+  | { readonly kind: 'counting' }
+  | { readonly kind: 'refused'; readonly problem: ApiProblem }
+  | { readonly kind: 'impossible'; readonly issue: AnalysisIssue }
+  | { readonly kind: 'computed'; readonly result: AnalysisResult };
+
+/** The analysis on the bench. Everything follows `draft`; only counts come from the server. */
+@Injectable()
+export class BenchStore {
+  private readonly counts = inject(CountsStore);
+  private readonly current = inject(CurrentStudy);
+
+  readonly study = this.current.study;
+  readonly mayEdit = computed(() => this.current.may('editData'));
+  readonly dataSets = signal<readonly DataSetView[]>([]);
+  readonly houseStyle = signal<HouseStyle | null>(null);
+  readonly codeBookView = signal<CodeBookView | null>(null);
+  readonly cutId = signal<string | null>(null);
+  readonly name = signal('');
+  readonly draft = signal<AnalysisDraft>(emptyDraft());
+  readonly saved = signal<AnalysisView | null>(null);
+
+  readonly codeBook = computed(() => this.codeBookView()?.content ?? null);
+  readonly cut = computed<CutPlace | null>(() => cutPlaceOf(this.dataSets(), this.cutId()));
+  readonly specification = computed(() => specificationOf(this.draft()));
+  readonly outcome = computed(() => {
+    const { outcomeId } = this.draft().outcome;
+    return this.study()?.outcomes.find(({ id }) => id === outcomeId) ?? null;
+  });
+
+  readonly frame = computed<Result<ResultFrame, AnalysisIssue> | null>(() => {
+    const [specification, codeBook, outcome, study] = [
+      this.specification(),
+      this.codeBook(),
+      this.outcome(),
+      this.study(),
+    ];
+    if (specification === null || codeBook === null || study === null) return null;
+    return outcome === null ? null : frameOf(codeBook, specification, outcome, study);
+  });
+
+  readonly wanted = computed<WantedCounts | null>(() => this.findWanted(), {
+    equal: (one, other) => one?.key === other?.key,
+  });
+  readonly state = computed<BenchState>(() => this.findState());
+
+  /** The last result, kept in view while the next is counted. */
+  readonly result = linkedSignal<BenchState, AnalysisResult | null>({
+    source: this.state,
+    computation: (state, before) => {
+      if (state.kind === 'computed') return state.result;
+      return state.kind === 'counting' ? (before?.value ?? null) : null;
+    },
+  });
+
+  readonly scopes = computed(() => {
+    const result = this.result();
+    return result === null ? [] : scopesOf(result);
+  });
+  /** The layer in view; stays while it is there, else the pooled one or all records. */
+  readonly scope = linkedSignal<readonly ResultScope[], ResultScope>({
+    source: this.scopes,
+    computation: (scopes, before) => {
+      const kept = scopes.find((scope) => before !== undefined && sameScope(scope, before.value));
+      return kept ?? scopes.find(({ kind }) => kind === 'pooled') ?? { kind: 'crude' };
+    },
+  });
+  /** The level in view, compared with the reference; the last one unless another was chosen. */
+  readonly levelId = linkedSignal<readonly string[], string | null>({
+    source: computed(() => this.indexLevelIds()),
+    computation: (ids, before) => ids.find((id) => id === before?.value) ?? ids.at(-1) ?? null,
+  });
+
+  constructor() {
+    effect(() => {
+      const wanted = this.wanted();
+      if (wanted !== null) {
+        untracked(() => {
+          this.counts.want(wanted);
+        });
+      }
+    });
+  }
+
+  change(change: (draft: AnalysisDraft) => AnalysisDraft): void {
+    this.draft.update(change);
+  }
+
+  countAgain(): void {
+    const wanted = this.wanted();
+    if (wanted !== null) this.counts.again(wanted);
+  }
+
+  private indexLevelIds(): readonly string[] {
+    const exposure = this.result()?.frame.exposure;
+    if (exposure === undefined) return [];
+    const ids = exposure.levels.map(({ id }) => id);
+    return ids.filter((id) => id !== exposure.referenceLevelId);
+  }
+
+  private findWanted(): WantedCounts | null {
+    const [study, cutId, view] = [this.study(), this.cutId(), this.codeBookView()];
+    const specification = this.specification();
+    if (study === null || cutId === null || view === null || specification === null) return null;
+    if (this.frame()?.ok !== true) return null;
+    const place = { studyId: study.id, cutId, codeBookNumber: view.number };
+    return wantedCounts(place, tallyRequestOf(specification));
+  }
+
+  private findState(): BenchState {
+    const [frame, specification, wanted] = [this.frame(), this.specification(), this.wanted()];
+    if (frame === null || specification === null) return { kind: 'unpicked' };
+    if (!frame.ok) return { kind: 'impossible', issue: frame.issue };
+    if (wanted === null) return { kind: 'unpicked' };
+    const counts = this.counts.known().get(wanted.key) ?? { kind: 'counting' };
+    if (counts.kind !== 'counted') return counts;
+    const computed = computeAnalysis(specification, frame.value, counts.tally);
+    return computed.ok
+      ? { kind: 'computed', result: computed.value }
+      : { kind: 'impossible', issue: computed.issue };
+  }
+}

@@ -1,0 +1,42 @@
+import type { AnalysisResult, ResultScope } from '#shared/analysis';
+
+/** The layers of a result in the order of their tabs: all records, each stratum, pooled. */
+export function scopesOf(result: AnalysisResult): readonly ResultScope[] {
+  return [
+    { kind: 'crude' },
+    ...result.frame.strata.map(({ id }) => ({ kind: 'stratum' as const, stratumId: id })),
+    ...(result.pooled.length > 0 ? [{ kind: 'pooled' as const }] : []),
+  ];
+}
+
+/** Whether two scopes are the same layer. */
+export function sameScope(one: ResultScope, other: ResultScope): boolean {
+  return scopeKey(one) === scopeKey(other);
+}
+
+/** A short text that only this scope has. */
+export function scopeKey(scope: ResultScope): string {
+  return scope.kind === 'stratum' ? `stratum:${scope.stratumId}` : scope.kind;
+}
+
+/** The scope's name on a tab. */
+export function scopeLabel(result: AnalysisResult, scope: ResultScope): string {
+  switch (scope.kind) {
+    case 'crude':
+      return result.frame.strata.length === 0 ? 'All records' : 'All, crude';
+    case 'pooled':
+      return 'Pooled';
+    case 'stratum':
+      return stratumLabel(result, scope.stratumId);
+  }
+}
+
+/** A stratum's label. */
+export function stratumLabel(result: AnalysisResult, stratumId: string): string {
+  return result.frame.strata.find(({ id }) => id === stratumId)?.label ?? stratumId;
+}
+
+/** An exposure level's label. */
+export function levelLabel(result: AnalysisResult, levelId: string | null): string {
+  return result.frame.exposure.levels.find(({ id }) => id === levelId)?.label ?? levelId ?? '';
+}
