@@ -22,7 +22,7 @@ export interface TallyCell {
   readonly count: number;
 }
 
-/** Records left out because of one missing code (or an unknown one), by the first axis that lacks. */
+/** Records left out for one reason (a missing or unknown code), by the first axis that lacks. */
 export interface LeftOut {
   readonly columnId: string;
   readonly reason: string;
