@@ -60,8 +60,8 @@ describe('designs', () => {
 describe('reverse', () => {
   it('of a ratio that touches 0 is not defined', () => {
     const interval = { lower: 0, upper: 2, level: 0.95, method: 'koopman' };
-    const { reverse } = EFFECT_MEASURES.riskRatio;
-    expect(reverse({ value: 0, interval })).toMatchObject({ issue: { code: 'zeroCell' } });
+    const turned = EFFECT_MEASURES.riskRatio.reverse({ value: 0, interval });
+    expect(turned).toMatchObject({ issue: { code: 'zeroCell' } });
   });
 
   it('of no difference is no negative zero', () => {

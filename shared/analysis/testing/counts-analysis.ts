@@ -12,7 +12,7 @@ import { tallyRequestOf } from '../tally-request';
 /** Events and total of one group. */
 export type Pair = readonly [events: number, total: number];
 
-/** An analysis as a test states it: counts by stratum and level, and what differs from the usual. */
+/** An analysis as a test states it: counts by stratum and level, and what is unusual. */
 export interface CountsAnalysis {
   /** Exposure levels; ids and labels alike. The first is the reference. */
   readonly levels: readonly string[];

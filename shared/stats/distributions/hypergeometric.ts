@@ -15,12 +15,14 @@ export interface Urn {
  * Source: Loader C (2000), Fast and accurate computation of binomial probabilities.
  */
 export function logHypergeometric(count: number, urn: Urn): number {
-  const share = urn.drawn / (urn.marked + urn.unmarked);
-  return (
-    logBinomial(count, urn.marked, share) +
-    logBinomial(urn.drawn - count, urn.unmarked, share) -
-    logBinomial(urn.drawn, urn.marked + urn.unmarked, share)
-  );
+  const total = urn.marked + urn.unmarked;
+  return logHypergeometricWeight(count, urn) - logBinomial(urn.drawn, total, urn.drawn / total);
+}
+
+/** The logarithm of the probability but for a term that all counts of an urn share. */
+export function logHypergeometricWeight(count: number, { marked, unmarked, drawn }: Urn): number {
+  const share = drawn / (marked + unmarked);
+  return logBinomial(count, marked, share) + logBinomial(drawn - count, unmarked, share);
 }
 
 /** Hypergeometric probability of `count` marked members among the drawn; 0 outside the support. */

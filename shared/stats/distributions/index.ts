@@ -11,6 +11,7 @@ export {
   hypergeometricProbability,
   hypergeometricSupport,
   logHypergeometric,
+  logHypergeometricWeight,
 } from './hypergeometric';
 export type { Urn } from './hypergeometric';
 export { logGamma } from './log-gamma';

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { fisherOfFourfold } from './fisher';
-import { isNoLikelier } from './hypergeometric-ties';
+import { noLikelierThan } from './hypergeometric-ties';
 
 function pValue(a: number, m: number, c: number, n: number): number {
   const table = { index: { events: a, total: m }, reference: { events: c, total: n } };
@@ -36,18 +36,18 @@ describe('fisherOfFourfold', () => {
   });
 });
 
-describe('isNoLikelier', () => {
+describe('noLikelierThan', () => {
   it('compares the products of binomial coefficients', () => {
     // C(6,1) C(10,2) = 270 and C(6,2) C(10,1) = 150.
-    expect(isNoLikelier(2, 1, { marked: 6, unmarked: 10, drawn: 3 })).toBe(true);
-    expect(isNoLikelier(1, 2, { marked: 6, unmarked: 10, drawn: 3 })).toBe(false);
+    expect(noLikelierThan(1, { marked: 6, unmarked: 10, drawn: 3 })(2)).toBe(true);
+    expect(noLikelierThan(2, { marked: 6, unmarked: 10, drawn: 3 })(1)).toBe(false);
   });
 
   it('sees ties, of equal margins and of chance', () => {
-    expect(isNoLikelier(1, 2, { marked: 3, unmarked: 3, drawn: 3 })).toBe(true);
+    expect(noLikelierThan(2, { marked: 3, unmarked: 3, drawn: 3 })(1)).toBe(true);
     // C(14,4) C(2,1) = 1001 * 2 = 2002 = C(14,5) C(2,0).
     const tied = { marked: 14, unmarked: 2, drawn: 5 };
-    expect(isNoLikelier(4, 5, tied)).toBe(true);
-    expect(isNoLikelier(5, 4, tied)).toBe(true);
+    expect(noLikelierThan(5, tied)(4)).toBe(true);
+    expect(noLikelierThan(4, tied)(5)).toBe(true);
   });
 });

@@ -6,7 +6,7 @@ import type { Urn } from '../distributions';
 import type { EstimationIssue, TestOutcome } from '../estimate';
 import type { FourfoldTable } from '../fourfold-table';
 import { issueOfTest } from './fourfold-issue';
-import { isNoLikelier } from './hypergeometric-ties';
+import { noLikelierThan } from './hypergeometric-ties';
 
 /**
  * Fisher's exact test of a fourfold table, two-sided: the probability, with all margins fixed, of
@@ -59,7 +59,8 @@ function modeOf({ marked, unmarked, drawn }: Urn): number {
  * null when even the end is likelier. Probabilities fall from the mode to the end.
  */
 function outermost(observed: number, end: number, mode: number, urn: Urn): number | null {
-  if (end === observed || !isNoLikelier(end, observed, urn)) {
+  const isNoLikelier = noLikelierThan(observed, urn);
+  if (end === observed || !isNoLikelier(end)) {
     return null;
   }
   const step = end < mode ? -1 : 1;
@@ -67,15 +68,14 @@ function outermost(observed: number, end: number, mode: number, urn: Urn): numbe
   let noLikelier = Math.abs(end - mode);
   while (noLikelier - likelier > 1) {
     const middle = Math.floor((likelier + noLikelier) / 2);
-    if (isNoLikelier(mode + step * middle, observed, urn)) {
+    if (isNoLikelier(mode + step * middle)) {
       noLikelier = middle;
     } else {
       likelier = middle;
     }
   }
-  const inner = mode + step * likelier;
-  const found = inner !== observed && likelier === 0 && isNoLikelier(inner, observed, urn);
-  return found ? inner : mode + step * noLikelier;
+  const modeTies = mode !== observed && likelier === 0 && isNoLikelier(mode);
+  return modeTies ? mode : mode + step * noLikelier;
 }
 
 /** Probability of `start` and of everything from there to `end`, by ratios of neighbours. */

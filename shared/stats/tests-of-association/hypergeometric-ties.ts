@@ -1,4 +1,4 @@
-import { logHypergeometric } from '../distributions';
+import { logHypergeometricWeight } from '../distributions';
 import type { Urn } from '../distributions';
 
 /** Logarithms farther apart than this differ for certain; nearer ones are decided exactly. */
@@ -8,20 +8,23 @@ const CERTAIN = 1e-8;
 const LONGEST_PRODUCT = 5000;
 
 /**
- * Whether a count is no likelier than another one of the same urn, with ties decided by whole
+ * Whether counts are no likelier than a given one of the same urn, with ties decided by whole
  * numbers: floating-point sums of tied tables would fall on either side.
  */
-export function isNoLikelier(count: number, other: number, urn: Urn): boolean {
-  if (count === other || areMirrored(count, other, urn)) {
-    return true;
-  }
-  const difference = logHypergeometric(count, urn) - logHypergeometric(other, urn);
-  if (Math.abs(difference) > CERTAIN || Math.abs(count - other) > LONGEST_PRODUCT) {
-    return difference <= CERTAIN;
-  }
-  return count > other
-    ? !climbs(other, count, urn, 'strictly')
-    : climbs(count, other, urn, 'orStays');
+export function noLikelierThan(given: number, urn: Urn): (count: number) => boolean {
+  const givenWeight = logHypergeometricWeight(given, urn);
+  return (count) => {
+    if (count === given || areMirrored(count, given, urn)) {
+      return true;
+    }
+    const difference = logHypergeometricWeight(count, urn) - givenWeight;
+    if (Math.abs(difference) > CERTAIN || Math.abs(count - given) > LONGEST_PRODUCT) {
+      return difference <= CERTAIN;
+    }
+    return count > given
+      ? !climbs(given, count, urn, 'strictly')
+      : climbs(count, given, urn, 'orStays');
+  };
 }
 
 /** Two counts that swapping equal margins turns into each other are equally likely. */
