@@ -12,7 +12,7 @@ import {
   withRouterConfig,
 } from '@angular/router';
 import { routes } from './app.routes';
-import { ThemeStore } from './frame/theme-choice';
+import { ThemeStore } from './ui/theme/theme-store';
 import { problemInterceptor } from './server-api/problem-interceptor';
 import { sessionInterceptor } from './session/session-interceptor';
 

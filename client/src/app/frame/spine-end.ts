@@ -1,13 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { RouterLink, RouterLinkActive } from '@angular/router';
 import { KeysDialogOpener } from './keys-dialog-opener';
-import { THEME_CHOICES, type ThemeChoice, ThemeStore } from './theme-choice';
-
-const THEME_WORDS: Readonly<Record<ThemeChoice, string>> = {
-  system: 'System',
-  light: 'Light',
-  dark: 'Dark',
-};
+import { THEME_CHOICES, THEME_WORDS, ThemeStore } from '../ui/theme/theme-store';
 
 /** The foot of the spine: help, keys and the theme. */
 @Component({

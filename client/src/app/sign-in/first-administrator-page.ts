@@ -7,8 +7,8 @@ import { Field } from '../ui/field/field';
 import { FieldControl } from '../ui/field/field-control';
 import { FormProblems } from '../ui/field/form-problems';
 import { ProblemPanel } from '../ui/status/problem-panel';
-import { PASSWORD_MESSAGES, PASSWORD_VALIDATORS } from './new-password';
-import { PasswordInput } from './password-input';
+import { PASSWORD_MESSAGES, PASSWORD_VALIDATORS } from '../ui/password/new-password';
+import { PasswordInput } from '../ui/password/password-input';
 import { SignInLayout } from './sign-in-layout';
 
 const MESSAGES = {

@@ -5,8 +5,8 @@ import { ApiProblem } from '../server-api/api-problem';
 import { SessionApi } from '../server-api/session-api';
 import { FormProblems } from '../ui/field/form-problems';
 import { ProblemPanel } from '../ui/status/problem-panel';
-import { PASSWORD_MESSAGES, PASSWORD_VALIDATORS } from './new-password';
-import { PasswordInput } from './password-input';
+import { PASSWORD_MESSAGES, PASSWORD_VALIDATORS } from '../ui/password/new-password';
+import { PasswordInput } from '../ui/password/password-input';
 
 /** Takes the new password of whoever followed the link of a mail. */
 @Component({

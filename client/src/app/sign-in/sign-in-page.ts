@@ -16,7 +16,7 @@ import { Field } from '../ui/field/field';
 import { FieldControl } from '../ui/field/field-control';
 import { FormProblems } from '../ui/field/form-problems';
 import { afterSignIn } from './after-sign-in';
-import { PasswordInput } from './password-input';
+import { PasswordInput } from '../ui/password/password-input';
 import { SignInLayout } from './sign-in-layout';
 
 const MESSAGES = {

@@ -1,8 +1,8 @@
 import { ChangeDetectionStrategy, Component, inject, input, signal } from '@angular/core';
 import { ControlContainer, ReactiveFormsModule } from '@angular/forms';
-import { Field } from '../ui/field/field';
-import { FieldControl } from '../ui/field/field-control';
-import { Icon } from '../ui/marks/icon';
+import { Field } from '../field/field';
+import { FieldControl } from '../field/field-control';
+import { Icon } from '../marks/icon';
 
 /** A password field of the form around it, whose text can be shown. */
 @Component({

@@ -1,11 +1,18 @@
 import { DOCUMENT, effect, inject, Injectable } from '@angular/core';
-import { remembered } from '../ui/remembered';
+import { remembered } from '../remembered';
 
 /** Ways to choose between light and dark. */
 export const THEME_CHOICES = ['system', 'light', 'dark'] as const;
 
 /** One of the ways. */
 export type ThemeChoice = (typeof THEME_CHOICES)[number];
+
+/** What the ways are called. */
+export const THEME_WORDS: Readonly<Record<ThemeChoice, string>> = {
+  system: 'System',
+  light: 'Light',
+  dark: 'Dark',
+};
 
 /** Light, dark, or as the system is; kept by this browser. */
 @Injectable({ providedIn: 'root' })

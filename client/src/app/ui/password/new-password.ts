@@ -13,3 +13,6 @@ export const PASSWORD_MESSAGES = {
   required: 'Choose a password of at least 12 characters.',
   minlength: 'Use at least 12 characters.',
 };
+
+/** What to say before anything was typed. */
+export const PASSWORD_HELP = 'At least 12 characters; several words are fine.';
