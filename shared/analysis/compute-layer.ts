@@ -75,13 +75,14 @@ function levelResult(
   count: GroupCount,
 ): LevelResult {
   const { events, total } = count;
-  const risk = designGivesRisk(frame.design) ? riskOf(specification, count) : failure(NOT_GIVEN);
+  const risk = designGivesRisk(frame.design) ? shareEstimate(specification, count) : failure(NOT_GIVEN);
   return { levelId, count: { events, total }, risk };
 }
 
 const NOT_GIVEN: EstimationIssue = { code: 'notGivenByDesign' };
 
-function riskOf(
+/** The share of events in a group with the interval that the analysis chose for shares. */
+export function shareEstimate(
   { methods, level }: AnalysisSpecification,
   count: GroupCount,
 ): Result<Estimate, EstimationIssue> {

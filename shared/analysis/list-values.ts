@@ -66,7 +66,7 @@ function caseControlPlaces({ frame }: AnalysisResult, scope: ResultScope): reado
   return [
     ...placesAt(scope, null, VALUE, ['controls']),
     ...frame.exposure.levels.flatMap(({ id }) =>
-      placesAt(scope, id, VALUE, CASE_CONTROL_QUANTITIES),
+      placesAt(scope, id, ESTIMATE, CASE_CONTROL_QUANTITIES),
     ),
   ];
 }

@@ -2,9 +2,10 @@ import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
 import type { EstimationIssue, GroupCount } from '#shared/stats';
 import type { AnalysisResult, LayerResult } from './analysis-result';
+import { shareEstimate } from './compute-layer';
 import { contrastTable, layerAt } from './result-places';
 import type { Quantity } from './quantity';
-import type { CaseControlQuantity, ValueAddress } from './value-address';
+import type { AddressedQuantity, CaseControlQuantity, ValueAddress } from './value-address';
 
 /** Why a case–control number is not there. */
 export type CaseControlIssue = EstimationIssue | { readonly code: 'addressNotInResult' };
@@ -13,7 +14,7 @@ type Reading = Result<Quantity, CaseControlIssue>;
 
 /**
  * A number that only a case–control study gives: controls, and the shares of its cases and controls
- * that are at a level. `compared…` ones look at the level and the reference only.
+ * that are at a level, with limits. `compared…` ones look at the level and the reference only.
  */
 export function readCaseControl(
   result: AnalysisResult,
@@ -23,9 +24,29 @@ export function readCaseControl(
   if (result.frame.design !== 'caseControl') {
     return failure({ code: 'notGivenByDesign' });
   }
-  return layer && address.facet === 'value'
+  if (!layer) {
+    return NOT_THERE;
+  }
+  return address.facet === 'value'
     ? READERS[address.quantity](layer, address.levelId)
-    : NOT_THERE;
+    : readLimit(result, layer, address);
+}
+
+/** Only the shares of all cases and of all controls have limits. */
+function readLimit(
+  { specification }: AnalysisResult,
+  layer: LayerResult,
+  { quantity, levelId, facet }: ValueAddress,
+): Reading {
+  const part = LIMITED[quantity];
+  const group = countAt(layer, levelId);
+  if (!part || !group || (facet !== 'lower' && facet !== 'upper')) {
+    return NOT_THERE;
+  }
+  const estimate = shareEstimate(specification, { events: part(group), total: part(layer.total) });
+  return estimate.ok
+    ? success({ kind: 'real', value: estimate.value.interval[facet] })
+    : estimate;
 }
 
 const NOT_THERE = failure({ code: 'addressNotInResult' } as const);
@@ -45,6 +66,11 @@ const READERS: Readonly<
     share(countAt(layer, levelId), bothGroups(layer, levelId), casesOf),
   shareOfComparedControls: (layer, levelId) =>
     share(countAt(layer, levelId), bothGroups(layer, levelId), controlsOf),
+};
+
+const LIMITED: Readonly<Partial<Record<AddressedQuantity, (count: GroupCount) => number>>> = {
+  shareOfCases: casesOf,
+  shareOfControls: controlsOf,
 };
 
 function casesOf({ events }: GroupCount): number {
