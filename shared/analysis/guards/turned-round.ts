@@ -1,5 +1,4 @@
-import { EFFECT_MEASURES } from '#shared/effects';
-import { designGivesRisk } from '#shared/effects';
+import { EFFECT_MEASURES, designGivesRisk } from '#shared/effects';
 import type { AnalysisResult, PooledContrastResult } from '../analysis-result';
 import type { Guard, GuardPoint } from './guard';
 
