@@ -37,11 +37,12 @@ export function passwordWeakness(
   return null;
 }
 
-/** How many characters stay when the words are taken out. */
+/** How many letters and digits stay when the words are taken out; all when none is in it. */
 function leaves(password: string, words: readonly string[]): number {
   const longestFirst = words.map((word) => word.toLowerCase()).filter((word) => word.length > 2);
   longestFirst.sort((one, other) => other.length - one.length);
-  return longestFirst.reduce((left, word) => left.replaceAll(word, ''), password).length;
+  const left = longestFirst.reduce((rest, word) => rest.replaceAll(word, ''), password);
+  return left === password ? password.length : left.replace(/[^\p{L}\p{N}]/gu, '').length;
 }
 
 /** Whether every character but the first few follows the one before it, up or down. */
