@@ -8,7 +8,7 @@ export type { NumberForm } from './format-number';
 export { formatPValue, pValueStatement } from './format-p-value';
 export type { PValueText } from './format-p-value';
 export { formatShare, formatShareLimit, withPercentSign } from './format-share';
-export { intervalLabel, joinLimits, limitBrackets, limitSeparator } from './limits';
+export { intervalLabel, joinLimits, levelPercent, limitBrackets, limitSeparator } from './limits';
 export { MINUS, NARROW_NO_BREAK_SPACE, NO_BREAK_SPACE } from './number-text';
 export type { NumberText, SignDisplay } from './number-text';
 export { percentIsShown } from './percent-decimals';

@@ -3,10 +3,14 @@ import { MINUS, NO_BREAK_SPACE } from './number-text';
 
 /** "95% CI" or "95% confidence interval", for a confidence level between 0 and 1. */
 export function intervalLabel(level: number, style: HouseStyle): string {
-  const percent = String(Number((level * 100).toPrecision(12)));
-  const figure = percent.replace('.', style.numbers.decimalMark);
   const words = style.interval.label === 'abbreviated' ? 'CI' : 'confidence interval';
-  return `${figure}%${NO_BREAK_SPACE}${words}`;
+  return levelPercent(level, style) + NO_BREAK_SPACE + words;
+}
+
+/** A confidence level as "95%" or "99.9%". */
+export function levelPercent(level: number, style: HouseStyle): string {
+  const percent = String(Number((level * 100).toPrecision(12)));
+  return `${percent.replace('.', style.numbers.decimalMark)}%`;
 }
 
 /**

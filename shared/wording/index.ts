@@ -3,6 +3,8 @@ export { balanceOf } from './balance/balance-of';
 export type { Claim, ClaimGroup, ClaimIssue } from './claim';
 export { claimOf } from './claim-of';
 export type { ClaimTarget } from './claim-of';
+export { guardWords } from './guards/guard-words';
+export type { GuardWords } from './guards/guard-words';
 export { issueWords } from './issue-words';
 export type { WordedIssueCode } from './issue-words';
 export { addressesOfPart, FRAMINGS, phraseText } from './phrase';
@@ -19,3 +21,15 @@ export type {
   PatternKey,
   Phrasebook,
 } from './phrasebook/phrasebook';
+export { altTextOf } from './print/alt-text';
+export { columnHeads, headWithInterval } from './print/column-heads';
+export type { ColumnHeads } from './print/column-heads';
+export { contrastSentence } from './print/contrast-sentence';
+export type { ContrastPart, ContrastSlot } from './print/contrast-sentence';
+export { figureNotes } from './print/figure-notes';
+export { homogeneityWords } from './print/homogeneity-words';
+export { methodsNoteOf } from './print/methods-note';
+export type { PrintedAnalysis } from './print/print-context';
+export { tableNotes } from './print/table-notes';
+export type { TableContents } from './print/table-notes';
+export { figureTitle, tableTitle } from './print/titles';

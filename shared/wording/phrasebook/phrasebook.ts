@@ -1,5 +1,6 @@
 import type { EffectMeasureId, StudyDesign } from '#shared/effects';
 import { BALANCE_SLOTS } from './balance-slots';
+import { GUARD_SLOTS } from './guard-slots';
 import { PRINT_SLOTS } from './print-slots';
 import { REASON_SLOTS } from './reason-slots';
 import { SENTENCE_SLOTS } from './sentence-slots';
@@ -10,6 +11,7 @@ export const PATTERN_SLOTS = {
   ...REASON_SLOTS,
   ...BALANCE_SLOTS,
   ...PRINT_SLOTS,
+  ...GUARD_SLOTS,
 } as const;
 
 /** Key of a pattern. */

@@ -1,11 +1,9 @@
-import { fillPattern, fillWords } from '../phrasebook/fill-pattern';
+import { fillPattern } from '../phrasebook/fill-pattern';
 import type { ClaimGroup } from '../claim';
 import type { PhrasePart } from '../phrase';
 import { countInBrackets } from './counts';
+import { groupWords, type Mention } from './group-words';
 import type { WordingContext } from './wording-context';
-
-/** Whether a group is named in full or, after the first, by "those" in place of the people. */
-export type Mention = 'full' | 'those';
 
 /**
  * The people of a group: "workers with over 6 hours of wet work", then "those with no wet work".
@@ -18,7 +16,7 @@ export function groupPart(
 ): PhrasePart {
   return {
     kind: 'group',
-    text: groupWords(context, level.sentenceLabel, mention),
+    text: groupWords(context.claim, level.sentenceLabel, mention, context.book),
     levelId: level.id,
   };
 }
@@ -36,21 +34,4 @@ export function countedGroup(
         group: part,
         count: countInBrackets(context, group),
       });
-}
-
-function groupWords({ claim, book }: WordingContext, level: string, mention: Mention): string {
-  const own = claim.groupPattern?.includes('{level}') ? claim.groupPattern : null;
-  const pattern =
-    own ??
-    fillWords(book, 'group.default', {
-      people: '{people}',
-      exposure: claim.exposureSentenceLabel,
-      level: '{level}',
-    });
-  const those = mention === 'those' && pattern.startsWith('{people}');
-  const people = those ? fillWords(book, 'group.those', {}) : claim.peopleNoun;
-  return pattern
-    .split(/(\{people\}|\{level\})/)
-    .map((piece) => (piece === '{people}' ? people : piece === '{level}' ? level : piece))
-    .join('');
 }

@@ -1,5 +1,6 @@
+import type { OutcomeWords } from '#shared/analysis';
 import { fillPattern, fillWords, joinParts } from '../phrasebook/fill-pattern';
-import type { OccurrenceTerms } from '../phrasebook/phrasebook';
+import type { OccurrenceTerms, Phrasebook } from '../phrasebook/phrasebook';
 import type { PhrasePart } from '../phrase';
 import type { WordingContext } from './wording-context';
 
@@ -14,8 +15,7 @@ export function occurrenceOf(context: WordingContext): readonly PhrasePart[] {
 }
 
 /** "developed hand eczema within 12 months". */
-export function verbOf({ claim, book }: WordingContext): string {
-  const { verbPhrase, timeFrame } = claim.outcome;
+export function verbWords({ verbPhrase, timeFrame }: OutcomeWords, book: Phrasebook): string {
   return timeFrame === null
     ? verbPhrase
     : fillWords(book, 'verb.timed', { verb: verbPhrase, time: timeFrame });

@@ -6,7 +6,7 @@ import { bracketed, detailOf, measureName, testDetail } from './details';
 import { differenceWords, type DifferenceWords } from './difference';
 import { countedGroup, groupPart } from './groups';
 import { openingOf } from './opening';
-import { occurrenceOf, occurrenceTerms, verbOf } from './outcome';
+import { occurrenceOf, occurrenceTerms, verbWords } from './outcome';
 import { ratioWords, type RatioWords } from './ratio';
 import { reasonOf } from './reasons';
 import type { WordingContext } from './wording-context';
@@ -168,7 +168,7 @@ function unstratified(context: WordingContext): readonly PhrasePart[] {
     ? fillPattern(book, 'more.unstratified', {
         indexCount: countInText(context, claim.index),
         referenceCount: countInText(context, claim.reference),
-        verb: verbOf(context),
+        verb: verbWords(claim.outcome, book),
       })
     : [];
 }
@@ -195,7 +195,7 @@ function ratioMissing(
         ...shared,
         indexCount: countInText(context, claim.index),
         referenceCount: countInText(context, claim.reference),
-        verb: verbOf(context),
+        verb: verbWords(claim.outcome, book),
         more,
       });
 }

@@ -1,0 +1,166 @@
+import { EFFECT_MEASURE_IDS, type EffectMeasureId } from '#shared/effects';
+import { formatCount, levelPercent } from '#shared/format';
+import type { HouseStyle } from '#shared/house-style';
+import { TEST_METHODS } from '#shared/stats';
+import { fillPattern, fillWords } from '../phrasebook/fill-pattern';
+import type { Phrasebook } from '../phrasebook/phrasebook';
+import type { Phrase, PhrasePart } from '../phrase';
+import {
+  homogeneityMethod,
+  intervalMethodsWords,
+  poolingMethodsWords,
+  scoresWords,
+  shareMethod,
+  testMethod,
+} from './method-words';
+import {
+  occurrenceWords,
+  printAddress,
+  printContext,
+  strataWords,
+  termsOf,
+  WHOLE,
+  type PrintContext,
+  type PrintedAnalysis,
+} from './print-context';
+
+/**
+ * What was done, one sentence each: the comparison, intervals, tests, pooling, homogeneity, trend,
+ * missing records, rounding, and whether the analysis was planned. Written from the methods that
+ * the result really used.
+ */
+export function methodsNoteOf(
+  analysis: PrintedAnalysis,
+  style: HouseStyle,
+  book: Phrasebook,
+): readonly Phrase[] {
+  const context = printContext(analysis, style, book);
+  const sentences = [
+    comparison(context),
+    intervals(context),
+    ...tests(context),
+    ...pooling(context),
+    ...trend(context),
+    ...missing(context),
+    givesRisks(context) ? fillPattern(book, 'methods.rounding', {}) : [],
+    ...standing(context),
+  ];
+  return sentences.filter((parts) => parts.length > 0).map((parts) => ({ parts }));
+}
+
+type Parts = readonly PhrasePart[];
+
+function givesRisks({ result }: PrintContext): boolean {
+  return result.frame.design !== 'caseControl';
+}
+
+function measuresOf(context: PrintContext): readonly EffectMeasureId[] {
+  return givesRisks(context) ? EFFECT_MEASURE_IDS : ['oddsRatio'];
+}
+
+function comparison(context: PrintContext): Parts {
+  const { result, book } = context;
+  const { exposure, outcome } = result.frame;
+  const reference = exposure.levels.find(({ id }) => id === exposure.referenceLevelId);
+  const shared = {
+    exposure: exposure.sentenceLabel,
+    reference: reference?.sentenceLabel ?? '',
+  };
+  return givesRisks(context)
+    ? fillPattern(book, 'methods.compared', { ...shared, outcome: occurrenceWords(context) })
+    : fillPattern(book, 'methods.comparedOdds', { ...shared, outcome: outcome.noun });
+}
+
+function intervals(context: PrintContext): Parts {
+  const { result, style, book } = context;
+  const level = levelPercent(result.specification.level, style);
+  const shares = fillWords(book, 'note.method', {
+    measure: termsOf(context).noun,
+    method: shareMethod(result),
+  });
+  const measures = intervalMethodsWords(context, measuresOf(context));
+  const methods = givesRisks(context)
+    ? [shares, measures].join(fillWords(book, 'list.semicolon', {}))
+    : measures;
+  return fillPattern(book, 'methods.intervals', { level, methods });
+}
+
+function tests({ style, book }: PrintContext): readonly Parts[] {
+  return style.sentence.pValue === 'omitted'
+    ? []
+    : [
+        fillPattern(book, 'methods.tests', {
+          pearson: TEST_METHODS.pearsonChiSquare.label,
+          fisher: TEST_METHODS.fisherExact.label,
+        }),
+      ];
+}
+
+function pooling(context: PrintContext): readonly Parts[] {
+  const { result, book } = context;
+  if (result.pooled.length === 0) {
+    return [];
+  }
+  const measures = measuresOf(context);
+  const independence = result.pooled
+    .map((contrast) => contrast.conditionalIndependence)
+    .find((outcome) => outcome.ok);
+  return [
+    fillPattern(book, 'methods.pooled', {
+      strata: strataWords(context) ?? '',
+      methods: poolingMethodsWords(context, measures),
+    }),
+    independence?.ok
+      ? fillPattern(book, 'methods.independence', { method: testMethod(independence.value.method) })
+      : [],
+    homogeneity(context, measures),
+  ];
+}
+
+function homogeneity(context: PrintContext, measures: readonly EffectMeasureId[]): Parts {
+  const { book } = context;
+  const methods = measures.flatMap((id) => {
+    const method = homogeneityMethod(context, id);
+    const measure = termsOf(context).measures[id].name;
+    return method === null ? [] : [fillWords(book, 'methods.homogeneityOf', { measure, method })];
+  });
+  const joined = methods.join(fillWords(book, 'list.semicolon', {}));
+  return joined === '' ? [] : fillPattern(book, 'methods.homogeneity', { methods: joined });
+}
+
+function trend(context: PrintContext): readonly Parts[] {
+  const { result, book } = context;
+  const tested = [result.crude, ...result.strata]
+    .map((layer) => layer.trend)
+    .find((outcome) => outcome.ok);
+  return tested?.ok
+    ? [
+        fillPattern(book, 'methods.trend', {
+          method: testMethod(tested.value.method),
+          scores: scoresWords(context),
+        }),
+      ]
+    : [];
+}
+
+function missing(context: PrintContext): readonly Parts[] {
+  const { result, style, book } = context;
+  const total = result.leftOut.reduce((sum, { count }) => sum + count, 0);
+  const count: PhrasePart = {
+    kind: 'value',
+    text: formatCount(total, style).text,
+    address: printAddress(context, 'leftOut', WHOLE),
+  };
+  const key = total === 1 ? 'methods.missingOne' : 'methods.missing';
+  return total === 0 ? [] : [fillPattern(book, key, { count })];
+}
+
+function standing({ result, book }: PrintContext): readonly Parts[] {
+  const { planned, importance, analysisSet } = result.specification.standing;
+  const words = fillWords(book, `methods.${importance}`, {});
+  const set = analysisSet.trim();
+  return [
+    fillPattern(book, `methods.${planned}`, { importance: words }),
+    set === '' ? [] : fillPattern(book, 'methods.analysisSet', { set }),
+  ];
+}
