@@ -22,6 +22,7 @@ export type {
   Phrasebook,
 } from './phrasebook/phrasebook';
 export { altTextOf } from './print/alt-text';
+export { valueAxisTitle } from './print/axis-titles';
 export { columnHeads, headWithInterval } from './print/column-heads';
 export type { ColumnHeads } from './print/column-heads';
 export { contrastSentence } from './print/contrast-sentence';
@@ -29,6 +30,7 @@ export type { ContrastPart, ContrastSlot } from './print/contrast-sentence';
 export { figureNotes } from './print/figure-notes';
 export { homogeneityWords } from './print/homogeneity-words';
 export { methodsNoteOf } from './print/methods-note';
+export { strataWords } from './print/print-context';
 export type { PrintedAnalysis } from './print/print-context';
 export { tableNotes } from './print/table-notes';
 export type { TableContents } from './print/table-notes';

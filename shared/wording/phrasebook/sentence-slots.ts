@@ -11,6 +11,7 @@ export const SENTENCE_SLOTS = {
   'count.inText': ['count', 'share'],
   'outcome.timed': ['occurrence', 'time'],
   'opening.postHoc': [],
+  'opening.crude': ['strata'],
   'opening.pooled': ['strata'],
   'opening.within': ['within'],
   'direction.higher': [],

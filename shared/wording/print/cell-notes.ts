@@ -2,6 +2,7 @@ import type { LayerResult } from '#shared/analysis';
 import type { Result } from '#shared/core';
 import type { EffectMeasureId } from '#shared/effects';
 import {
+  countsOnlyMark,
   formatCount,
   percentIsShown,
   rationalOf,
@@ -31,7 +32,7 @@ export function cellNotes(
   const limit = formatCount(style.percent.countsOnlyBelow, style).text;
   return [
     ...(rounded ? [{ parts: fillPattern(book, 'note.rounding', {}) }] : []),
-    ...(small ? [{ parts: fillPattern(book, 'note.countsOnly', { limit }) }] : []),
+    ...(small ? [{ parts: fillPattern(book, 'note.countsOnly', { limit, mark: countsOnlyMark(style) }) }] : []),
     ...missingCellNotes(context, contents, measures),
   ];
 }

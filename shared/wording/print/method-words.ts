@@ -15,29 +15,34 @@ export function intervalMethodsWords(
   context: PrintContext,
   measures: readonly EffectMeasureId[],
 ): string {
-  const { result, book } = context;
-  const said = measures.map((id) =>
-    fillWords(book, 'note.method', {
-      measure: termsOf(context).measures[id].name,
-      method: labelIn(EFFECT_MEASURES[id].intervals, result.specification.methods[id]),
-    }),
-  );
-  return said.join(fillWords(book, 'list.semicolon', {}));
+  const methods = measures.map((id) => ({
+    id,
+    method: labelIn(EFFECT_MEASURES[id].intervals, context.result.specification.methods[id]),
+  }));
+  return methodsForMeasures(context, methods);
 }
 
-/** The names of the pooled estimates: each measure's method once. */
+/** "Mantel–Haenszel (Sato) for the risk difference; …", for the measures that could be pooled. */
 export function poolingMethodsWords(
-  { result, book }: PrintContext,
+  context: PrintContext,
   measures: readonly EffectMeasureId[],
 ): string {
-  const ids = measures.flatMap((id) =>
-    result.pooled.flatMap((contrast) => {
-      const estimate = contrast.measures[id];
-      return estimate.ok ? [estimate.value.interval.method] : [];
-    }),
-  );
-  const labels = [...new Set(ids)].map((id) => labelIn(POOLING_METHODS, id));
-  return labels.join(fillWords(book, 'list.semicolon', {}));
+  const { result } = context;
+  const methods = measures.map((id) => {
+    const estimate = result.pooled.map((contrast) => contrast.measures[id]).find(({ ok }) => ok);
+    const method = estimate?.ok ? estimate.value.interval.method : null;
+    return { id, method: method && nameIn(POOLING_METHODS, method, 'shortLabel') };
+  });
+  return methodsForMeasures(context, methods);
+}
+
+/** "… test of homogeneity for the risk difference and the risk ratio; …". */
+export function homogeneityMethodsWords(
+  context: PrintContext,
+  measures: readonly EffectMeasureId[],
+): string {
+  const methods = measures.map((id) => ({ id, method: homogeneityMethod(context, id) }));
+  return methodsForMeasures(context, methods);
 }
 
 /** The name of a test. */
@@ -56,6 +61,9 @@ export function homogeneityMethod(
   return tested?.ok ? testMethod(tested.value.method) : null;
 }
 
+/** Fewer levels have no trend to speak of. */
+export const FEWEST_LEVELS_OF_A_TREND = 3;
+
 /** The scores of the levels, in their order: "1, 2, 3". */
 export function scoresWords({ result, book }: PrintContext): string {
   const { trendScores } = result.specification;
@@ -65,6 +73,35 @@ export function scoresWords({ result, book }: PrintContext): string {
   return scores.map(String).join(fillWords(book, 'list.comma', {}));
 }
 
+interface MeasureMethod {
+  readonly id: EffectMeasureId;
+  /** Null where the measure has none. */
+  readonly method: string | null;
+}
+
+/** Each method once, with the measures that it serves. */
+function methodsForMeasures(context: PrintContext, measures: readonly MeasureMethod[]): string {
+  const { book } = context;
+  const methods = [...new Set(measures.flatMap(({ method }) => method ?? []))];
+  const said = methods.map((method) => {
+    const served = measures.filter((measure) => measure.method === method);
+    const names = served.map(({ id }) => termsOf(context).measures[id].name);
+    return fillWords(book, 'note.method', {
+      method,
+      measure: names.join(fillWords(book, 'list.andThe', {})),
+    });
+  });
+  return said.join(fillWords(book, 'list.semicolon', {}));
+}
+
 function labelIn(register: Readonly<Record<string, MethodWords>>, id: string): string {
-  return Object.hasOwn(register, id) ? (register[id]?.label ?? id) : id;
+  return nameIn(register, id, 'label');
+}
+
+function nameIn(
+  register: Readonly<Record<string, MethodWords>>,
+  id: string,
+  name: 'label' | 'shortLabel',
+): string {
+  return Object.hasOwn(register, id) ? (register[id]?.[name] ?? id) : id;
 }

@@ -6,7 +6,8 @@ import { fillPattern, fillWords } from '../phrasebook/fill-pattern';
 import type { Phrasebook } from '../phrasebook/phrasebook';
 import type { Phrase, PhrasePart } from '../phrase';
 import {
-  homogeneityMethod,
+  FEWEST_LEVELS_OF_A_TREND,
+  homogeneityMethodsWords,
   intervalMethodsWords,
   poolingMethodsWords,
   scoresWords,
@@ -118,14 +119,8 @@ function pooling(context: PrintContext): readonly Parts[] {
 }
 
 function homogeneity(context: PrintContext, measures: readonly EffectMeasureId[]): Parts {
-  const { book } = context;
-  const methods = measures.flatMap((id) => {
-    const method = homogeneityMethod(context, id);
-    const measure = termsOf(context).measures[id].name;
-    return method === null ? [] : [fillWords(book, 'methods.homogeneityOf', { measure, method })];
-  });
-  const joined = methods.join(fillWords(book, 'list.semicolon', {}));
-  return joined === '' ? [] : fillPattern(book, 'methods.homogeneity', { methods: joined });
+  const methods = homogeneityMethodsWords(context, measures);
+  return methods === '' ? [] : fillPattern(context.book, 'methods.homogeneity', { methods });
 }
 
 function trend(context: PrintContext): readonly Parts[] {
@@ -133,7 +128,8 @@ function trend(context: PrintContext): readonly Parts[] {
   const tested = [result.crude, ...result.strata]
     .map((layer) => layer.trend)
     .find((outcome) => outcome.ok);
-  return tested?.ok
+  const levels = result.frame.exposure.levels.length;
+  return tested?.ok && levels >= FEWEST_LEVELS_OF_A_TREND
     ? [
         fillPattern(book, 'methods.trend', {
           method: testMethod(tested.value.method),

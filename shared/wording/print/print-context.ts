@@ -57,7 +57,7 @@ export function occurrenceWords(context: PrintContext): string {
 }
 
 /** The stratifying columns inside a sentence: "workplace", "sex and class"; null without strata. */
-export function strataWords({ result }: PrintContext): string | null {
+export function strataWords({ result }: Pick<PrintContext, 'result'>): string | null {
   const columns = result.frame.strata[0]?.within?.map(({ columnLabel }) => columnLabel);
   return columns ? columns.join(' and ') : (result.frame.strataLabel?.toLowerCase() ?? null);
 }

@@ -3,7 +3,12 @@ import type { EffectMeasureId } from '#shared/effects';
 import { fillPattern, fillWords } from '../phrasebook/fill-pattern';
 import type { Phrase } from '../phrase';
 import { withinWords } from '../sentence/opening';
-import { homogeneityMethod, scoresWords, testMethod } from './method-words';
+import {
+  FEWEST_LEVELS_OF_A_TREND,
+  homogeneityMethod,
+  scoresWords,
+  testMethod,
+} from './method-words';
 import { strataWords, termsOf, type PrintContext } from './print-context';
 import { testList, type PlacedTest } from './test-parts';
 import type { TableContents } from './table-notes';
@@ -35,7 +40,8 @@ export function trendNotes(context: PrintContext, contents: TableContents): read
   const placed = trendTests(context, contents);
   const tests = testList(context, placed);
   const tested = placed.map(({ outcome }) => outcome).find((outcome) => outcome.ok);
-  return tests === null || !tested?.ok
+  const levels = context.result.frame.exposure.levels.length;
+  return tests === null || !tested?.ok || levels < FEWEST_LEVELS_OF_A_TREND
     ? []
     : [
         {

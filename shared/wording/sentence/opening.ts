@@ -4,19 +4,22 @@ import type { Phrasebook } from '../phrasebook/phrasebook';
 import type { PhrasePart } from '../phrase';
 import type { WordingContext } from './wording-context';
 
-/** What a sentence says before its subject: that it is post hoc, stratified, or in one stratum. */
+/**
+ * What a sentence says before its subject: that it is post hoc, in one stratum, adjusted for the
+ * strata, or crude where there are strata.
+ */
 export function openingOf({ claim, book }: WordingContext): readonly PhrasePart[] {
   const postHoc = claim.planned === 'postHoc' ? fillPattern(book, 'opening.postHoc', {}) : [];
-  const pooled =
-    claim.scope.kind === 'pooled'
-      ? fillPattern(book, 'opening.pooled', { strata: claim.strataLabel ?? '' })
-      : [];
+  const strata = claim.strataLabel;
+  const { kind } = claim.scope;
+  const adjustment =
+    strata === null || kind === 'stratum' ? [] : fillPattern(book, `opening.${kind}`, { strata });
   const within = claim.stratum
     ? fillPattern(book, 'opening.within', {
         within: withinWords(claim.stratum, claim.strataLabel ?? '', book),
       })
     : [];
-  return joinParts([postHoc, pooled, within]);
+  return joinParts([postHoc, adjustment, within]);
 }
 
 /** Where a stratum is, in words: "in kitchens", "in kitchens, among men". */
