@@ -20,6 +20,8 @@ export interface Run {
   readonly link?: string;
   /** Block id of the table or figure that `text` ("Table 2") refers to, for a link inside. */
   readonly reference?: string;
+  /** Short form of a generated abbreviation; at its first use `text` gives the long form too. */
+  readonly abbreviation?: string;
 }
 
 /** A number behind a printed cell, for formats that keep numbers as numbers. */
@@ -77,6 +79,7 @@ export interface ChartBar {
   readonly lower: number | null;
   readonly upper: number | null;
   readonly valueText: string;
+  /** Of the value, where there is one, and of the total. */
   readonly addresses: readonly ValueAddress[];
 }
 
