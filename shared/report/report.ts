@@ -40,7 +40,11 @@ export interface PinnedAnalysis {
   readonly result: AnalysisResult;
 }
 
-/** A report with its blocks; `seq` is the number of the last step. */
+/**
+ * A report with its blocks, removed ones included, in no particular order (`visibleBlocks` sorts).
+ * `seq` is the number of the last step; `pins` holds the result id that each analysis is shown
+ * with, by analysis id.
+ */
 export interface Report {
   readonly id: string;
   readonly studyId: string;
@@ -50,4 +54,5 @@ export interface Report {
   readonly stage: ReportStage;
   readonly seq: number;
   readonly blocks: readonly Block[];
+  readonly pins: Readonly<Record<string, string>>;
 }
