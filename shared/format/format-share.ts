@@ -24,6 +24,14 @@ export function formatShare(
     : null;
 }
 
+/**
+ * What stands in place of a percentage for which a group is too small. Never the mark of a missing
+ * cell: the share is there, it is only not printed.
+ */
+export function countsOnlyMark({ table }: HouseStyle): string {
+  return table.missingCell.mark === '–' ? '…' : '–';
+}
+
 /** A limit of a share (0..1) as a percentage without its sign. */
 export function formatShareLimit(limit: number, decimals: number, style: HouseStyle): NumberText {
   return formatNumber(

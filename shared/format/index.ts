@@ -7,7 +7,7 @@ export { formatCount, formatNumber } from './format-number';
 export type { NumberForm } from './format-number';
 export { formatPValue, pValueStatement } from './format-p-value';
 export type { PValueText } from './format-p-value';
-export { formatShare, formatShareLimit, withPercentSign } from './format-share';
+export { countsOnlyMark, formatShare, formatShareLimit, withPercentSign } from './format-share';
 export { intervalLabel, joinLimits, levelPercent, limitBrackets, limitSeparator } from './limits';
 export { MINUS, NARROW_NO_BREAK_SPACE, NO_BREAK_SPACE } from './number-text';
 export type { NumberText, SignDisplay } from './number-text';

@@ -1,0 +1,45 @@
+import { failure, success } from '#shared/core';
+import type { Result } from '#shared/core';
+import type { ContentIssue } from '../content-issue';
+import type { Block } from '../report';
+import type { BlockKind } from './block-kind';
+import { EFFECT_SENTENCE } from './effect-sentence/effect-sentence';
+import { GROUPED_BAR_CHART } from './grouped-bar-chart/grouped-bar-chart';
+import { HEADING } from './heading/heading';
+import { PROSE } from './prose/prose';
+import { STRATIFIED_TABLE } from './stratified-table/stratified-table';
+
+/** Every kind of block, in the order in which a menu offers them. */
+export const BLOCK_KINDS = {
+  heading: HEADING,
+  prose: PROSE,
+  stratifiedTable: STRATIFIED_TABLE,
+  groupedBarChart: GROUPED_BAR_CHART,
+  effectSentence: EFFECT_SENTENCE,
+} as const;
+
+/** Id of a kind of block. */
+export type BlockKindId = keyof typeof BLOCK_KINDS;
+
+/** The kinds as a list, in the order of the menu. */
+export const BLOCK_KIND_LIST: readonly BlockKind[] = Object.values<BlockKind>(BLOCK_KINDS);
+
+/** The kind with this id, or the issue `unknownBlockKind`. */
+export function blockKindOf(id: string): Result<BlockKind, ContentIssue> {
+  if (Object.hasOwn(BLOCK_KINDS, id)) return success(BLOCK_KINDS[id as BlockKindId]);
+  return failure({ code: 'unknownBlockKind', facts: { kind: id.slice(0, 60) } });
+}
+
+/** Reads unknown JSON as content of the kind with this id. */
+export function parseContent(kindId: string, content: unknown): Result<unknown, ContentIssue> {
+  const kind = blockKindOf(kindId);
+  return kind.ok ? kind.value.parseContent(content) : kind;
+}
+
+/** Ids of the analyses that a block shows; none where its content can't be read. */
+export function analysisIdsOf(block: Pick<Block, 'kind' | 'content'>): readonly string[] {
+  const kind = blockKindOf(block.kind);
+  if (!kind.ok) return [];
+  const content = kind.value.parseContent(block.content);
+  return content.ok ? kind.value.analysisIdsOf(content.value) : [];
+}

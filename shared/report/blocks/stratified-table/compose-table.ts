@@ -1,0 +1,48 @@
+import type { LayoutElement, Run, TableElement } from '#shared/layout';
+import { tableTitle } from '#shared/wording';
+import { documentToRuns } from '../../text/text-runs';
+import type { BlockContext } from '../block-context';
+import { inlineContext } from '../inline-context';
+import { phraseRuns } from '../phrase-runs';
+import { pinnedAnalysis, problemElement } from '../pinned-result';
+import { printedDecimals } from '../printed-decimals';
+import type { StratifiedTableContent } from './content';
+import { layTable } from './lay-table';
+import { notesOfTable } from './table-notes';
+import { planTable } from './table-plan';
+import type { TableSetting } from './table-setting';
+
+/**
+ * A three-rule table of one analysis: caption, spanner and column heads, a row for each exposure
+ * level in each layer, notes. Every number is a run bound to its address, and a number beside it.
+ */
+export function composeStratifiedTable(
+  content: StratifiedTableContent,
+  context: BlockContext,
+): readonly LayoutElement[] {
+  const pinned = pinnedAnalysis(content.analysisId, context);
+  if (!pinned.ok) return problemElement(pinned.issue, context);
+  const { analysisId, result } = pinned.value;
+  const { blockId, houseStyle, phrasebook } = context;
+  const decimals = printedDecimals(result, houseStyle);
+  const setting = { blockId, analysisId, result, decimals, houseStyle, phrasebook };
+  const plan = planTable(content, result, context.framing);
+  const table: TableElement = {
+    kind: 'table',
+    blockId,
+    caption: { label: 'Table', number: 0, runs: titleRuns(content, setting, context) },
+    ...layTable(plan, setting),
+    notes: notesOfTable(content.show, plan, setting),
+  };
+  return [table];
+}
+
+function titleRuns(
+  { title }: StratifiedTableContent,
+  setting: TableSetting,
+  context: BlockContext,
+): readonly Run[] {
+  if (title !== null) return documentToRuns(title, inlineContext(context));
+  const { houseStyle, phrasebook, blockId } = setting;
+  return phraseRuns(tableTitle(setting, houseStyle, phrasebook), blockId);
+}

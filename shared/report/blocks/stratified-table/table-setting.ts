@@ -1,0 +1,14 @@
+import type { AnalysisResult } from '#shared/analysis';
+import type { PrintedDecimals } from '#shared/format';
+import type { HouseStyle } from '#shared/house-style';
+import type { Phrasebook } from '#shared/wording';
+
+/** What every cell of a table is printed under. */
+export interface TableSetting {
+  readonly blockId: string;
+  readonly analysisId: string;
+  readonly result: AnalysisResult;
+  readonly decimals: PrintedDecimals;
+  readonly houseStyle: HouseStyle;
+  readonly phrasebook: Phrasebook;
+}
