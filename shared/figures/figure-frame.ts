@@ -36,10 +36,7 @@ export const MOST_BARS_WITH_VALUES = 12;
 export const GAP = 6;
 
 /** Works out the frame of a figure. */
-export function figureFrame(
-  figure: GroupedBarFigure,
-  appearance: FigureAppearance,
-): FigureFrame {
+export function figureFrame(figure: GroupedBarFigure, appearance: FigureAppearance): FigureFrame {
   const type = regular(appearance);
   const lineHeight = Math.round(appearance.fontSize * 1.3);
   const plotHeight = appearance.plotHeight ?? heightFor(appearance.width);

@@ -21,10 +21,7 @@ const AFTER_SWATCH = 6;
 const AFTER_ENTRY = 18;
 
 /** The rows of the key over the plot, bars' order, broken where they don't fit; often none. */
-export function keyRows(
-  figure: GroupedBarFigure,
-  appearance: FigureAppearance,
-): readonly KeyRow[] {
+export function keyRows(figure: GroupedBarFigure, appearance: FigureAppearance): readonly KeyRow[] {
   if (appearance.legend === 'none' || figure.groups.length < 2) return [];
   const type: FigureType = { sizeInPixels: appearance.fontSize, weight: 'regular' };
   const heading = figure.groupsLabel === null ? [] : [{ label: figure.groupsLabel, look: null }];

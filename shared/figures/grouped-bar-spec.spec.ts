@@ -45,7 +45,7 @@ describe('groupedBarSpec', () => {
 
   it('draws every bar from zero, with its value, whisker and n', async () => {
     const { view } = await draw(ECZEMA, LIGHT);
-    const bars = itemsOf(view, 'rect').filter((item) => item.datum['value'] !== undefined);
+    const bars = itemsOf(view, 'rect').filter((item) => item.datum.value !== undefined);
     const plotHeight = view.height();
     expect(bars).toHaveLength(6);
     for (const bar of bars) expect(bar.y + bar.height).toBeCloseTo(plotHeight, 6);
@@ -57,26 +57,30 @@ describe('groupedBarSpec', () => {
 
   it('keeps whiskers asymmetric and unclipped', async () => {
     const { view } = await draw(ECZEMA, LIGHT);
-    const stems = itemsOf(view, 'rule').filter((item) => item.datum['upper'] !== undefined);
+    const stems = itemsOf(view, 'rule').filter((item) => item.datum.upper !== undefined);
     expect(stems).toHaveLength(12);
     const [first] = stems;
-    expect(first?.datum['lower']).toBeCloseTo(2.6, 10);
-    expect(first?.datum['upper']).toBeCloseTo(8.2, 10);
+    expect(first?.datum.lower).toBeCloseTo(2.6, 10);
+    expect(first?.datum.upper).toBeCloseTo(8.2, 10);
   });
 
   it('leaves the place of a missing bar empty and says so', async () => {
-    const figure = sampleFigure(['Letter', 'No letter'], ['All'], [
-      [{ events: 62, total: 120, lower: 0.43, upper: 0.6 }],
-      [{ events: 0, total: 0, lower: 0, upper: 0 }],
-    ]);
+    const figure = sampleFigure(
+      ['Letter', 'No letter'],
+      ['All'],
+      [
+        [{ events: 62, total: 120, lower: 0.43, upper: 0.6 }],
+        [{ events: 0, total: 0, lower: 0, upper: 0 }],
+      ],
+    );
     const { view } = await draw(figure, LIGHT);
-    const bars = itemsOf(view, 'rect').filter((item) => item.datum['value'] !== undefined);
+    const bars = itemsOf(view, 'rect').filter((item) => item.datum.value !== undefined);
     expect(bars).toHaveLength(1);
     expect(textsOf(view)).toContain('…');
   });
 
   it('takes hostile labels as words only', async () => {
-    const label = "'];datum.value=0;//<script>\\[a.b\"";
+    const label = '\'];datum.value=0;//<script>\\[a.b"';
     const figure: GroupedBarFigure = {
       ...ECZEMA,
       valueLabel: label,
@@ -109,10 +113,10 @@ describe('groupedBarSpec', () => {
     const row = [0, 1, 2, 3].map(() => ({ events: 40, total: 100, lower: 0.3, upper: 0.5 }));
     const four = sampleFigure(['Yes', 'No'], ['N', 'S', 'E', 'W'], [row, row]);
     const hatched = itemsOf((await draw(four, LIGHT)).view, 'rule');
-    expect(hatched.some((item) => item.datum['fromY'] !== undefined)).toBe(true);
+    expect(hatched.some((item) => item.datum.fromY !== undefined)).toBe(true);
     const three = { ...four, groups: four.groups.slice(0, 3), bars: [] };
     const plain = itemsOf((await draw(three, LIGHT)).view, 'rule');
-    expect(plain.some((item) => item.datum['fromY'] !== undefined)).toBe(false);
+    expect(plain.some((item) => item.datum.fromY !== undefined)).toBe(false);
   });
 
   it('moves n into the labels and drops values where bars are narrow', async () => {

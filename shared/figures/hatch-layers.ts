@@ -56,4 +56,3 @@ function boxesOf(look: GroupLook, parts: SpecParts): readonly BarBox[] {
       barBox({ ...bar, value: scaled(bar.value, figure) }, figure, frame.geometry, height),
     );
 }
-

@@ -60,7 +60,10 @@ function swatches({ colours }: SpecParts, entries: readonly PlacedEntry[]): Figu
   };
 }
 
-function swatchBox({ left }: KeyEntry, middle: number): {
+function swatchBox(
+  { left }: KeyEntry,
+  middle: number,
+): {
   readonly left: number;
   readonly right: number;
   readonly top: number;
