@@ -57,7 +57,8 @@ function authenticate(
 ): Promise<Outcome<User>> {
   return new Promise((resolve, reject) => {
     const decided: Authenticated = (problem, user, issue) => {
-      if (problem !== null && problem !== undefined) reject(problem instanceof Error ? problem : new Error('No answer.'));
+      if (problem !== null && problem !== undefined)
+        reject(problem instanceof Error ? problem : new Error('No answer.'));
       else if (user === false || user === undefined) {
         resolve({ ok: false, issue: issue ?? { code: 'signInFailed' } });
       } else resolve({ ok: true, value: user });

@@ -22,7 +22,12 @@ export const STUDY_ACTIONS = [
 /** One of the study actions. */
 export type StudyAction = (typeof STUDY_ACTIONS)[number];
 
-const WORDS: readonly StudyAction[] = ['readStudy', 'downloadDraft', 'editWordsBlocks', 'setFraming'];
+const WORDS: readonly StudyAction[] = [
+  'readStudy',
+  'downloadDraft',
+  'editWordsBlocks',
+  'setFraming',
+];
 const NUMBERS: readonly StudyAction[] = ['editData', 'editNumbersBlocks', 'seeRecords'];
 
 /** The one table of who may do what on a study. */

@@ -92,8 +92,18 @@ describe('accounts', () => {
     expect(await trail.head('site')).toMatchObject({
       personId: administrator.id,
       what: 'account.changed',
-      before: JSON.stringify({ person: person.id, name: 'One', administrator: false, disabled: false }),
-      after: JSON.stringify({ person: person.id, name: 'Two', administrator: false, disabled: false }),
+      before: JSON.stringify({
+        person: person.id,
+        name: 'One',
+        administrator: false,
+        disabled: false,
+      }),
+      after: JSON.stringify({
+        person: person.id,
+        name: 'Two',
+        administrator: false,
+        disabled: false,
+      }),
     });
     expect(await verifyTrail(application.dependencies, 'site')).toMatchObject({ whole: true });
   });

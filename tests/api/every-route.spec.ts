@@ -70,7 +70,9 @@ describe('who may call what', () => {
       expect(response.status).toBe(refusal);
       expect(response.type).toBe('application/problem+json');
     } else {
-      expect([401, 403]).not.toContain(response.status === 403 ? codeOf(response) : response.status);
+      expect([401, 403]).not.toContain(
+        response.status === 403 ? codeOf(response) : response.status,
+      );
       expect(response.status).toBeLessThan(500);
     }
   });

@@ -14,7 +14,10 @@ beforeAll(async () => {
   clientDirectory = await mkdtemp(join(tmpdir(), 'evenhand-client-'));
   await mkdir(join(clientDirectory, 'media'));
   await writeFile(join(clientDirectory, 'index.html'), PAGE);
-  await writeFile(join(clientDirectory, 'main-ABCDEFGH.js'), 'const words = "even hand ";\n'.repeat(200));
+  await writeFile(
+    join(clientDirectory, 'main-ABCDEFGH.js'),
+    'const words = "even hand ";\n'.repeat(200),
+  );
   await writeFile(join(clientDirectory, 'media', 'plex-Z9Y8X7W6.woff2'), 'font');
   await writeFile(join(clientDirectory, 'favicon.svg'), '<svg/>');
   application = await startTestApplication({ clientDirectory });

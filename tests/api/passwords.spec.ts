@@ -160,9 +160,7 @@ describe('POST /api/password-resets rejects', () => {
     const response = await browser.post('/api/password-resets', { email: 'nobody' });
     expect(response.body).toMatchObject({
       status: 422,
-      fields: [
-        { path: 'email', message: 'Give an e-mail address such as name@example.org.' },
-      ],
+      fields: [{ path: 'email', message: 'Give an e-mail address such as name@example.org.' }],
     });
   });
 });

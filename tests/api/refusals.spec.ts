@@ -35,7 +35,10 @@ describe('a refusal', () => {
   });
 
   it('of a method that a path does not have is the same as of no path', async () => {
-    const [method, path] = [await browser.put('/api/studies', {}), await browser.get('/api/nothing')];
+    const [method, path] = [
+      await browser.put('/api/studies', {}),
+      await browser.get('/api/nothing'),
+    ];
     expect(method.body).toEqual(path.body);
   });
 

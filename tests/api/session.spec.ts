@@ -217,7 +217,8 @@ describe('POST /api/session rejects', () => {
   it('credentials in the address', async () => {
     const person = await application.addPerson();
     const browser = await application.browser();
-    const address = `/api/session?email=${person.email}&password=${encodeURIComponent(TEST_PASSWORD)}`;
+    const query = new URLSearchParams({ email: person.email, password: TEST_PASSWORD });
+    const address = `/api/session?${query.toString()}`;
     expect((await browser.post(address, {})).status).toBe(422);
   });
 });

@@ -184,8 +184,9 @@ describe('members', () => {
     await newcomer.signIn(request.email, completion.newPassword);
     expect((await newcomer.get(at())).body).toMatchObject({ role: 'editor' });
     const mails = await application.dependencies.database.stores.mail.newest(10);
-    expect(mails.some(({ text }) => text.includes('Lena Lead added you to the study "Wet work"')))
-      .toBe(true);
+    expect(
+      mails.some(({ text }) => text.includes('Lena Lead added you to the study "Wet work"')),
+    ).toBe(true);
   });
 
   it('get another role, and leave', async () => {
@@ -224,8 +225,7 @@ describe('POST /api/studies rejects', () => {
         { path: 'title', message: 'Give the study a title.' },
         {
           path: 'design',
-          message:
-            'This must be one of: cohort, trial, caseControl, crossSectional, surveillance.',
+          message: 'This must be one of: cohort, trial, caseControl, crossSectional, surveillance.',
         },
         { path: 'peopleNoun', message: 'This is needed.' },
       ],
