@@ -5,9 +5,9 @@ import type { GroupCount } from '#shared/stats';
 import { fillWords } from '../phrasebook/fill-pattern';
 import type { Phrasebook } from '../phrasebook/phrasebook';
 import {
+  figureStrataWords,
   occurrenceWords,
   printContext,
-  strataWords,
   type PrintContext,
   type PrintedAnalysis,
 } from './print-context';
@@ -19,7 +19,7 @@ import {
 export function altTextOf(analysis: PrintedAnalysis, style: HouseStyle, book: Phrasebook): string {
   const context = printContext(analysis, style, book);
   const { frame, specification } = analysis.result;
-  const strata = strataWords(context);
+  const strata = figureStrataWords(context);
   const shared = {
     exposure: frame.exposure.sentenceLabel,
     strata: strata === null ? '' : fillWords(book, 'title.strata', { strata }),
@@ -38,7 +38,7 @@ interface Bar {
 
 function rangeWords(context: PrintContext): string {
   const { result, style, book, decimals } = context;
-  const layers = result.strata.length > 0 ? result.strata : [result.crude];
+  const layers = figureStrataWords(context) === null ? [result.crude] : result.strata;
   const shown = layers
     .flatMap((layer) => barsOf(context, layer))
     .flatMap((bar) => {

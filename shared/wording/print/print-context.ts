@@ -62,6 +62,14 @@ export function strataWords({ result }: Pick<PrintContext, 'result'>): string | 
   return columns ? columns.join(' and ') : (result.frame.strataLabel?.toLowerCase() ?? null);
 }
 
+/**
+ * The strata of a figure: as `strataWords`, but none in a case–control study, whose bars are shares
+ * of all cases and of all controls.
+ */
+export function figureStrataWords({ result }: Pick<PrintContext, 'result'>): string | null {
+  return result.frame.design === 'caseControl' ? null : strataWords({ result });
+}
+
 /** Words as the one part of a phrase. */
 export function textPart(text: string): PhrasePart {
   return { kind: 'text', text };

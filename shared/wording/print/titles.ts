@@ -4,6 +4,7 @@ import { fillPattern, startSentence, type SlotFilling } from '../phrasebook/fill
 import type { Phrasebook } from '../phrasebook/phrasebook';
 import type { Phrase } from '../phrase';
 import {
+  figureStrataWords,
   occurrenceWords,
   printAddress,
   printContext,
@@ -19,7 +20,7 @@ import {
  */
 export function tableTitle(analysis: PrintedAnalysis, style: HouseStyle, book: Phrasebook): Phrase {
   const context = printContext(analysis, style, book);
-  const fillings = { ...shared(context), size: sizePart(context) };
+  const fillings = { ...shared(context, strataWords(context)), size: sizePart(context) };
   const parts = isCaseControl(context)
     ? fillPattern(book, 'title.exposed', { ...fillings, outcome: outcomeNoun(context) })
     : fillPattern(book, 'title.table', { ...fillings, subject: occurrenceWords(context) });
@@ -34,7 +35,7 @@ export function figureTitle(
 ): Phrase {
   const context = printContext(analysis, style, book);
   const level = levelPercent(analysis.result.specification.level, style);
-  const fillings = { ...shared(context), level };
+  const fillings = { ...shared(context, figureStrataWords(context)), level };
   const parts = isCaseControl(context)
     ? fillPattern(book, 'title.exposedFigure', { ...fillings, outcome: outcomeNoun(context) })
     : fillPattern(book, 'title.figure', { ...fillings, subject: occurrenceWords(context) });
@@ -51,9 +52,8 @@ function outcomeNoun({ result }: PrintContext): string {
 
 type Shared = Record<'exposure' | 'strata' | 'population', SlotFilling>;
 
-function shared(context: PrintContext): Shared {
+function shared(context: PrintContext, strata: string | null): Shared {
   const { result, book } = context;
-  const strata = strataWords(context);
   const population = result.frame.population.trim().replace(/\.$/, '');
   return {
     exposure: result.frame.exposure.sentenceLabel,
