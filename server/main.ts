@@ -5,6 +5,9 @@ import { welcome } from './start-up/welcome';
 
 const PATIENCE_IN_MILLISECONDS = 10_000;
 
+// What the server writes holds people's data: for its own user only.
+process.umask(0o077);
+
 try {
   const config = readConfiguration(process.env);
   console.log(`Data: ${config.dataDirectory}`);
