@@ -47,8 +47,12 @@ function limitedWords(context: WordingContext, { value, limits }: NumberNeeded):
 
 function sideWords(context: WordingContext, { change, count }: NumberNeededSide): string {
   const { claim, style, book } = context;
+  const isTrial = claim.design === 'trial';
+  if (count === null) {
+    return fillWords(book, isTrial ? 'needed.treatNone' : 'needed.none', {});
+  }
   const filling = { count: countWords(count, context) };
-  if (claim.design !== 'trial') {
+  if (!isTrial) {
     return fillWords(book, `needed.${change}`, filling);
   }
   const benefit = (change === 'fewer') === (claim.outcome.desirability === 'harmful');

@@ -15,6 +15,8 @@ export const BALANCE_SLOTS = {
   'balance.pooledGap': ['size'],
   'needed.more': ['count'],
   'needed.fewer': ['count'],
+  'needed.none': [],
+  'needed.treatNone': [],
   'needed.limited': ['needed', 'limits'],
   'needed.throughInfinity': ['first', 'last'],
   'needed.benefit': ['count'],

@@ -30,6 +30,7 @@ export const SENTENCE_SLOTS = {
   'relative.percent': ['opening', 'outcome', 'change', 'detail', 'index', 'reference', 'more'],
   'relative.times': ['opening', 'outcome', 'change', 'detail', 'index', 'reference', 'more'],
   unclear: ['opening', 'outcome', 'index', 'reference', 'estimate', 'interval', 'limits', 'more'],
+  'unclear.noWidth': ['opening', 'outcome', 'index', 'reference', 'estimate', 'interval', 'more'],
   'relative.notEstimable': [
     'opening',
     'index',

@@ -32,7 +32,9 @@ export function cellNotes(
   const limit = formatCount(style.percent.countsOnlyBelow, style).text;
   return [
     ...(rounded ? [{ parts: fillPattern(book, 'note.rounding', {}) }] : []),
-    ...(small ? [{ parts: fillPattern(book, 'note.countsOnly', { limit, mark: countsOnlyMark(style) }) }] : []),
+    ...(small
+      ? [{ parts: fillPattern(book, 'note.countsOnly', { limit, mark: countsOnlyMark(style) }) }]
+      : []),
     ...missingCellNotes(context, contents, measures),
   ];
 }

@@ -1,4 +1,4 @@
-import { EFFECT_MEASURE_IDS, type EffectMeasureId } from '#shared/effects';
+import { EFFECT_MEASURES, EFFECT_MEASURE_IDS, type EffectMeasureId } from '#shared/effects';
 import { formatCount, levelPercent } from '#shared/format';
 import type { HouseStyle } from '#shared/house-style';
 import { TEST_METHODS } from '#shared/stats';
@@ -28,19 +28,21 @@ import {
 /**
  * What was done, one sentence each: the comparison, intervals, tests, pooling, homogeneity, trend,
  * missing records, rounding, and whether the analysis was planned. Written from the methods that
- * the result really used.
+ * the result really used, for the measures that are printed and that the design gives.
  */
 export function methodsNoteOf(
   analysis: PrintedAnalysis,
   style: HouseStyle,
   book: Phrasebook,
+  printed: readonly EffectMeasureId[] = EFFECT_MEASURE_IDS,
 ): readonly Phrase[] {
   const context = printContext(analysis, style, book);
+  const measures = printed.filter((id) => EFFECT_MEASURES[id].givenBy(context.result.frame.design));
   const sentences = [
     comparison(context),
-    intervals(context),
+    intervals(context, measures),
     ...tests(context),
-    ...pooling(context),
+    ...pooling(context, measures),
     ...trend(context),
     ...missing(context),
     givesRisks(context) ? fillPattern(book, 'methods.rounding', {}) : [],
@@ -53,10 +55,6 @@ type Parts = readonly PhrasePart[];
 
 function givesRisks({ result }: PrintContext): boolean {
   return result.frame.design !== 'caseControl';
-}
-
-function measuresOf(context: PrintContext): readonly EffectMeasureId[] {
-  return givesRisks(context) ? EFFECT_MEASURE_IDS : ['oddsRatio'];
 }
 
 function comparison(context: PrintContext): Parts {
@@ -72,17 +70,16 @@ function comparison(context: PrintContext): Parts {
     : fillPattern(book, 'methods.comparedOdds', { ...shared, outcome: outcome.noun });
 }
 
-function intervals(context: PrintContext): Parts {
+function intervals(context: PrintContext, measures: readonly EffectMeasureId[]): Parts {
   const { result, style, book } = context;
   const level = levelPercent(result.specification.level, style);
   const shares = fillWords(book, 'note.method', {
     measure: termsOf(context).noun,
     method: shareMethod(result),
   });
-  const measures = intervalMethodsWords(context, measuresOf(context));
-  const methods = givesRisks(context)
-    ? [shares, measures].join(fillWords(book, 'list.semicolon', {}))
-    : measures;
+  const effects = intervalMethodsWords(context, measures);
+  const said = [...(givesRisks(context) ? [shares] : []), ...(effects === '' ? [] : [effects])];
+  const methods = said.join(fillWords(book, 'list.semicolon', {}));
   return fillPattern(book, 'methods.intervals', { level, methods });
 }
 
@@ -97,12 +94,11 @@ function tests({ style, book }: PrintContext): readonly Parts[] {
       ];
 }
 
-function pooling(context: PrintContext): readonly Parts[] {
+function pooling(context: PrintContext, measures: readonly EffectMeasureId[]): readonly Parts[] {
   const { result, book } = context;
   if (result.pooled.length === 0) {
     return [];
   }
-  const measures = measuresOf(context);
   const independence = result.pooled
     .map((contrast) => contrast.conditionalIndependence)
     .find((outcome) => outcome.ok);

@@ -21,6 +21,8 @@ export interface RatioWords {
   readonly direction: Direction;
   /** Whether the interval holds 1. */
   readonly isUnclear: boolean;
+  /** Whether both limits are 1: everybody had the event, and the interval tells nothing. */
+  readonly hasNoWidth: boolean;
   /** "49% higher" or "4.5 times as high". */
   readonly change: readonly PhrasePart[];
   /** "risk ratio 1.49". */
@@ -51,6 +53,7 @@ export function ratioWords(
     form: formOf(printed),
     direction: directionOfRatio(printed),
     isUnclear: interval.lower <= 1 && interval.upper >= 1,
+    hasNoWidth: interval.lower === 1 && interval.upper === 1,
     change: changeWords(context, printed, { quantity: measure, facet: 'value' }),
     named: namedRatio(context, measure, text),
     value: {

@@ -66,6 +66,9 @@ function relativeSentence(
   difference: DifferenceWords | null,
 ): readonly PhrasePart[] {
   const more = joinParts([relativeMore(context, difference), unstratified(context)]);
+  if (ratio.hasNoWidth) {
+    return withoutWidth(context, ratio, more);
+  }
   if (ratio.isUnclear || ratio.form === 'named') {
     return unclearSentence(context, ratioEstimate(context, ratio), ratio.compatible, more);
   }
@@ -107,6 +110,19 @@ function unclearSentence(
     estimate,
     interval: intervalLabel(context.claim.level, context.style),
     limits,
+    more,
+  });
+}
+
+function withoutWidth(
+  context: WordingContext,
+  ratio: RatioWords,
+  more: readonly PhrasePart[],
+): readonly PhrasePart[] {
+  return fillPattern(context.book, 'unclear.noWidth', {
+    ...subjects(context),
+    estimate: ratioEstimate(context, ratio),
+    interval: intervalLabel(context.claim.level, context.style),
     more,
   });
 }
