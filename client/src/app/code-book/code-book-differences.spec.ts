@@ -36,7 +36,8 @@ it('describes both sides of a column that differs', () => {
       mine:
         'Dose (dose), ordered category; levels None, reference, Some (1, 2); ' +
         'missing blank: Not answered',
-      theirs: 'Dose (dose), ordered category; levels Some (1, 2), None; missing blank: Not answered',
+      theirs:
+        'Dose (dose), ordered category; levels Some (1, 2), None; missing blank: Not answered',
     },
   ]);
 });

@@ -1,4 +1,12 @@
-import { ChangeDetectionStrategy, Component, computed, effect, inject, input, untracked } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  effect,
+  inject,
+  input,
+  untracked,
+} from '@angular/core';
 import { RouterLink } from '@angular/router';
 import { CurrentStudy } from '../session/current-study';
 import { Bar, BarActions, BarBeside } from '../ui/bar/bar';
@@ -12,15 +20,7 @@ import { CodeBookStore } from './code-book-store';
 /** The code book of a data set. */
 @Component({
   selector: 'eh-code-book-page',
-  imports: [
-    Bar,
-    BarActions,
-    BarBeside,
-    CodeBookEditor,
-    MarginNote,
-    ProblemPanel,
-    RouterLink,
-  ],
+  imports: [Bar, BarActions, BarBeside, CodeBookEditor, MarginNote, ProblemPanel, RouterLink],
   providers: [CodeBookStore],
   templateUrl: './code-book-page.html',
   styleUrl: './code-book-page.scss',

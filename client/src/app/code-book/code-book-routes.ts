@@ -1,4 +1,5 @@
 import type { Routes } from '@angular/router';
+import { unsavedWorkGuard } from '../ui/unsaved-work-guard';
 import { CodeBookListPage } from './code-book-list-page';
 
 /** Pages of this feature. */
@@ -6,6 +7,7 @@ export const codeBookRoutes: Routes = [
   { path: '', component: CodeBookListPage },
   {
     path: ':dataSetId',
+    canDeactivate: [unsavedWorkGuard],
     loadComponent: async () => (await import('./code-book-page')).CodeBookPage,
   },
 ];

@@ -2,7 +2,7 @@ import { InjectionToken } from '@angular/core';
 import { parsePhrasebook, type Phrasebook } from '#shared/wording';
 import english from '../../../../templates/phrasebooks/en.json';
 
-/** The words that generated sentences and reasons are made of: the same file that the server reads. */
+/** The words of generated sentences and reasons, from the same file that the server reads. */
 export const PHRASEBOOK = new InjectionToken<Phrasebook>('PHRASEBOOK', {
   providedIn: 'root',
   factory: () => {

@@ -1,4 +1,12 @@
-import { computed, effect, inject, Injectable, linkedSignal, signal, untracked } from '@angular/core';
+import {
+  computed,
+  effect,
+  inject,
+  Injectable,
+  linkedSignal,
+  signal,
+  untracked,
+} from '@angular/core';
 import {
   type AnalysisIssue,
   type AnalysisResult,
@@ -8,14 +16,18 @@ import {
   type ResultScope,
   tallyRequestOf,
 } from '#shared/analysis';
-import type { AnalysisView, CodeBookView, DataSetView } from '#shared/api';
+import type { AnalysisView, CodeBookView, CutView, DataSetView } from '#shared/api';
 import type { Result } from '#shared/core';
 import type { HouseStyle } from '#shared/house-style';
 import type { ApiProblem } from '../../server-api/api-problem';
 import { CurrentStudy } from '../../session/current-study';
+import { PHRASEBOOK } from '../../ui/phrasebook';
 import { type AnalysisDraft, emptyDraft, specificationOf } from '../draft/analysis-draft';
+import { benchPrint } from '../print/bench-print';
+import { columnById } from '../draft/column-choices';
 import { CountsStore, wantedCounts, type WantedCounts } from './counts-store';
 import { type CutPlace, cutPlaceOf } from './cut-place';
+import { repeatedIdentifiers } from './repeated-identifiers';
 import { sameScope, scopesOf } from './result-scopes';
 
 /** Where the bench stands: nothing to compute yet, counting, computed, or why it cannot. */
@@ -31,6 +43,7 @@ export type BenchState =
 export class BenchStore {
   private readonly counts = inject(CountsStore);
   private readonly current = inject(CurrentStudy);
+  private readonly book = inject(PHRASEBOOK);
 
   readonly study = this.current.study;
   readonly mayEdit = computed(() => this.current.may('editData'));
@@ -38,6 +51,8 @@ export class BenchStore {
   readonly houseStyle = signal<HouseStyle | null>(null);
   readonly codeBookView = signal<CodeBookView | null>(null);
   readonly cutId = signal<string | null>(null);
+  /** The cut's profile, from which repeated identifiers are seen. */
+  readonly cutView = signal<CutView | null>(null);
   readonly name = signal('');
   readonly draft = signal<AnalysisDraft>(emptyDraft());
   readonly saved = signal<AnalysisView | null>(null);
@@ -73,6 +88,23 @@ export class BenchStore {
       if (state.kind === 'computed') return state.result;
       return state.kind === 'counting' ? (before?.value ?? null) : null;
     },
+  });
+
+  readonly repeatedIdentifiers = computed(() =>
+    repeatedIdentifiers(this.codeBook(), this.cutView()),
+  );
+  /** A name for who gives none: the outcome by the exposure. */
+  readonly suggestedName = computed(() => {
+    const exposure = columnById(this.codeBook(), this.draft().exposure.columnId);
+    const outcome = this.outcome();
+    if (outcome === null || exposure === null) return '';
+    return `${outcome.noun} by ${exposure.sentenceLabel}`;
+  });
+
+  /** The result with what it is printed with. */
+  readonly print = computed(() => {
+    const [result, style] = [this.result(), this.houseStyle()];
+    return result === null || style === null ? null : benchPrint(result, style, this.book);
   });
 
   readonly scopes = computed(() => {

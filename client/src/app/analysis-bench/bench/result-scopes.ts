@@ -31,6 +31,11 @@ export function scopeLabel(result: AnalysisResult, scope: ResultScope): string {
   }
 }
 
+/** The name of a layer: its stratum's label, or all records. */
+export function layerName(result: AnalysisResult, stratumId: string | null): string {
+  return stratumId === null ? 'All records' : stratumLabel(result, stratumId);
+}
+
 /** A stratum's label. */
 export function stratumLabel(result: AnalysisResult, stratumId: string): string {
   return result.frame.strata.find(({ id }) => id === stratumId)?.label ?? stratumId;

@@ -141,11 +141,7 @@ function adjustmentFor(draft: AnalysisDraft): AnalysisDraft['adjustment'] {
   return draft.stratumColumnIds.length === 0 ? 'mantelHaenszel' : draft.adjustment;
 }
 
-function toggled(
-  ids: readonly string[],
-  id: string,
-  order: readonly string[],
-): readonly string[] {
+function toggled(ids: readonly string[], id: string, order: readonly string[]): readonly string[] {
   const next = ids.includes(id) ? ids.filter((each) => each !== id) : [...ids, id];
   return next.toSorted((one, other) => order.indexOf(one) - order.indexOf(other));
 }

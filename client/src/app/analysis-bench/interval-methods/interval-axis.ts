@@ -51,13 +51,14 @@ function roundStep(least: number): number {
 function ladderFor(span: number): readonly number[] {
   const factors = span <= 4 ? [1, 1.5, 2, 3, 5, 7] : span <= 60 ? [1, 2, 5] : [1];
   const powers = Array.from({ length: 25 }, (_, index) => index - 12);
-  return powers.flatMap((power) =>
-    factors.map((factor) => Number(`${factor}e${power}`)),
-  );
+  return powers.flatMap((power) => factors.map((factor) => Number(`${factor}e${power}`)));
 }
 
 function lastIndexAtMost(ladder: readonly number[], value: number): number {
-  return Math.max(0, ladder.findLastIndex((each) => each <= value * (1 + 1e-9)));
+  return Math.max(
+    0,
+    ladder.findLastIndex((each) => each <= value * (1 + 1e-9)),
+  );
 }
 
 function axisOf(ticks: readonly number[], scale: (value: number) => number): IntervalAxis {

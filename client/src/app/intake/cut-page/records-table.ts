@@ -1,4 +1,13 @@
-import { ChangeDetectionStrategy, Component, computed, effect, inject, input, linkedSignal, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  effect,
+  inject,
+  input,
+  linkedSignal,
+  signal,
+} from '@angular/core';
 import type { CutView, RecordsPage } from '#shared/api';
 import { ApiProblem } from '../../server-api/api-problem';
 import { DataApi } from '../../server-api/data-api';

@@ -1,9 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { FACTOR_SOURCE } from '#shared/code-book';
-import {
-  COLUMN_KIND_WORDS,
-  COUNT_LAYOUT_WORDS,
-} from '../../ui/code-book-editor/column-words';
+import { COLUMN_KIND_WORDS, COUNT_LAYOUT_WORDS } from '../../ui/code-book-editor/column-words';
 import { Field } from '../../ui/field/field';
 import { FieldControl } from '../../ui/field/field-control';
 import { ProblemPanel } from '../../ui/status/problem-panel';

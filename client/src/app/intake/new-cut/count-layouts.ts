@@ -50,7 +50,11 @@ export function layoutSlots(layout: CountLayout): readonly LayoutSlot[] {
       return [];
     case 'count':
       return [
-        { name: 'Counts', columnId: layout.columnId, with: (columnId) => ({ ...layout, columnId }) },
+        {
+          name: 'Counts',
+          columnId: layout.columnId,
+          with: (columnId) => ({ ...layout, columnId }),
+        },
       ];
     case 'eventsAndTotal':
       return [

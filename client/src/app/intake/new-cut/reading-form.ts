@@ -1,4 +1,11 @@
-import { ChangeDetectionStrategy, Component, computed, input, linkedSignal, output } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  input,
+  linkedSignal,
+  output,
+} from '@angular/core';
 import type { CutProfile, ReadingOptions } from '#shared/api';
 import { Field } from '../../ui/field/field';
 import { FieldControl } from '../../ui/field/field-control';

@@ -70,9 +70,7 @@ export class CountsGridEditor {
   }
 
   protected problemAt(row: number, column: number): string | null {
-    const found = this.problems().find(
-      ({ place }) => place.row === row && place.column === column,
-    );
+    const found = this.problems().find(({ place }) => place.row === row && place.column === column);
     return found?.message ?? null;
   }
 

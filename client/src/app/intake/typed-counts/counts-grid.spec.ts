@@ -42,7 +42,11 @@ it('takes a single word as text of one cell', () => {
 });
 
 it('gives one row for each level and stratum', () => {
-  const grid = withStratumName(withStratumName(withStratum(pasted('A\t1\t2\nB\t3\t4')), 0, 'East'), 1, 'West');
+  const grid = withStratumName(
+    withStratumName(withStratum(pasted('A\t1\t2\nB\t3\t4')), 0, 'East'),
+    1,
+    'West',
+  );
   const full = pastedInto(grid, { row: 0, column: 3 }, '5\t6\n7\t8').grid;
   expect(checkedRows(full, 'eventsAndTotal')).toEqual({
     ok: true,

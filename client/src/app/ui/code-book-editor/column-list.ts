@@ -1,6 +1,12 @@
 import { DecimalPipe } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, input, model } from '@angular/core';
-import type { CodeBook, CodeBookColumn, CodeBookFinding, DecimalMark, ProfiledColumn } from '#shared/code-book';
+import type {
+  CodeBook,
+  CodeBookColumn,
+  CodeBookFinding,
+  DecimalMark,
+  ProfiledColumn,
+} from '#shared/code-book';
 import { levelCounts, missingRows } from './column-contents';
 import { COLUMN_KIND_WORDS } from './column-words';
 

@@ -75,7 +75,7 @@ export class LevelList {
     const step = event.key === 'ArrowUp' ? -1 : event.key === 'ArrowDown' ? 1 : 0;
     if (!event.altKey || step === 0 || !this.movable()) return;
     const within = (event.target as HTMLElement).closest<HTMLElement>('[data-level]');
-    const at = this.rows().findIndex(({ id }) => id === within?.dataset['level']);
+    const at = this.rows().findIndex(({ id }) => id === within?.dataset.level);
     const row = this.rows()[at];
     if (row === undefined) return;
     event.preventDefault();

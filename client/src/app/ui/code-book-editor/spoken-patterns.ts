@@ -10,7 +10,12 @@ export const GROUP_PATTERNS = [
 ] as const;
 
 /** Ways to name a stratum, to pick from. */
-export const WITHIN_PATTERNS = ['in {level}', 'among {level}', 'at {level}', 'aged {level}'] as const;
+export const WITHIN_PATTERNS = [
+  'in {level}',
+  'among {level}',
+  'at {level}',
+  'aged {level}',
+] as const;
 
 /** What is wrong with a pattern; null when it can be used or is left out. */
 export function patternProblem(pattern: string | null | undefined): string | null {

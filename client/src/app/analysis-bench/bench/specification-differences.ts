@@ -1,0 +1,56 @@
+import type { CodeBook } from '#shared/code-book';
+import type { AnalysisDraft } from '../draft/analysis-draft';
+import { columnById, levelLabels } from '../draft/column-choices';
+
+/** An analysis as two people have it. */
+export interface NamedDraft {
+  readonly name: string;
+  readonly specification: AnalysisDraft;
+}
+
+/** One part in which two versions of an analysis differ, each in words. */
+export interface SpecificationDifference {
+  readonly what: string;
+  readonly mine: string;
+  readonly theirs: string;
+}
+
+/** The parts in which two versions of an analysis differ. */
+export function specificationDifferences(
+  mine: NamedDraft,
+  theirs: NamedDraft,
+  codeBook: CodeBook | null,
+): readonly SpecificationDifference[] {
+  const [own, other] = [describedParts(mine, codeBook), describedParts(theirs, codeBook)];
+  return Object.keys(own).flatMap((what) => {
+    const [one, two] = [own[what] ?? '', other[what] ?? ''];
+    return one === two ? [] : [{ what, mine: one, theirs: two }];
+  });
+}
+
+function describedParts(
+  { name, specification }: NamedDraft,
+  codeBook: CodeBook | null,
+): Readonly<Record<string, string>> {
+  const { outcome, exposure, stratumColumnIds, restrictions, level } = specification;
+  const { methods, adjustment, trendScores, standing } = specification;
+  const labelOf = (id: string | null): string => columnById(codeBook, id)?.label ?? id ?? 'none';
+  const levelsOf = (columnId: string | null, ids: readonly string[]): string =>
+    levelLabels(columnById(codeBook, columnId), ids).join(' or ');
+  return {
+    Name: name,
+    Outcome: `${labelOf(outcome.columnId)}: ${levelsOf(outcome.columnId, outcome.eventLevelIds)}`,
+    Exposure: labelOf(exposure.columnId),
+    Reference: levelsOf(exposure.columnId, [exposure.referenceLevelId ?? '']),
+    Strata: stratumColumnIds.map(labelOf).join(', ') || 'none',
+    Records:
+      restrictions
+        .map(({ columnId, levelIds }) => `${labelOf(columnId)}: ${levelsOf(columnId, levelIds)}`)
+        .join('; ') || 'all',
+    'Confidence level': `${Number((level * 100).toPrecision(12))}%`,
+    'Interval methods': Object.values(methods).join(', '),
+    Adjustment: adjustment === 'crude' ? 'none' : 'Mantel–Haenszel',
+    'Trend scores': trendScores === null ? '1, 2, 3 …' : Object.values(trendScores).join(', '),
+    Standing: `${standing.planned}, ${standing.importance}, ${standing.analysisSet}`,
+  };
+}

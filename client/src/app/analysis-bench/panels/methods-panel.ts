@@ -1,0 +1,71 @@
+import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import type { ResultScope } from '#shared/analysis';
+import type { EffectMeasureId } from '#shared/effects';
+import { intervalLabel } from '#shared/format';
+import { columnHeads } from '#shared/wording';
+import { FramingGlyph } from '../../ui/framing/framing-glyph';
+import { BenchStore } from '../bench/bench-store';
+import { levelLabel, scopeLabel } from '../bench/result-scopes';
+import { withMethod } from '../draft/analysis-draft';
+import { shownMeasures } from '../print/bench-print';
+import { measureGroups, type MethodGroup, riskGroup } from '../print/method-rows';
+
+/** The interval methods side by side, drawn on one axis; the chosen one holds for all strata. */
+@Component({
+  selector: 'eh-methods-panel',
+  imports: [FramingGlyph],
+  templateUrl: './methods-panel.html',
+  styleUrl: './methods-panel.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class MethodsPanel {
+  protected readonly store = inject(BenchStore);
+
+  /** A pooled estimate has an interval of its own; the methods are for one table of counts. */
+  protected readonly scope = computed<ResultScope>(() =>
+    this.store.scope().kind === 'pooled' ? { kind: 'crude' } : this.store.scope(),
+  );
+  protected readonly groups = computed<readonly MethodGroup[]>(() => {
+    const print = this.store.print();
+    if (print === null) return [];
+    const [scope, levelId] = [this.scope(), this.store.levelId()];
+    const measures = shownMeasures(print.result);
+    const risk =
+      print.result.frame.design === 'caseControl' ? null : riskGroup(print, scope, levelId);
+    return [...measureGroups(print, measures, scope, levelId), ...(risk === null ? [] : [risk])];
+  });
+  protected readonly about = computed(() => {
+    const print = this.store.print();
+    if (print === null) return '';
+    const { result, style } = print;
+    const [index, reference] = [this.store.levelId(), result.frame.exposure.referenceLevelId];
+    const layer = scopeLabel(result, this.scope());
+    const interval = intervalLabel(result.specification.level, style);
+    return `${layer}, ${levelLabel(result, index)} against ${levelLabel(result, reference)}, ${interval}`;
+  });
+  private readonly heads = computed(() => {
+    const print = this.store.print();
+    if (print === null) return null;
+    return columnHeads({ analysisId: '', result: print.result }, print.style, print.book);
+  });
+
+  protected headOf(group: MethodGroup): string {
+    const heads = this.heads();
+    if (heads === null) return '';
+    if (group.estimand === 'risk') {
+      const result = this.store.result();
+      return `${heads.share}, ${result === null ? '' : levelLabel(result, this.store.levelId())}`;
+    }
+    const head = heads[group.estimand satisfies EffectMeasureId];
+    return group.scale === 'ratio' ? `${head}, log scale` : head;
+  }
+
+  protected tickWords(group: MethodGroup, value: number): string {
+    const number = String(Number(value.toPrecision(4))).replace('-', '\u2212');
+    return group.scale === 'ratio' ? `${number}×` : number;
+  }
+
+  protected choose(group: MethodGroup, methodId: string): void {
+    this.store.change((draft) => withMethod(draft, group.estimand, methodId));
+  }
+}
