@@ -1,15 +1,15 @@
-import { computed, inject, Injectable } from '@angular/core';
+import { computed, inject, Injectable, Injector } from '@angular/core';
 import { Router } from '@angular/router';
 import type { ReportView, StudyView } from '#shared/api';
 import { mayDo } from '#shared/permissions';
-import { Dialogs } from '../ui/dialog/dialogs';
+import type { Dialogs } from '../ui/dialog/dialogs';
 import { DeskStore } from './desk-store';
 
 /** Begins studies and reports; the code of the dialogs is loaded when it is wanted. */
 @Injectable()
 export class DeskDialogs {
   private readonly router = inject(Router);
-  private readonly dialogs = inject(Dialogs);
+  private readonly injector = inject(Injector);
   private readonly desk = inject(DeskStore);
 
   /** The studies on which this person may begin a report. */
@@ -30,15 +30,22 @@ export class DeskDialogs {
 
   private async askForStudy(): Promise<void> {
     const { StudyDetailsDialog } = await import('../ui/study-details/study-details-dialog');
-    this.dialogs.open<StudyView>(StudyDetailsDialog).subscribe((study) => {
+    const dialogs = await this.dialogs();
+    dialogs.open<StudyView>(StudyDetailsDialog).subscribe((study) => {
       void this.router.navigate(['/studies', study.id]);
     });
   }
 
   private async askForReport(): Promise<void> {
     const { NewReportDialog } = await import('./new-report-dialog');
-    this.dialogs.open<ReportView>(NewReportDialog, this.reportPlaces()).subscribe(({ report }) => {
+    const dialogs = await this.dialogs();
+    dialogs.open<ReportView>(NewReportDialog, this.reportPlaces()).subscribe(({ report }) => {
       void this.router.navigate(['/studies', report.studyId, 'reports', report.id]);
     });
+  }
+
+  private async dialogs(): Promise<Dialogs> {
+    const { Dialogs } = await import('../ui/dialog/dialogs');
+    return this.injector.get(Dialogs);
   }
 }
