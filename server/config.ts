@@ -40,7 +40,7 @@ export interface Configuration {
 /** Values that installations rarely change. */
 export const DEFAULT_LIMITS = {
   passwordCost: { memoryInKibibytes: 19_456, passes: 2 },
-  sizeLimits: { jsonBodyInBytes: 4 * 1024 * 1024, uploadInBytes: 512 * 1024 * 1024 },
+  sizeLimits: { jsonBodyInBytes: 8 * 1024 * 1024, uploadInBytes: 512 * 1024 * 1024 },
   failedSignInsPerAddress: 50,
 } as const;
 

@@ -4,6 +4,7 @@ import { assertNever } from '#shared/core';
 import type { Dependencies } from '../dependencies';
 import { refuse, type Outcome } from '../errors/server-issue';
 import type { User } from '../models/user/user-store';
+import { findMembership } from '../services/studies/find-membership';
 import { personOf } from '../session/person-of';
 import type { Access, OnStudy } from './route';
 
@@ -48,12 +49,10 @@ async function admitMember(
   person: User,
   studyId: string,
   anyOf: readonly StudyAction[],
-  { database }: Dependencies,
+  dependencies: Dependencies,
 ): Promise<Outcome<Caller>> {
-  const membership = await database.stores.memberships.find(studyId, person.id);
+  const membership = await findMembership(dependencies, person.id, studyId);
   if (membership === null) return refuse('notFound');
-  const { role } = membership;
-  if (!anyOf.some((action) => mayDo(role, action))) return refuse('notAllowed');
-  const study = await database.stores.studies.findById(studyId);
-  return study === null ? refuse('notFound') : { ok: true, value: { person, study, role } };
+  if (!anyOf.some((action) => mayDo(membership.role, action))) return refuse('notAllowed');
+  return { ok: true, value: { person, ...membership } };
 }

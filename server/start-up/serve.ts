@@ -4,6 +4,9 @@ import { createApp } from '../app';
 import type { Dependencies } from '../dependencies';
 import { runStartUpTasks } from './start-up-tasks';
 
+/** A large file over a slow line takes its time; headers still have to come within a minute. */
+const LONGEST_REQUEST_IN_MILLISECONDS = 3_600_000;
+
 /** A server that listens. */
 export interface RunningServer {
   readonly port: number;
@@ -15,7 +18,7 @@ export interface RunningServer {
 export async function serve(dependencies: Dependencies): Promise<RunningServer> {
   await runStartUpTasks(dependencies);
   const application = createApp(dependencies);
-  const server = createServer(application.app);
+  const server = createServer({ requestTimeout: LONGEST_REQUEST_IN_MILLISECONDS }, application.app);
   await listen(server, dependencies.config.port);
   return {
     port: (server.address() as AddressInfo).port,

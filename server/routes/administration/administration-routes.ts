@@ -9,11 +9,11 @@ import type { Account, AccountChangeRequest, NewAccountRequest, OutboxMail } fro
 import type { Outcome } from '../../errors/server-issue';
 import { changeAccount } from '../../services/administration/change-account';
 import { createAccount } from '../../services/administration/create-account';
+import { listAccounts } from '../../services/administration/list-accounts';
+import { listMail } from '../../services/mail/list-mail';
 import { administratorRoute, json } from '../define-route';
 import type { ByPerson, Call, Route } from '../route';
 import { presentAccount, presentMail } from './administration-presenter';
-
-const MOST_MAILS = 200;
 
 /** Accounts and the outbox. An administrator sees accounts, not the data of studies. */
 export const administrationRoutes: readonly Route[] = [
@@ -22,7 +22,7 @@ export const administrationRoutes: readonly Route[] = [
     path: '/api/administration/accounts',
     summary: 'Lists all accounts.',
     reply: json(z.array(accountSchema)),
-    handle: listAccounts,
+    handle: showAccounts,
   }),
   administratorRoute({
     method: 'post',
@@ -45,12 +45,12 @@ export const administrationRoutes: readonly Route[] = [
     path: '/api/administration/mail',
     summary: 'Lists the newest mails, with live links hidden.',
     reply: json(z.array(outboxMailSchema)),
-    handle: listMail,
+    handle: showMail,
   }),
 ];
 
-async function listAccounts({ dependencies }: Call): Promise<Outcome<Account[]>> {
-  const users = await dependencies.database.stores.users.list();
+async function showAccounts({ dependencies }: Call): Promise<Outcome<Account[]>> {
+  const users = await listAccounts(dependencies);
   return { ok: true, value: users.map(presentAccount) };
 }
 
@@ -73,7 +73,7 @@ async function editAccount({
   return changed.ok ? { ok: true, value: presentAccount(changed.value) } : changed;
 }
 
-async function listMail({ dependencies }: Call): Promise<Outcome<OutboxMail[]>> {
-  const mails = await dependencies.database.stores.mail.newest(MOST_MAILS);
+async function showMail({ dependencies }: Call): Promise<Outcome<OutboxMail[]>> {
+  const mails = await listMail(dependencies);
   return { ok: true, value: mails.map(presentMail) };
 }

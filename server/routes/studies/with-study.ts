@@ -1,5 +1,6 @@
 import type { StudyView } from '#shared/api';
 import type { Outcome } from '../../errors/server-issue';
+import { findMembership } from '../../services/studies/find-membership';
 import { viewStudy } from '../../services/studies/view-study';
 import type { Call, OnStudy } from '../route';
 
@@ -12,7 +13,6 @@ export async function withStudy(
   changed: Outcome<undefined>,
 ): Promise<Outcome<StudyView>> {
   if (!changed.ok) return changed;
-  const { memberships } = dependencies.database.stores;
-  const now = await memberships.find(study.id, person.id);
+  const now = await findMembership(dependencies, person.id, study.id);
   return { ok: true, value: await viewStudy(dependencies, study.id, now?.role ?? role) };
 }
