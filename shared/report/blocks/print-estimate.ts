@@ -97,8 +97,10 @@ function shareLimits(value: ReadValue): Pick<EstimateText, 'lower' | 'upper'> | 
   const upper = facet(value, 'upper');
   if (lower === null || upper === null) return null;
   const decimals = printedDecimals(result, houseStyle).percent;
-  const print = (limit: Quantity): NumberText =>
-    formatShareLimit(numberOf(limit), decimals, houseStyle);
+  const print = (limit: Quantity): NumberText => {
+    const printed = formatShareLimit(numberOf(limit), decimals, houseStyle);
+    return { ...printed, text: withPercentSign(printed.text, houseStyle) };
+  };
   return { lower: print(lower), upper: print(upper) };
 }
 
