@@ -45,8 +45,8 @@ describe.each(BLOCK_KIND_LIST.map((kind) => [kind.id, kind] as const))('kind %s'
 
   it('says that an analysis is missing rather than showing numbers', () => {
     const analysis = pinned(RESULTS.wetWork);
-    const report = reportOf([blockOf('b1', kindId, analysis)], []);
-    const printed = composed(report, [analysis]);
+    const report = reportOf([blockOf('b1', kindId, analysis)], [analysis]);
+    const printed = composed(report, []);
     const drawn = printed.elements.map((element) => element.kind);
     expect(drawn.includes('problem')).toBe(kind.needsAnalysis);
     expect(valueLedger(printed)).toEqual([]);

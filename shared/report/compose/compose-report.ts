@@ -55,8 +55,14 @@ function composeWith(
   return finish(request.report.title, drafted, request.phrasebook);
 }
 
-/** A pinned analysis that carries another result than the report names would show stale numbers. */
+/**
+ * A pinned analysis that carries another result than the report names would show stale numbers. One
+ * that the report doesn't name yet is about to be pinned with the block that shows it.
+ */
 function pinsInForce({ report, pins }: ComposeRequest): PinnedAnalyses {
-  const inForce = [...pins].filter((pin) => report.pins[pin.analysisId] === pin.resultId);
+  const inForce = [...pins].filter(({ analysisId, resultId }) => {
+    const named = report.pins[analysisId];
+    return named === undefined || named === resultId;
+  });
   return new Map(inForce.map((pin) => [pin.analysisId, pin]));
 }
