@@ -1,4 +1,4 @@
-import type { Response } from 'supertest';
+import supertest, { type Response } from 'supertest';
 import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 import {
   startTestApplication,
@@ -244,21 +244,22 @@ describe('the limit by network address', () => {
 
 describe('the token against forged requests', () => {
   it('of another session or of none does not count', async () => {
-    const signedOut = await application.browser();
     const person = await application.addPerson();
-    const [browser, other] = [
-      await application.signedIn(person),
-      await application.signedIn(person),
-    ];
-    for (const token of [signedOut.token(), other.token(), 'made-up.token', '', 'ü.ü']) {
-      const response = await browser.agent
+    const signedOut = await application.browser();
+    const other = await application.signedIn(person);
+    const browser = await application.browser();
+    const cookie = sessionCookie(await browser.signIn(person.email, TEST_PASSWORD))!.split(';')[0]!;
+    const signOut = (token: string) =>
+      supertest(application.app)
         .delete('/api/session')
-        .set('X-XSRF-TOKEN', Buffer.from(token).toString('latin1'))
-        .set('Cookie', `XSRF-TOKEN=${encodeURIComponent(token)}`);
+        .set('X-XSRF-TOKEN', token)
+        .set('Cookie', `${cookie}; XSRF-TOKEN=${token}`);
+    for (const token of [signedOut.token(), other.token(), 'made-up.token', '', '.', 'no-dot']) {
+      const response = await signOut(token);
       expect(response.status).toBe(403);
       expect(response.body).toMatchObject({ code: 'forgedRequest' });
     }
-    expect((await browser.delete('/api/session')).status).toBe(204);
+    expect((await signOut(browser.token())).status).toBe(204);
   });
 
   it('is not enough when the browser says that another site sent the request', async () => {
