@@ -18,7 +18,8 @@ export interface PrintedDecimals extends Readonly<Record<EffectMeasureId, number
 }
 
 /**
- * The decimals under which all numbers of one analysis are printed.
+ * The decimals under which all numbers of one analysis are printed. Results and styles do not
+ * change, so that each pair is worked out once.
  *
  * Shares follow the denominators of the style; differences follow the shares; ratios follow the
  * style. A column gets one more decimal where a limit would round onto the null value.
@@ -29,6 +30,24 @@ export function decimalsOf(result: AnalysisResult, style: HouseStyle): PrintedDe
 
 /** As `decimalsOf`, from the basis that a claim carries. */
 export function decimalsUnder(basis: PrecisionBasis, style: HouseStyle): PrintedDecimals {
+  const byStyle = KNOWN_DECIMALS.get(basis) ?? new WeakMap<HouseStyle, PrintedDecimals>();
+  KNOWN_DECIMALS.set(basis, byStyle);
+  const known = byStyle.get(style) ?? workOutDecimals(basis, style);
+  byStyle.set(style, known);
+  return known;
+}
+
+/** The groups and estimates of a result: over all records, within strata and pooled. */
+export function precisionBasisOf(result: AnalysisResult): PrecisionBasis {
+  const known = KNOWN_BASES.get(result) ?? collectBasis(result);
+  KNOWN_BASES.set(result, known);
+  return known;
+}
+
+const KNOWN_BASES = new WeakMap<AnalysisResult, PrecisionBasis>();
+const KNOWN_DECIMALS = new WeakMap<PrecisionBasis, WeakMap<HouseStyle, PrintedDecimals>>();
+
+function workOutDecimals(basis: PrecisionBasis, style: HouseStyle): PrintedDecimals {
   const percent = percentDecimals(basis.groups, style.percent);
   const { riskDifference, riskRatio, oddsRatio } = basis.estimates;
   return {
@@ -39,8 +58,7 @@ export function decimalsUnder(basis: PrecisionBasis, style: HouseStyle): Printed
   };
 }
 
-/** The groups and estimates of a result: over all records, within strata and pooled. */
-export function precisionBasisOf(result: AnalysisResult): PrecisionBasis {
+function collectBasis(result: AnalysisResult): PrecisionBasis {
   const layers = [result.crude, ...result.strata];
   const caseControl = result.frame.design === 'caseControl';
   return {

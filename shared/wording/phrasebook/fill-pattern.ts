@@ -15,9 +15,7 @@ export function fillPattern<Key extends PatternKey>(
 ): readonly PhrasePart[] {
   const named: Readonly<Record<string, SlotFilling>> = fillings;
   return joinParts(
-    book.patterns[key]
-      .split(/(\{\w+\})/)
-      .map((piece) => (SLOT.test(piece) ? (named[piece.slice(1, -1)] ?? '') : piece)),
+    piecesOf(book, key).map(({ slot, words }) => (slot === null ? words : (named[slot] ?? ''))),
   );
 }
 
@@ -34,16 +32,16 @@ export function fillWords<Key extends PatternKey>(
 
 /** One run of parts out of several fillings; neighbouring words become one part. */
 export function joinParts(fillings: readonly SlotFilling[]): readonly PhrasePart[] {
-  return fillings.flatMap(partsOf).reduce<PhrasePart[]>((joined, part) => {
+  const joined: PhrasePart[] = [];
+  for (const part of fillings.flatMap(partsOf)) {
     const last = joined.at(-1);
-    const merges = last?.kind === 'text' && part.kind === 'text' && last.italic === part.italic;
-    if (part.text === '') {
-      return joined;
+    if (last?.kind === 'text' && part.kind === 'text' && last.italic === part.italic) {
+      joined[joined.length - 1] = { ...last, text: last.text + part.text };
+    } else if (part.text !== '') {
+      joined.push(part);
     }
-    return merges
-      ? [...joined.slice(0, -1), { ...last, text: last.text + part.text }]
-      : [...joined, part];
-  }, []);
+  }
+  return joined;
 }
 
 /** A sentence begins with a capital letter, whatever word came first. */
@@ -57,7 +55,25 @@ export function capitalised(words: string): string {
   return words.charAt(0).toUpperCase() + words.slice(1);
 }
 
-const SLOT = /^\{\w+\}$/;
+/** A pattern cut at its slots: words, or the name of the slot that stands there. */
+interface Piece {
+  readonly slot: string | null;
+  readonly words: string;
+}
+
+const KNOWN_PIECES = new WeakMap<Phrasebook, Map<PatternKey, readonly Piece[]>>();
+
+function piecesOf(book: Phrasebook, key: PatternKey): readonly Piece[] {
+  const known = KNOWN_PIECES.get(book) ?? new Map<PatternKey, readonly Piece[]>();
+  KNOWN_PIECES.set(book, known);
+  const pieces = known.get(key) ?? book.patterns[key].split(/(\{\w+\})/).map(pieceOf);
+  known.set(key, pieces);
+  return pieces;
+}
+
+function pieceOf(words: string): Piece {
+  return { slot: /^\{\w+\}$/.test(words) ? words.slice(1, -1) : null, words };
+}
 
 function partsOf(filling: SlotFilling): readonly PhrasePart[] {
   if (typeof filling === 'string') {
