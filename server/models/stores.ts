@@ -1,9 +1,17 @@
 import type { Sequelize } from 'sequelize';
+import { AnalysisStore } from './analysis/analysis-store';
+import { BlockStore } from './block/block-store';
 import { CodeBookStore } from './code-book/code-book-store';
+import { CutFactsStore } from './cut/cut-facts-store';
 import { DataSetStore } from './data-set/data-set-store';
+import { DraftStore } from './draft/draft-store';
 import { MailStore } from './mail/mail-store';
+import { ReportPinStore } from './report/report-pin-store';
+import { ReportStore } from './report/report-store';
+import { ResultStore } from './result/result-store';
 import { SessionStore } from './session/session-store';
 import { SiteSettingStore } from './site-setting/site-setting-store';
+import { StepStore } from './step/step-store';
 import { MembershipStore } from './study/membership-store';
 import { MilestoneStore } from './study/milestone-store';
 import { OutcomeStore } from './study/outcome-store';
@@ -27,6 +35,14 @@ const STORES = {
   trail: TrailStore,
   dataSets: DataSetStore,
   codeBooks: CodeBookStore,
+  cutFacts: CutFactsStore,
+  analyses: AnalysisStore,
+  results: ResultStore,
+  reports: ReportStore,
+  reportPins: ReportPinStore,
+  blocks: BlockStore,
+  steps: StepStore,
+  drafts: DraftStore,
 } as const;
 
 /** Every store by name. A new one is a line in the table above. */
