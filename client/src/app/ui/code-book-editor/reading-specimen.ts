@@ -53,7 +53,7 @@ export class ReadingSpecimen {
   private withinWords(level: string): string {
     const { withinPattern, sentenceLabel } = this.column();
     const own = withinPattern?.includes('{level}') === true ? withinPattern : null;
-    return filledPattern(own ?? `with ${sentenceLabel} {level}`, level, this.peopleNoun());
+    return filledPattern(own ?? `within ${sentenceLabel} {level}`, level, this.peopleNoun());
   }
 }
 
