@@ -15,7 +15,7 @@ interface StripEntry {
   imports: [KeyLabel],
   template: `
     @if (entries().length > 0) {
-      <div class="strip">
+      <footer aria-label="Keys">
         @for (entry of entries(); track entry.says) {
           <span>
             @for (key of entry.keys; track key) {
@@ -25,7 +25,7 @@ interface StripEntry {
           </span>
         }
         <button type="button" (click)="showAll()"><kbd>?</kbd> All keys</button>
-      </div>
+      </footer>
     }
   `,
   styleUrl: './key-strip.scss',

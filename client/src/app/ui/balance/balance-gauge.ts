@@ -9,6 +9,8 @@ import { barLabels } from './bar-labels';
 /** Where things lie, from the top, in pixels. */
 interface GaugeLayout {
   readonly height: number;
+  /** Where the drawing begins when it has no upper edge. */
+  readonly topWithoutPeople: number;
   readonly upperRule: number;
   readonly upperWhisker: number;
   readonly bar: number;
@@ -26,6 +28,7 @@ const PIXELS_PER_LABEL = 88;
 const LAYOUTS: Readonly<Record<'large' | 'small', GaugeLayout>> = {
   large: {
     height: 84,
+    topWithoutPeople: 28,
     upperRule: 21,
     upperWhisker: 27,
     bar: 32,
@@ -38,6 +41,7 @@ const LAYOUTS: Readonly<Record<'large' | 'small', GaugeLayout>> = {
   },
   small: {
     height: 24,
+    topWithoutPeople: 0,
     upperRule: 3,
     upperWhisker: 5.5,
     bar: 8,
@@ -88,6 +92,12 @@ export class BalanceGaugeView {
   protected readonly gapText = computed(() => {
     const gauge = this.gauge();
     return gauge.kind === 'risks' ? gauge.gapText : null;
+  });
+
+  protected readonly viewBox = computed(() => {
+    const { height, topWithoutPeople } = this.layout();
+    const top = this.gauge().kind === 'ratio' ? topWithoutPeople : 0;
+    return `0 ${top} ${this.width()} ${height - top}`;
   });
 
   /** Pixels from the left end. */

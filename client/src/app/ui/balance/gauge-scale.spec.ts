@@ -79,3 +79,13 @@ describe('how far it reaches', () => {
     expect(scaleOf(risks(0, edge(0, 0, 0))).end).toBeGreaterThan(0);
   });
 });
+
+it('names the reference even where every second multiple is named', () => {
+  const { multiples } = scaleOf(risks(0.05, edge(0.2, 0.1, 0.6), edge(0.2, 0.1, 0.7)));
+  expect(labels(multiples)).toEqual(['0', '1×', '2×', '4×', '6×', '8×', '10×', '12×', '14×']);
+});
+
+it('leaves the reference unnamed where its name would touch zero', () => {
+  const { multiples } = scaleOf(risks(0.01, edge(0.2, 0.1, 0.6), edge(0.2, 0.1, 0.7)));
+  expect(labels(multiples)).toEqual(['0', '10×', '20×', '30×', '40×', '50×', '60×', '70×']);
+});

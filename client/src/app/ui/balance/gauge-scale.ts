@@ -21,6 +21,7 @@ const SMALLS_PER_LABEL = 5;
 /** A limit further out than this many bars would squeeze the bar; it gets an arrow instead. */
 const MOST_BARS = 4;
 const PEOPLE = 100;
+const WIDEST_STEP_NAMING_ONE = 5;
 
 /** How far a scale must reach, and how many named ticks have room on an edge. */
 export interface ScaleRoom {
@@ -65,10 +66,21 @@ function ratioScale({ end, mostLabels }: ScaleRoom): GaugeScale {
 
 function multiplesOf(reference: number, end: number, mostLabels: number): readonly GaugeTick[] {
   const step = Math.max(1, labelStep(end / reference, mostLabels));
-  return ticks(end / reference, step, step / 2, multipleLabel).map((tick) => ({
+  return namingOne(ticks(end / reference, step, step / 2, multipleLabel)).map((tick) => ({
     ...tick,
     at: tick.at * reference,
   }));
+}
+
+/** The reference itself is named too, unless its name would touch that of zero. */
+function namingOne(found: readonly GaugeTick[]): readonly GaugeTick[] {
+  const [zero, ...others] = found;
+  const step = others.find(({ label }) => label !== null)?.at ?? 1;
+  if (zero === undefined || step > WIDEST_STEP_NAMING_ONE) return found;
+  const beyond = others.filter(({ at }) => at !== 1);
+  return [zero, ...beyond, { at: 1, label: multipleLabel(1) }].toSorted(
+    (one, other) => one.at - other.at,
+  );
 }
 
 function ticks(

@@ -1,6 +1,5 @@
 import { computed, type Signal, signal } from '@angular/core';
 import type { AbstractControl, FormGroup } from '@angular/forms';
-import { merge } from 'rxjs';
 import type { ApiProblem } from '../../server-api/api-problem';
 
 /** What to say about a control that fails a validator, by control name and validator key. */
@@ -28,7 +27,7 @@ export class FormProblems {
     private readonly form: FormGroup,
     private readonly messages: FieldMessages,
   ) {
-    merge(form.events).subscribe(() => {
+    form.events.subscribe(() => {
       this.version.update((version) => version + 1);
     });
   }

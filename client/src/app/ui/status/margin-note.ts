@@ -17,13 +17,13 @@ const INKS: Readonly<Record<NoteTone, string>> = {
 @Component({
   selector: 'eh-margin-note',
   template: `
-    <h3>
+    <p class="head" role="heading" [attr.aria-level]="headingLevel()">
       <span class="tag" [class]="tone()">{{ tag() }}</span>
       {{ subject() }}
       @if (meta(); as meta) {
         <span class="meta">{{ meta }}</span>
       }
-    </h3>
+    </p>
     <div class="text"><ng-content /></div>
     <div class="actions"><ng-content select="[noteActions]" /></div>
   `,
@@ -37,6 +37,9 @@ export class MarginNote {
   readonly subject = input.required<string>();
   /** Who or when, in third ink. */
   readonly meta = input('');
+
+  /** Where the note stands among the headings of its page. */
+  readonly headingLevel = input(3);
 
   protected readonly ink = computed(() => INKS[this.tone()]);
 }
