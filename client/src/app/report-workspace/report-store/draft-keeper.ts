@@ -1,7 +1,16 @@
 import { DestroyRef, inject, Injectable, signal } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import type { DraftView } from '#shared/api';
-import { catchError, debounceTime, EMPTY, groupBy, mergeMap, Subject, switchMap } from 'rxjs';
+import {
+  catchError,
+  debounceTime,
+  EMPTY,
+  groupBy,
+  mergeMap,
+  type Observable,
+  Subject,
+  switchMap,
+} from 'rxjs';
 import { ReportsApi } from '../../server-api/reports-api';
 import { SessionStore } from '../../session/session-store';
 import { NOW } from '../../ui/clock';
@@ -73,21 +82,24 @@ export class DraftKeeper {
   }
 
   /** A draft is a convenience: when the server cannot keep it, this browser still does. */
-  private tell(blockId: string, draft: Draft | null): ReturnType<ReportsApi['discardDraft']> {
-    const { studyId, reportId } = this.place();
-    if (draft === null && !this.onServer.delete(blockId)) return EMPTY;
-    if (draft !== null) this.onServer.add(blockId);
-    const told =
-      draft === null
-        ? this.api.discardDraft(studyId, reportId, blockId)
-        : this.api.putDraft(studyId, reportId, blockId, {
-            baseVersion: draft.baseVersion,
-            content: draft.content,
-          });
+  private tell(blockId: string, draft: Draft | null): Observable<never> {
+    const told = draft === null ? this.discard(blockId) : this.put(draft);
     return told.pipe(
-      mergeMap(() => EMPTY),
       catchError(() => EMPTY),
+      mergeMap(() => EMPTY),
     );
+  }
+
+  private put({ blockId, baseVersion, content }: Draft): Observable<unknown> {
+    const { studyId, reportId } = this.place();
+    this.onServer.add(blockId);
+    return this.api.putDraft(studyId, reportId, blockId, { baseVersion, content });
+  }
+
+  private discard(blockId: string): Observable<unknown> {
+    const { studyId, reportId } = this.place();
+    if (!this.onServer.delete(blockId)) return EMPTY;
+    return this.api.discardDraft(studyId, reportId, blockId);
   }
 
   private key(blockId: string): string {

@@ -2,7 +2,6 @@ import { computed, Injectable, signal } from '@angular/core';
 import type { DraftView, ReportView } from '#shared/api';
 import type { HouseStyle } from '#shared/house-style';
 import type { PinnedAnalysis, Report } from '#shared/report';
-import type { Phrasebook } from '#shared/wording';
 import { openSharedReport, type SharedReport } from './shared-report';
 
 /** Where a report is found. */
@@ -19,8 +18,6 @@ export class ReportState {
   /** Drafts that the server kept of texts that this person was writing. */
   readonly drafts = signal<readonly DraftView[]>([]);
   readonly lastSavedAt = signal<string | null>(null);
-  /** The words that generated sentences are made of. */
-  readonly phrasebook = signal<Phrasebook | null>(null);
 
   private readonly knownResults = signal<ReadonlyMap<string, PinnedAnalysis>>(new Map());
   private readonly offered = signal<ReadonlyMap<string, PinnedAnalysis>>(new Map());
@@ -49,11 +46,16 @@ export class ReportState {
     this.takeStyles([view.houseStyle]);
   }
 
+  /** Takes one result that the report is about to show. */
+  takeResult(pin: PinnedAnalysis): void {
+    this.knownResults.update((known) => extended(known, [pin], (each) => each.resultId));
+  }
+
   takeStyles(styles: readonly HouseStyle[]): void {
     this.knownStyles.update((known) => extended(known, styles, (style) => style.id));
   }
 
-  /** Lets a block show an analysis that the report has no pin of yet, until the server has pinned it. */
+  /** Lets a block show an analysis before the server has pinned it. */
   offer(analysis: PinnedAnalysis): void {
     this.offered.update((known) => extended(known, [analysis], (pin) => pin.analysisId));
   }

@@ -1,4 +1,4 @@
-import { DestroyRef, effect, inject, Injectable, signal } from '@angular/core';
+import { computed, DestroyRef, effect, inject, Injectable, signal } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import type { StepsView } from '#shared/api';
 import {
@@ -63,14 +63,16 @@ export class ReportSync {
   readonly refused = signal<readonly RefusedStep[]>([]);
   /** Steps of an earlier visit that have not reached the server yet. */
   readonly recovering = signal<readonly MadeStep[]>([]);
+  /** Whether the server has everything that was made here. */
+  readonly allSent = computed(
+    () => this.state.pending().length === 0 && this.recovering().length === 0,
+  );
   /** Called before steps of others come in, so that an open editor hands over what it holds. */
   beforeOthers: () => void = () => undefined;
 
   constructor() {
     effect(() => {
-      const place = this.state.place();
-      const steps = [...this.recovering(), ...this.state.pending()];
-      if (place !== null) this.unsent.keep(place.reportId, steps);
+      this.keepUnsent();
     });
     effect(() => {
       if (this.state.lacksSources()) this.sources.next();
@@ -91,8 +93,9 @@ export class ReportSync {
     this.recover(this.unsent.takeOver(this.state.place()?.reportId ?? ''));
   }
 
-  /** Sends what is waiting. */
+  /** Sends what is waiting. Until then this browser keeps it, from this very moment on. */
   send(): void {
+    this.keepUnsent();
     this.sending.next();
   }
 
@@ -103,6 +106,12 @@ export class ReportSync {
 
   dismiss(refusal: RefusedStep): void {
     this.refused.update((list) => list.filter((each) => each !== refusal));
+  }
+
+  private keepUnsent(): void {
+    const place = this.state.place();
+    const steps = [...this.recovering(), ...this.state.pending()];
+    if (place !== null) this.unsent.keep(place.reportId, steps);
   }
 
   private run(occasion: Observable<unknown>, work: () => Observable<unknown>): void {
@@ -127,7 +136,7 @@ export class ReportSync {
     });
   }
 
-  /** After a refusal: a batch goes step by step, a stale edit is brought up to date or contested. */
+  /** After a refusal a batch goes step by step; a stale edit is rebased or contested. */
   private settle(ids: readonly string[], problem: ApiProblem): Observable<unknown> {
     const [first = ''] = ids;
     if (ids.length > 1) {

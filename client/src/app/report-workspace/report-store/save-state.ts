@@ -5,7 +5,7 @@ import { ReportState } from './report-state';
 import { ReportSync } from './report-sync';
 import { StepTransport } from './step-transport';
 
-/** How far a person's work has come, in one or two words and, where it got stuck, with the reason. */
+/** How far a person's work has come, in a word or two, with the reason where it got stuck. */
 export interface SaveWords {
   readonly kind: 'saved' | 'saving' | 'stuck' | 'contested';
   readonly words: string;

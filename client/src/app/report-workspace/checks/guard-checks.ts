@@ -1,0 +1,121 @@
+import {
+  addressKey,
+  findGuards,
+  type GuardFinding,
+  type GuardId,
+  type GuardSeverity,
+} from '#shared/analysis';
+import type { HouseStyle } from '#shared/house-style';
+import type { PinnedAnalysis } from '#shared/report';
+import { guardWords, type Phrasebook } from '#shared/wording';
+import { counted } from '../../ui/words';
+import type { PrintedBlock } from '../proof/report-proof';
+import type { ProofCheck } from './proof-check';
+
+/** What the words of a guard are said under. */
+export interface GuardPrint {
+  readonly houseStyle: HouseStyle;
+  readonly phrasebook: Phrasebook;
+}
+
+/** More cautions than this beside one block are counted, not shown. */
+const MOST_SHOWN = 3;
+
+const WEIGHTS: Readonly<Record<GuardSeverity, ProofCheck['weight']>> = {
+  refusal: 'problem',
+  caution: 'caution',
+  note: 'quiet',
+};
+
+/**
+ * What the guards of an analysis say beside a block. The first block that shows the analysis
+ * (`isFirst`) carries all of them, one note for each guard; a later one only what concerns the very
+ * comparison that it prints.
+ */
+export function guardChecks(
+  blockId: string,
+  printed: PrintedBlock,
+  pin: PinnedAnalysis,
+  under: GuardPrint & { readonly isFirst: boolean },
+): readonly ProofCheck[] {
+  const findings = findGuards(pin.result);
+  const relevant = under.isFirst
+    ? findings
+    : findings.filter((each) => concerns(each, printed, pin));
+  const guardIds = [...new Set(relevant.map(({ guardId }) => guardId))];
+  const checks = guardIds.map((guardId) => {
+    const same = relevant.filter((finding) => finding.guardId === guardId);
+    return check(blockId, pin, { guardId, same }, under);
+  });
+  return [...checks.slice(0, MOST_SHOWN), ...rest(blockId, pin, checks.slice(MOST_SHOWN))];
+}
+
+interface SameGuard {
+  readonly guardId: GuardId;
+  readonly same: readonly GuardFinding[];
+}
+
+function check(
+  blockId: string,
+  pin: PinnedAnalysis,
+  { guardId, same }: SameGuard,
+  { houseStyle, phrasebook }: GuardPrint,
+): ProofCheck {
+  const [first, ...others] = same as readonly [GuardFinding, ...GuardFinding[]];
+  const { title, sentence } = guardWords(first, pin, houseStyle, phrasebook);
+  const more = others.length === 0 ? '' : ` ${counted(others.length, 'place', 'places')} more.`;
+  const weight = WEIGHTS[first.severity];
+  return {
+    id: `${blockId}/guard/${pin.analysisId}/${guardId}`,
+    blockId,
+    weight,
+    tag: pin.number,
+    subject: title,
+    text: weight === 'quiet' ? `${pin.number}: ${title}` : sentence + more,
+    detail: sentence + more,
+    anchor: null,
+    remedies: [{ kind: 'analysis', label: 'Open the analysis', analysisId: pin.analysisId }],
+  };
+}
+
+function rest(
+  blockId: string,
+  { analysisId, number }: PinnedAnalysis,
+  checks: readonly ProofCheck[],
+): readonly ProofCheck[] {
+  if (checks.length === 0) return [];
+  const words = `${counted(checks.length, 'further caution', 'further cautions')} in ${number}`;
+  return [
+    {
+      id: `${blockId}/guard/${analysisId}/rest`,
+      blockId,
+      weight: 'quiet',
+      tag: number,
+      subject: words,
+      text: words,
+      detail: checks.map(({ subject }) => subject).join('. '),
+      anchor: null,
+      remedies: [{ kind: 'analysis', label: 'Open the analysis', analysisId }],
+    },
+  ];
+}
+
+/** Whether a block prints an effect at the very place that a guard speaks of. */
+function concerns(finding: GuardFinding, { bound }: PrintedBlock, pin: PinnedAnalysis): boolean {
+  const { scope, levelId } = finding.place;
+  if (finding.severity === 'note' || levelId === null) return false;
+  const place = addressKey({
+    analysisId: pin.analysisId,
+    quantity: 'total',
+    levelId,
+    scope,
+    facet: 'value',
+  });
+  const effects = bound.filter(
+    ({ address }) => address.facet !== 'value' && address.quantity !== 'risk',
+  );
+  const places = new Set(
+    effects.map(({ address }) => addressKey({ ...address, quantity: 'total', facet: 'value' })),
+  );
+  return places.size === 1 && places.has(place);
+}

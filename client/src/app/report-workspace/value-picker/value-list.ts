@@ -1,0 +1,46 @@
+import { addressKey, listValues, type ValueAddress } from '#shared/analysis';
+import type { PinnedAnalysis } from '#shared/report';
+import type { Phrasebook } from '#shared/wording';
+import { valueWords, type ValueWords } from './value-words';
+
+/** A value to choose: in words, and as it prints. */
+export interface ListedValue extends ValueWords {
+  readonly key: string;
+  readonly address: ValueAddress;
+  readonly text: string;
+}
+
+/** How many values are shown at once; searching narrows them down. */
+export const MOST_SHOWN = 60;
+
+/** Every value of an analysis, with its words and its print. */
+export function listedValues(
+  pin: PinnedAnalysis,
+  phrasebook: Phrasebook,
+  textOf: (address: ValueAddress) => string,
+): readonly ListedValue[] {
+  return listValues(pin.result, pin.analysisId).map(({ address }) => ({
+    ...valueWords(address, pin, phrasebook),
+    key: addressKey(address),
+    address,
+    text: textOf(address),
+  }));
+}
+
+/** The values whose words or print hold every word that was typed, in any order. */
+export function found(values: readonly ListedValue[], search: string): readonly ListedValue[] {
+  const wanted = plain(search).split(' ').filter(Boolean);
+  if (wanted.length === 0) return values;
+  return values.filter(({ what, whom, where, text }) => {
+    const words = plain(`${what} ${whom} ${where} ${text}`);
+    return wanted.every((word) => words.includes(word));
+  });
+}
+
+function plain(text: string): string {
+  return text
+    .normalize('NFKD')
+    .replace(/\p{M}/gu, '')
+    .replace(/[\u2012-\u2015\u2212]/gu, '-')
+    .toLowerCase();
+}
