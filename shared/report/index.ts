@@ -60,3 +60,5 @@ export type {
   StepIssueCode,
   StepKind,
 } from './steps/step';
+export { valueWords } from './value-words';
+export type { ValueWords } from './value-words';

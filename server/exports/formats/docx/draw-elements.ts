@@ -76,7 +76,11 @@ function drawTable(element: ElementOf<'table'>, context: DocumentContext): Drawn
       ...drawCaption(caption, { blockId, keepNext: true, follows: 'text' }, context),
       ...panels.flatMap((panel, index) => [
         ...(index === 0 ? [] : [continuation(caption)]),
-        drawTableGrid(panel, setting, context),
+        drawTableGrid(
+          panel,
+          { setting, notesFollow: index === panels.length - 1 && notes.length > 0 },
+          context,
+        ),
       ]),
       // A table needs a paragraph behind it, or the next table would grow into it.
       ...drawNotes(notes.length === 0 ? [[]] : notes, context),

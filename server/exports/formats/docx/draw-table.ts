@@ -25,14 +25,20 @@ import { twips } from './page-setup';
 import { CELL_MARGIN, columnWidths, type TableSetting } from './table-plan';
 import { drawRuns, type TextLook } from './text-runs';
 
+/** What a grid is set by, and whether the notes of its table follow it. */
+export interface GridPlace {
+  readonly setting: TableSetting;
+  readonly notesFollow: boolean;
+}
+
 /** A native table with three rules: head rows repeat on every page, no row is torn in two. */
 export function drawTableGrid(
   table: TableElement,
-  setting: TableSetting,
+  { setting, notesFollow }: GridPlace,
   context: DocumentContext,
 ): Table {
   const widths = columnWidths(table, setting, context.houseStyle).map(twips);
-  const drawing: TableDrawing = { table, setting, context, widths };
+  const drawing: TableDrawing = { table, setting, notesFollow, context, widths };
   return new Table({
     width: { size: sum(drawing.widths), type: WidthType.DXA },
     columnWidths: drawing.widths,
@@ -44,9 +50,8 @@ export function drawTableGrid(
   });
 }
 
-interface TableDrawing {
+interface TableDrawing extends GridPlace {
   readonly table: TableElement;
-  readonly setting: TableSetting;
   readonly context: DocumentContext;
   /** In twips. */
   readonly widths: readonly number[];
@@ -117,9 +122,10 @@ function headCell(cell: TableHeadCell, place: CellPlace, drawing: TableDrawing):
 function bodyRows(drawing: TableDrawing): readonly TableRow[] {
   const { rows } = drawing.table;
   return rows.map((row, index) => {
+    const isLast = index === rows.length - 1;
     const place: RowPlace = {
-      isLast: index === rows.length - 1,
-      keepNext: staysWithNext(rows, index),
+      isLast,
+      keepNext: isLast ? drawing.notesFollow : staysWithNext(rows, index),
     };
     return new TableRow({ cantSplit: true, children: bodyCells(row, place, drawing) });
   });

@@ -1,0 +1,115 @@
+import type { AddressedQuantity, AddressFacet, ResultScope, ValueAddress } from '#shared/analysis';
+import type { EffectMeasureId } from '#shared/effects';
+import type { PinnedAnalysis } from './report';
+import type { DesignTerms, Phrasebook } from '#shared/wording';
+
+/** A value in words, for lists: what it is, of whom, and where. */
+export interface ValueWords {
+  /** "Risk difference" */
+  readonly what: string;
+  /** "Over 6 h against none" */
+  readonly whom: string;
+  /** "Hospital ward" */
+  readonly where: string;
+}
+
+/** Names the value at an address in the terms that the study's design allows. */
+export function valueWords(
+  address: ValueAddress,
+  pin: PinnedAnalysis,
+  phrasebook: Phrasebook,
+): ValueWords {
+  const terms = phrasebook.terms[pin.result.frame.design];
+  return {
+    what: quantityWords(address, pin, terms) + FACETS[address.facet],
+    whom: groupWords(address, pin),
+    where: scopeWords(address.scope, pin),
+  };
+}
+
+const FACETS: Readonly<Record<AddressFacet, string>> = {
+  value: '',
+  lower: ', lower limit',
+  upper: ', upper limit',
+  pValue: ', p-value',
+  statistic: ', statistic',
+};
+
+type QuantityWords = (terms: DesignTerms, pin: PinnedAnalysis) => string;
+
+const QUANTITIES: Readonly<Record<AddressedQuantity, QuantityWords>> = {
+  events: (_terms, { result }) =>
+    result.frame.design === 'caseControl' ? 'Cases' : 'Number with the outcome',
+  total: () => 'Number in the group',
+  risk: (terms, { result }) => terms[result.frame.outcome.desirability].head,
+  riskDifference: measure('riskDifference'),
+  riskRatio: measure('riskRatio'),
+  oddsRatio: measure('oddsRatio'),
+  numberNeeded: () => 'Number needed',
+  pearson: () => 'Pearson chi-square test',
+  fisher: () => 'Fisher’s exact test',
+  association: () => 'Test over all levels',
+  trend: () => 'Test for trend',
+  conditionalIndependence: () => 'Cochran–Mantel–Haenszel test',
+  'homogeneity:riskDifference': homogeneity('riskDifference'),
+  'homogeneity:riskRatio': homogeneity('riskRatio'),
+  'homogeneity:oddsRatio': homogeneity('oddsRatio'),
+  counted: () => 'Records counted',
+  leftOut: () => 'Records left out',
+  controls: () => 'Controls',
+  shareOfCases: () => 'Share of cases',
+  shareOfControls: () => 'Share of controls',
+  comparedCases: () => 'Cases compared',
+  comparedControls: () => 'Controls compared',
+  shareOfComparedCases: () => 'Share of cases compared',
+  shareOfComparedControls: () => 'Share of controls compared',
+};
+
+function measure(id: EffectMeasureId): QuantityWords {
+  return (terms) => capitalised(terms.measures[id].name);
+}
+
+function homogeneity(id: EffectMeasureId): QuantityWords {
+  return (terms) => `Difference between strata, ${terms.measures[id].name}`;
+}
+
+function quantityWords(address: ValueAddress, pin: PinnedAnalysis, terms: DesignTerms): string {
+  return QUANTITIES[address.quantity](terms, pin);
+}
+
+function groupWords({ levelId, quantity }: ValueAddress, { result }: PinnedAnalysis): string {
+  const { label, levels, referenceLevelId } = result.frame.exposure;
+  const labelOf = (id: string): string => levels.find((level) => level.id === id)?.label ?? id;
+  if (levelId === null) return 'All levels';
+  const level = `${label}: ${labelOf(levelId)}`;
+  return COMPARES.includes(quantity) ? `${level} against ${labelOf(referenceLevelId)}` : level;
+}
+
+function scopeWords(scope: ResultScope, { result }: PinnedAnalysis): string {
+  switch (scope.kind) {
+    case 'crude':
+      return result.frame.strata.length === 0 ? '' : 'All strata together';
+    case 'pooled':
+      return 'Pooled over strata';
+    case 'stratum':
+      return result.frame.strata.find(({ id }) => id === scope.stratumId)?.label ?? '';
+  }
+}
+
+function capitalised(text: string): string {
+  return text.charAt(0).toUpperCase() + text.slice(1);
+}
+
+/** Numbers of a level that are about its difference from the reference. */
+const COMPARES: readonly AddressedQuantity[] = [
+  'riskDifference',
+  'riskRatio',
+  'oddsRatio',
+  'numberNeeded',
+  'pearson',
+  'fisher',
+  'conditionalIndependence',
+  'homogeneity:riskDifference',
+  'homogeneity:riskRatio',
+  'homogeneity:oddsRatio',
+];
