@@ -26,7 +26,7 @@ export { valueAxisTitle } from './print/axis-titles';
 export { columnHeads, headWithInterval } from './print/column-heads';
 export type { ColumnHeads } from './print/column-heads';
 export { contrastSentence } from './print/contrast-sentence';
-export type { ContrastPart, ContrastSlot } from './print/contrast-sentence';
+export type { ContrastPart, ContrastSlot, ContrastWords } from './print/contrast-sentence';
 export { figureNotes } from './print/figure-notes';
 export { homogeneityWords } from './print/homogeneity-words';
 export { methodsNoteOf } from './print/methods-note';

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { findGuards } from '#shared/analysis';
+import { EFFECT_MEASURE_IDS } from '#shared/effects';
 import {
   altTextOf,
   balanceOf,
@@ -8,6 +9,7 @@ import {
   figureNotes,
   figureTitle,
   guardWords,
+  homogeneityWords,
   methodsNoteOf,
   phraseOfClaim,
   phraseText,
@@ -16,6 +18,7 @@ import {
   availableFramings,
   type Balance,
   type Claim,
+  type ContrastWords,
 } from '#shared/wording';
 import { HOUSE_STYLE_IDS, houseStyle, phrasebook } from '../builders/house-styles';
 import { SCENARIOS, type Scenario } from './scenarios';
@@ -81,19 +84,35 @@ const SHOW_ALL = {
   trend: true,
 };
 
-function printOf({ result }: Scenario): string {
+function contrastWords({ result }: Scenario): ContrastWords {
+  const { outcome, exposure, strata } = result.frame;
+  const reference = exposure.levels.find(({ id }) => id === exposure.referenceLevelId);
+  return {
+    outcome: outcome.noun,
+    timeFrame: outcome.timeFrame,
+    exposure: exposure.sentenceLabel,
+    reference: reference?.sentenceLabel ?? '',
+    strata: strata[0]?.within?.[0]?.columnLabel ?? null,
+  };
+}
+
+function printOf(scenario: Scenario): string {
+  const { result } = scenario;
   const analysis = { analysisId: 'a1', result };
   const style = houseStyle(PLAIN);
   const guards = findGuards(result).map((finding) => {
     const { title, sentence } = guardWords(finding, analysis, style, BOOK);
     return `- guard: ${title}. ${sentence}`;
   });
-  const contrast = contrastSentence(result.frame, BOOK)
+  const contrast = contrastSentence(contrastWords(scenario), BOOK)
     .map((part) => (part.kind === 'picker' ? `[${part.text}]` : part.text))
     .join('');
   return shown(
     [
       `- contrast: ${contrast}`,
+      ...(result.pooled.length === 0
+        ? []
+        : [`- homogeneity: ${homogeneityWords(result, EFFECT_MEASURE_IDS, BOOK)}`]),
       `- table: ${phraseText(tableTitle(analysis, style, BOOK))}`,
       ...tableNotes(analysis, SHOW_ALL, style, BOOK).map((note) => `- note: ${phraseText(note)}`),
       `- figure: ${phraseText(figureTitle(analysis, style, BOOK))}`,

@@ -82,6 +82,7 @@ export const PRINT_SLOTS = {
   'contrast.within': ['strata'],
   'contrast.noStrata': [],
   'contrast.time': ['time'],
-  'homogeneity.differs': ['test'],
-  'homogeneity.noEvidence': ['test'],
+  'homogeneity.differs': [],
+  'homogeneity.noEvidence': [],
+  'homogeneity.notTested': [],
 } as const satisfies Readonly<Record<string, readonly string[]>>;

@@ -1,4 +1,3 @@
-import type { ResultFrame } from '#shared/analysis';
 import { capitalised, fillWords } from '../phrasebook/fill-pattern';
 import type { Phrasebook } from '../phrasebook/phrasebook';
 
@@ -10,51 +9,56 @@ export type ContrastPart =
   | { readonly kind: 'text'; readonly text: string }
   | { readonly kind: 'picker'; readonly slot: ContrastSlot; readonly text: string };
 
+/** What is picked, or what stands in its place until something is. */
+export interface ContrastWords {
+  readonly outcome: string;
+  readonly timeFrame: string | null;
+  readonly exposure: string;
+  readonly reference: string;
+  /** The stratifying columns, as in "sex and class"; null without strata. */
+  readonly strata: string | null;
+}
+
 /**
  * The analysis as a sentence with pickers for words: "Hand eczema within 12 months by wet work per
  * shift, each level against no wet work, within workplace".
  */
-export function contrastSentence(frame: ResultFrame, book: Phrasebook): readonly ContrastPart[] {
-  const words = pickerWords(frame, book);
-  const time = frame.outcome.timeFrame;
+export function contrastSentence(words: ContrastWords, book: Phrasebook): readonly ContrastPart[] {
+  const { timeFrame } = words;
+  const picked = pickerWords(words, book);
   const pattern = fillWords(book, 'contrast.sentence', {
     outcome: '{outcome}',
-    time: time === null ? '' : fillWords(book, 'contrast.time', { time }),
+    time: timeFrame === null ? '' : fillWords(book, 'contrast.time', { time: timeFrame }),
     exposure: '{exposure}',
     reference: '{reference}',
     strata: '{strata}',
   });
   return pattern
-    .split(/(\{\w+\})/)
+    .split(/(\{(?:outcome|exposure|reference|strata)\})/)
     .filter((piece) => piece !== '')
-    .map((piece) => partOf(piece, words));
+    .map((piece) => partOf(piece, picked));
 }
 
-function pickerWords(
-  { outcome, exposure, strata, strataLabel }: ResultFrame,
-  book: Phrasebook,
-): Readonly<Record<ContrastSlot, string>> {
-  const reference = exposure.levels.find(({ id }) => id === exposure.referenceLevelId);
-  const columns = strata[0]?.within?.map(({ columnLabel }) => columnLabel).join(' and ');
-  const stratified = columns ?? strataLabel;
+type PickerWords = Readonly<Record<ContrastSlot, string>>;
+
+function pickerWords(words: ContrastWords, book: Phrasebook): PickerWords {
+  const { outcome, exposure, reference, strata } = words;
   return {
-    outcome: capitalised(outcome.noun),
-    exposure: exposure.sentenceLabel,
-    reference: reference?.sentenceLabel ?? '',
+    outcome: capitalised(outcome),
+    exposure,
+    reference,
     strata:
-      stratified === null
+      strata === null
         ? fillWords(book, 'contrast.noStrata', {})
-        : fillWords(book, 'contrast.within', { strata: stratified }),
+        : fillWords(book, 'contrast.within', { strata }),
   };
 }
 
-function partOf(piece: string, words: Readonly<Record<ContrastSlot, string>>): ContrastPart {
-  const slot = piece.slice(1, -1);
-  return isSlot(slot) && piece.startsWith('{')
-    ? { kind: 'picker', slot, text: words[slot] }
-    : { kind: 'text', text: piece };
+function partOf(piece: string, words: PickerWords): ContrastPart {
+  const slot = SLOTS.find((name) => piece === `{${name}}`);
+  return slot === undefined
+    ? { kind: 'text', text: piece }
+    : { kind: 'picker', slot, text: words[slot] };
 }
 
-function isSlot(name: string): name is ContrastSlot {
-  return ['outcome', 'exposure', 'reference', 'strata'].includes(name);
-}
+const SLOTS: readonly ContrastSlot[] = ['outcome', 'exposure', 'reference', 'strata'];

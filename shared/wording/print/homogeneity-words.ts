@@ -1,34 +1,28 @@
+import type { AnalysisResult } from '#shared/analysis';
 import type { EffectMeasureId } from '#shared/effects';
-import type { HouseStyle } from '#shared/house-style';
-import { fillPattern, startSentence } from '../phrasebook/fill-pattern';
+import { fillWords } from '../phrasebook/fill-pattern';
 import type { Phrasebook } from '../phrasebook/phrasebook';
-import type { Phrase } from '../phrase';
-import { printContext, type PrintedAnalysis } from './print-context';
-import { pValueParts } from './test-parts';
 
 /**
- * What the test of homogeneity of a measure says for one level: that the strata differ, or that
- * there is no clear evidence of it. Null where the test is not defined.
+ * What the tests of homogeneity allow to be said of the strata, for the measures that are shown:
+ * that they differ, that there is no clear evidence of it, or that it cannot be tested.
  */
 export function homogeneityWords(
-  analysis: PrintedAnalysis,
-  { measure, indexLevelId }: { readonly measure: EffectMeasureId; readonly indexLevelId: string },
-  style: HouseStyle,
+  { pooled, specification }: AnalysisResult,
+  measures: readonly EffectMeasureId[],
   book: Phrasebook,
-): Phrase | null {
-  const { pooled, specification } = analysis.result;
-  const outcome = pooled.find((contrast) => contrast.indexLevelId === indexLevelId)?.homogeneity[
-    measure
-  ];
-  if (!outcome?.ok) {
-    return null;
+): string {
+  const pValues = pooled.flatMap(({ homogeneity }) =>
+    measures.flatMap((id) => {
+      const test = homogeneity[id];
+      return test.ok ? [test.value.pValue] : [];
+    }),
+  );
+  if (pValues.length === 0) {
+    return fillWords(book, 'homogeneity.notTested', {});
   }
-  const test = pValueParts(printContext(analysis, style, book), outcome.value, {
-    quantity: `homogeneity:${measure}`,
-    levelId: indexLevelId,
-    scope: { kind: 'pooled' },
-  });
-  const differs = outcome.value.pValue < 1 - specification.level;
-  const key = differs ? 'homogeneity.differs' : 'homogeneity.noEvidence';
-  return { parts: startSentence(fillPattern(book, key, { test })) };
+  const threshold = 1 - specification.level;
+  return pValues.some((pValue) => pValue < threshold)
+    ? fillWords(book, 'homogeneity.differs', {})
+    : fillWords(book, 'homogeneity.noEvidence', {});
 }

@@ -1,10 +1,10 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import { columnHeads } from '#shared/wording';
+import { columnHeads, homogeneityWords } from '#shared/wording';
 import { ScrollSideways } from '../../ui/scroll-sideways';
 import { BenchStore } from '../bench/bench-store';
 import { levelLabel, stratumLabel } from '../bench/result-scopes';
 import { notEstimable, shownMeasures } from '../print/bench-print';
-import { homogeneityWords, pooledRows } from '../print/pooled-rows';
+import { pooledRows } from '../print/pooled-rows';
 
 /** The contrasts pooled over strata, and whether the strata differ. */
 @Component({
@@ -36,9 +36,10 @@ export class PooledPanel {
     if (result === null) return '';
     return levelLabel(result, result.frame.exposure.referenceLevelId);
   });
-  protected readonly words = computed(() =>
-    homogeneityWords(this.store.result()?.pooled ?? [], this.measures()),
-  );
+  protected readonly words = computed(() => {
+    const print = this.store.print();
+    return print === null ? '' : homogeneityWords(print.result, this.measures(), print.book);
+  });
   /** Strata that the pooled numbers could not use, each named once with its reason. */
   protected readonly leftOut = computed(() => {
     const print = this.store.print();
