@@ -2,6 +2,7 @@ import type { HouseStyle } from '#shared/house-style';
 import type { Phrasebook } from '#shared/wording';
 import type { Configuration } from './config';
 import type { ErrorLog } from './errors/error-handler';
+import { createExporter, type Exporter } from './exports/exporter';
 import { openDatabase, type Database } from './models/database';
 import { createBackground, type Background } from './runtime/background';
 import { systemClock, type Clock } from './runtime/clock';
@@ -33,6 +34,7 @@ export interface Dependencies extends Runtime {
   readonly mailer: Mailer;
   readonly writeLetter: WriteLetter;
   readonly background: Background;
+  readonly exporter: Exporter;
   readonly houseStyles: readonly HouseStyle[];
   readonly phrasebook: Phrasebook;
   /** Lets the first administrator be made; printed at start when there are no accounts. */
@@ -66,6 +68,7 @@ export async function openDependencies(
     mailer: createMailer(config),
     writeLetter: readLetters(config.templatesDirectory),
     background: createBackground(runtime.log),
+    exporter: createExporter(runtime.log),
     houseStyles: readHouseStyles(config.templatesDirectory),
     phrasebook: readPhrasebook(config.templatesDirectory),
     firstAdministratorCode: firstAdministratorCode(runtime.randomness),

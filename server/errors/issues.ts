@@ -129,6 +129,88 @@ export const ISSUES = {
     title: 'An analysis uses this outcome: {analyses}.',
     wayOut: 'Change or remove the analysis first.',
   },
+  analysisNotComputable: {
+    status: 422,
+    title: 'The analysis cannot be computed as it stands.',
+    wayOut: 'Pick other columns or levels, or correct the code book.',
+  },
+  countsNotUsable: {
+    status: 422,
+    title: 'The records cannot be counted as asked.',
+    wayOut: 'Pick other columns or levels, or correct the code book.',
+  },
+  reasonRequired: {
+    status: 422,
+    title: 'A report shows this analysis: {reports}.',
+    wayOut: 'Say why it changes; the reason is kept with the analysis.',
+  },
+  staleAnalysis: {
+    status: 409,
+    title: 'Somebody saved version {version} of this analysis while you edited.',
+    wayOut: 'Look at the newer version, then save yours on top of it or give it up.',
+  },
+  analysisInUse: {
+    status: 409,
+    title: 'A report shows this analysis: {reports}.',
+    wayOut: 'Take its blocks out of the report first.',
+  },
+  analysisUnknown: {
+    status: 422,
+    title: 'The block shows an analysis that is not in this study, or was removed.',
+    wayOut: 'Choose another analysis for the block.',
+  },
+  reportClosed: {
+    status: 409,
+    title: 'The report is no longer open for changes.',
+    wayOut: 'Ask a lead of the study to open it again.',
+  },
+  stepNotUsable: {
+    status: 422,
+    title: 'The change cannot be made.',
+  },
+  blockUnknown: {
+    status: 404,
+    title: 'This block is not in the report.',
+  },
+  blockExists: {
+    status: 409,
+    title: 'A block with this id is in the report already.',
+  },
+  blockRemoved: {
+    status: 409,
+    title: 'Somebody removed this block while you edited.',
+    wayOut: 'Restore the block to keep your words, or leave it out.',
+  },
+  staleEdit: {
+    status: 409,
+    title: 'Somebody changed the same words while you edited.',
+    wayOut: 'Look at both versions and choose which one stands.',
+  },
+  staleMove: {
+    status: 409,
+    title: 'Somebody moved this block meanwhile.',
+    wayOut: 'Look where it stands now, then move it again.',
+  },
+  pinsMoveThemselves: {
+    status: 409,
+    title: 'While a report is a draft, its numbers follow the analyses by themselves.',
+    wayOut: 'Change the analysis instead.',
+  },
+  exportFailed: {
+    status: 500,
+    title: 'The file could not be made; the report itself is as it was.',
+    wayOut: 'Try again. If it happens again, tell whoever runs this server.',
+  },
+  exportTooSlow: {
+    status: 503,
+    title: 'Making the file took more than {seconds} seconds and was stopped.',
+    wayOut: 'Try again when the server is less busy, or split the report.',
+  },
+  exportsBusy: {
+    status: 503,
+    title: 'Too many files are being made at the moment.',
+    wayOut: 'Try again in a minute.',
+  },
   unexpected: {
     status: 500,
     title: 'Something went wrong on the server; it has been written to its log.',

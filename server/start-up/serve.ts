@@ -26,6 +26,7 @@ export async function serve(dependencies: Dependencies): Promise<RunningServer> 
       application.stop();
       await close(server, patience);
       await dependencies.background.idle();
+      await dependencies.exporter.close();
       await dependencies.database.close();
     },
   };

@@ -65,6 +65,7 @@ export async function startTestApplication(
     close: async () => {
       application.stop();
       await dependencies.background.idle();
+      await dependencies.exporter.close();
       await dependencies.database.close();
       await rm(dataDirectory, { recursive: true, force: true });
     },

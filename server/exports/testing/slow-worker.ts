@@ -1,0 +1,5 @@
+import { parentPort } from 'node:worker_threads';
+
+/** Takes jobs and never answers; the interval keeps it alive. */
+parentPort?.on('message', () => undefined);
+setInterval(() => undefined, 1000);
