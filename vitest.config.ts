@@ -7,7 +7,11 @@ export default defineConfig({
       { extends: true, test: { name: 'shared', include: ['shared/**/*.spec.ts'] } },
       {
         extends: true,
-        test: { name: 'server', include: ['server/**/*.spec.ts', 'seeds/**/*.spec.ts'] },
+        test: {
+          name: 'server',
+          include: ['server/**/*.spec.ts', 'seeds/**/*.spec.ts'],
+          testTimeout: 30_000,
+        },
       },
       {
         extends: true,
