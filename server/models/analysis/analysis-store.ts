@@ -59,6 +59,13 @@ export class AnalysisStore {
     );
   }
 
+  /** The number of an analysis, also of a removed one. */
+  async numberOf(id: string, unit?: Unit): Promise<number> {
+    const row = await this.analyses.findByPk(id, within(unit));
+    if (row === null) throw new Error(`Analysis ${id} is gone.`);
+    return row.number;
+  }
+
   /** The next free number; numbers of removed analyses are not given again. */
   async nextNumber(studyId: string, unit: Unit): Promise<number> {
     const highest = await this.analyses.max<number | null, AnalysisModel>('number', {
