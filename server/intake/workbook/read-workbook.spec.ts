@@ -1,3 +1,4 @@
+import { readFile } from 'node:fs/promises';
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { intakeProblem } from '../intake-issue';
@@ -142,6 +143,25 @@ describe('a workbook', () => {
     expect(await readCells(bytes, XLSX)).toEqual({ a: ['2008-01-01'] });
   });
 
+  it('reads what LibreOffice saved', async () => {
+    expect(await readCells(await savedBy('libreoffice'), XLSX)).toEqual({
+      day: ['2026-03-31', '2026-04-01', ''],
+      group: ['K\u00fcche', 'Station "4"', 'none'],
+      n: ['12', '3', '0'],
+      share: ['0.1', '2.5', ''],
+    });
+  });
+
+  it('reads what openpyxl saved', async () => {
+    expect(await readCells(await savedBy('openpyxl'), XLSX)).toEqual({
+      day: ['2026-03-31', ''],
+      moment: ['2026-03-31T14:05:00', ''],
+      group: ['K\u00fcche', 'Station "4"'],
+      n: ['12', '0.1'],
+      flag: ['TRUE', 'FALSE'],
+    });
+  });
+
   it('reads a long sheet', async () => {
     const bytes = await buildWorkbook((workbook) => {
       const sheet = workbook.addWorksheet('Data');
@@ -276,6 +296,11 @@ describe('a workbook that cannot be read', () => {
     );
   });
 });
+
+/** A workbook of invented data that another program saved (LibreOffice 7.4, openpyxl 3.0). */
+function savedBy(program: string): Promise<Buffer> {
+  return readFile(new URL(`../testing/files/saved-by-${program}.xlsx`, import.meta.url));
+}
 
 /** Changes a byte within the packed bytes of the sheet. */
 function withByteChanged(bytes: Buffer): Buffer {
