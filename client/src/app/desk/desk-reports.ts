@@ -6,7 +6,7 @@ import { StageStamp } from '../ui/status/stage-stamp';
 import { counted } from '../ui/words';
 import { ReportSketch } from './report-sketch';
 
-const MOST = 6;
+const MOST = 3;
 
 /** The reports that were changed last, as pages from afar. */
 @Component({

@@ -12,7 +12,7 @@ export interface Section {
   readonly key: string | null;
 }
 
-const DESK: Section = { name: 'Desk', initials: 'D', link: ['/desk'], exact: true, key: 'D' };
+const DESK: Section = { name: 'Desk', initials: 'De', link: ['/desk'], exact: true, key: 'D' };
 
 /** The desk, then the sections of the open study. */
 export function sections(): Signal<readonly Section[]> {
@@ -26,7 +26,7 @@ export function sections(): Signal<readonly Section[]> {
 function studySections(studyId: string): readonly Section[] {
   const study = ['/studies', studyId];
   return [
-    { name: 'Study', initials: 'S', link: study, exact: true, key: 'S' },
+    { name: 'Study', initials: 'St', link: study, exact: true, key: 'S' },
     { name: 'Data', initials: 'Da', link: [...study, 'data'], exact: false, key: 'T' },
     { name: 'Code book', initials: 'Co', link: [...study, 'code-book'], exact: false, key: 'B' },
     { name: 'Analyses', initials: 'An', link: [...study, 'analyses'], exact: false, key: 'A' },
