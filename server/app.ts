@@ -26,6 +26,7 @@ export function createApp(dependencies: Dependencies): Application {
   const sessions = createSessions(dependencies, verifyCredentials);
   const app = express();
   app.disable('x-powered-by');
+  app.disable('etag');
   app.set('trust proxy', config.trustedProxies);
   app.use(securityHeaders(config));
   app.use(compression());

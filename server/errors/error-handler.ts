@@ -4,24 +4,28 @@ import type { Configuration } from '../config';
 import { sendProblem } from './problem';
 import type { ServerIssue } from './server-issue';
 import { sizeInWords } from './size-in-words';
+import { storageIssue } from './storage-issue';
 
 /** Where a bug is written down. */
 export type ErrorLog = (message: string, problem: unknown) => void;
 
-/** The one place where an exception becomes an answer. What it does not know is a bug: 500. */
+/**
+ * The one place where an exception becomes an answer. Faults of a request are the client's; what
+ * the machine or a bug caused is written to the log, and a bug shows nothing of itself: 500.
+ */
 export function errorHandler(config: Configuration, log: ErrorLog): ErrorRequestHandler {
   return (problem: unknown, request, response, next) => {
-    const issue = knownIssue(problem, config);
-    if (issue === null) log(`${request.method} ${request.path} failed`, problem);
+    const fault = requestIssue(problem, config);
+    if (fault === null) log(`${request.method} ${request.path} failed`, problem);
     if (response.headersSent) {
       next(problem);
       return;
     }
-    sendProblem(response, issue ?? { code: 'unexpected' });
+    sendProblem(response, fault ?? { code: storageIssue(problem) ?? 'unexpected' });
   };
 }
 
-function knownIssue(problem: unknown, config: Configuration): ServerIssue | null {
+function requestIssue(problem: unknown, config: Configuration): ServerIssue | null {
   if (problem instanceof MulterError) return multipartIssue(problem, config);
   switch (bodyParserType(problem)) {
     case 'entity.too.large':

@@ -216,10 +216,20 @@ export const ISSUES = {
     title: 'Something went wrong on the server; it has been written to its log.',
     wayOut: 'Try again. If it happens again, tell whoever runs this server.',
   },
-  notServing: {
+  databaseBusy: {
     status: 503,
-    title: 'The server is about to stop.',
+    title: 'Another program holds the database; nothing was stored.',
     wayOut: 'Try again in a moment.',
+  },
+  diskFull: {
+    status: 507,
+    title: 'The disk of the server is full; nothing was stored.',
+    wayOut: 'Tell whoever runs this server, and try again when there is room.',
+  },
+  diskReadOnly: {
+    status: 503,
+    title: 'The disk of the server cannot be written; nothing was stored.',
+    wayOut: 'Tell whoever runs this server.',
   },
 } as const satisfies Record<string, IssueAnswer>;
 

@@ -1,5 +1,6 @@
 import { readdir } from 'node:fs/promises';
 import { join } from 'node:path';
+import sqlite3 from 'sqlite3';
 import * as z from 'zod';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { problemSchema } from '#shared/api';
@@ -86,6 +87,36 @@ describe('a refusal', () => {
     await own.close();
   });
 });
+
+describe('a database that another program holds', () => {
+  it('is said plainly, nothing is half stored, and it recovers by itself', async () => {
+    const own = await startTestApplication();
+    const theirs = await own.signedIn(await own.addPerson());
+    const { dataDirectory } = own.dependencies.config;
+    const outside = new sqlite3.Database(join(dataDirectory, 'evenhand.sqlite'));
+    const request = { title: 'T', design: 'cohort', peopleNoun: 'people' };
+    await execute(outside, 'BEGIN IMMEDIATE');
+    const refused = await theirs.post('/api/studies', request);
+    expect(refused.body).toMatchObject({ status: 503, code: 'databaseBusy' });
+    expect((await theirs.get('/api/studies')).body).toEqual([]);
+    await execute(outside, 'COMMIT');
+    expect((await theirs.post('/api/studies', request)).status).toBe(201);
+    await new Promise((resolve) => {
+      outside.close(resolve);
+    });
+    expect(own.bugs[0]).toBe('POST /api/studies failed');
+    await own.close();
+  });
+});
+
+function execute(database: sqlite3.Database, statement: string): Promise<void> {
+  return new Promise((resolve, reject) => {
+    database.exec(statement, (problem) => {
+      if (problem === null) resolve();
+      else reject(problem);
+    });
+  });
+}
 
 describe('hostile bodies', () => {
   it.each([
