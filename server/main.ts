@@ -11,6 +11,7 @@ process.umask(0o077);
 try {
   const config = readConfiguration(process.env);
   console.log(`Data: ${config.dataDirectory}`);
+  console.log('Database: opening, and bringing its tables up to date …');
   const dependencies = await openDependencies(config);
   const server = await serve(dependencies);
   for (const line of await welcome(dependencies)) console.log(line);
