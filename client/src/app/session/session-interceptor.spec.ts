@@ -10,6 +10,7 @@ import { of, throwError } from 'rxjs';
 import { beforeEach, expect, it, vi } from 'vitest';
 import { problemInterceptor } from '../server-api/problem-interceptor';
 import { sessionInterceptor } from './session-interceptor';
+import { SessionStore } from './session-store';
 import { SignInAgain } from './sign-in-again';
 
 let http: HttpClient;
@@ -71,6 +72,20 @@ it('renews a token that another tab has replaced, and repeats with the new one',
   const repeated = server.expectOne('/api/work');
   expect(repeated.request.headers.get('X-XSRF-TOKEN')).toBe('new');
   repeated.flush({ saved: true });
+  expect(answer).toHaveBeenCalledOnce();
+});
+
+it('asks for the password when the token is gone because the session is', () => {
+  ask.mockReturnValue(of(true));
+  const store = TestBed.inject(SessionStore);
+  store.refresh().subscribe();
+  server.expectOne('/api/session').flush({ person: { email: 'ines@example.org' } });
+  const { answer } = send();
+  refuse('forgedRequest', 403);
+  server.expectOne('/api/session').flush({ person: null });
+  expect(ask).toHaveBeenCalledOnce();
+  expect(store.person()?.email).toBe('ines@example.org');
+  server.expectOne('/api/work').flush({ saved: true });
   expect(answer).toHaveBeenCalledOnce();
 });
 

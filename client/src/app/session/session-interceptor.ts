@@ -5,8 +5,9 @@ import {
   HttpXsrfTokenExtractor,
 } from '@angular/common/http';
 import { inject, Injector } from '@angular/core';
-import { catchError, mergeMap, type Observable, throwError } from 'rxjs';
+import { catchError, mergeMap, type Observable, of, throwError } from 'rxjs';
 import { ApiProblem } from '../server-api/api-problem';
+import { SessionApi } from '../server-api/session-api';
 import { SessionStore } from './session-store';
 import { SignInAgain } from './sign-in-again';
 
@@ -29,17 +30,29 @@ export const sessionInterceptor: HttpInterceptorFn = (request, next) => {
 function recovered(failure: unknown, injector: Injector): Observable<unknown> {
   const code = failure instanceof ApiProblem ? failure.code : '';
   if (code === 'signInNeeded') return injector.get(SignInAgain).ask(failure);
-  if (code === 'forgedRequest') return injector.get(SessionStore).refresh();
+  if (code === 'forgedRequest') return tokenRenewed(failure, injector);
   return throwError(() => failure);
 }
 
-/** The header was set before this interceptor saw the request. */
+/** Reading the session renews the token; it also tells whether the session is still there. */
+function tokenRenewed(failure: unknown, injector: Injector): Observable<unknown> {
+  const wasSignedIn = injector.get(SessionStore).person() !== null;
+  return injector
+    .get(SessionApi)
+    .read()
+    .pipe(
+      mergeMap(({ person }) =>
+        wasSignedIn && person === null ? injector.get(SignInAgain).ask(failure) : of(person),
+      ),
+    );
+}
+
+/** The header was set, or left out, before this interceptor saw the request. */
 function withPresentToken(
   request: HttpRequest<unknown>,
   injector: Injector,
 ): Parameters<HttpHandlerFn>[0] {
   const token = injector.get(HttpXsrfTokenExtractor).getToken();
-  return token === null || !request.headers.has(TOKEN_HEADER)
-    ? request
-    : request.clone({ setHeaders: { [TOKEN_HEADER]: token } });
+  const needsNone = token === null || ['GET', 'HEAD'].includes(request.method);
+  return needsNone ? request : request.clone({ setHeaders: { [TOKEN_HEADER]: token } });
 }
