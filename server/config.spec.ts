@@ -47,6 +47,7 @@ describe('the configuration', () => {
     [{ PORT: '1.5' }, 'PORT must be a whole number'],
     [{ EVENHAND_PUBLIC_URL: 'reports' }, 'EVENHAND_PUBLIC_URL must be an address'],
     [{ EVENHAND_PUBLIC_URL: 'ftp://reports' }, 'EVENHAND_PUBLIC_URL must be an address'],
+    [{ EVENHAND_SMTP_URL: 'mail.example.org' }, 'EVENHAND_SMTP_URL must be an address'],
     [{ EVENHAND_TRUSTED_PROXIES: '-1' }, 'EVENHAND_TRUSTED_PROXIES must be'],
     [{ EVENHAND_DEMONSTRATION: 'maybe' }, 'EVENHAND_DEMONSTRATION must be yes or no'],
   ])('refuses %o in plain words', (environment, message) => {

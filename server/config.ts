@@ -57,7 +57,7 @@ export function readConfiguration(
     dataDirectory: resolve(environment.EVENHAND_DATA ?? join(root, 'data')),
     clientDirectory: join(root, 'dist', 'client'),
     templatesDirectory: join(root, 'templates'),
-    smtpUrl: filled(environment.EVENHAND_SMTP_URL),
+    smtpUrl: smtpUrl(environment.EVENHAND_SMTP_URL),
     mailSender: filled(environment.EVENHAND_MAIL_FROM) ?? 'Evenhand <evenhand@localhost>',
     trustedProxies: wholeNumber(environment, 'EVENHAND_TRUSTED_PROXIES', proxies(address), 16),
     ...DEFAULT_LIMITS,
@@ -84,6 +84,12 @@ function publicUrl(given: string | undefined, port: number): string {
     throw new Error(`EVENHAND_PUBLIC_URL must be an address such as https://reports.example.org.`);
   }
   return address.replace(/\/+$/, '');
+}
+
+function smtpUrl(given: string | undefined): string | null {
+  const address = filled(given);
+  if (address === null || /^smtps?:\/\/[^/]/.test(address)) return address;
+  throw new Error('EVENHAND_SMTP_URL must be an address such as smtp://mail.example.org:587.');
 }
 
 /** The server itself speaks plain HTTP, so that an https address means a proxy before it. */

@@ -1,5 +1,6 @@
 import { createHmac, timingSafeEqual } from 'node:crypto';
 import type { Request, RequestHandler, Response } from 'express';
+import type { Configuration } from '../config';
 import type { Dependencies } from '../dependencies';
 import { sendProblem } from '../errors/problem';
 import { personOf } from './person-of';
@@ -39,15 +40,20 @@ export function issueForgeryToken(
 }
 
 function isGenuine(request: Request, dependencies: Dependencies): boolean {
-  return comesFromHere(request) && carriesToken(request, dependencies.secrets.forgery);
+  return (
+    comesFromHere(request, dependencies.config) &&
+    carriesToken(request, dependencies.secrets.forgery)
+  );
 }
 
-function comesFromHere(request: Request): boolean {
+/** A proxy may change the name that the server is called by, so the public one counts as well. */
+function comesFromHere(request: Request, { publicUrl }: Configuration): boolean {
   const site = request.get('sec-fetch-site');
   if (site !== undefined) return site === 'same-origin' || site === 'none';
   const origin = request.get('origin');
   if (origin === undefined) return true;
-  return URL.canParse(origin) && new URL(origin).host === request.get('host');
+  const names = [request.get('host'), new URL(publicUrl).host];
+  return URL.canParse(origin) && names.includes(new URL(origin).host);
 }
 
 function carriesToken(request: Request, key: Buffer): boolean {

@@ -268,7 +268,12 @@ describe('the token against forged requests', () => {
     expect((await from('Sec-Fetch-Site', 'same-site')).status).toBe(403);
     expect((await from('Origin', 'https://elsewhere.example')).status).toBe(403);
     expect((await from('Origin', 'null')).status).toBe(403);
+    expect((await from('Origin', 'http://localhost:4601')).status).toBe(403);
     expect((await from('Sec-Fetch-Site', 'same-origin')).status).toBe(204);
+    const proxied = await application.signedIn(await application.addPerson());
+    const origin = application.dependencies.config.publicUrl;
+    const response = await proxied.delete('/api/session').set('Origin', origin);
+    expect(response.status).toBe(204);
   });
 });
 
