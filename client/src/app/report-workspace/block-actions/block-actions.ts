@@ -34,7 +34,7 @@ export class BlockActions {
   mayChangeKind(kindId: string): boolean {
     const kind = blockKindOf(kindId);
     const rights = kind.ok ? kind.value.rights : 'words';
-    return this.study.may(ACTIONS[rights]);
+    return this.state.isOpen() && this.study.may(ACTIONS[rights]);
   }
 
   mayChange(blockId: string): boolean {

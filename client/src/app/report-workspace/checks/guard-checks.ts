@@ -63,7 +63,10 @@ function check(
 ): ProofCheck {
   const [first, ...others] = same as readonly [GuardFinding, ...GuardFinding[]];
   const { title, sentence } = guardWords(first, pin, houseStyle, phrasebook);
-  const more = others.length === 0 ? '' : ` ${counted(others.length, 'place', 'places')} more.`;
+  const more =
+    others.length === 0
+      ? ''
+      : ` The same at ${counted(others.length, 'other place', 'other places')}.`;
   const weight = WEIGHTS[first.severity];
   return {
     id: `${blockId}/guard/${pin.analysisId}/${guardId}`,

@@ -67,7 +67,8 @@ function nameOf(
 ): string {
   if (others.length > 0) return [only, ...others].map((pin) => pin.number).join(' and ');
   const contrast = onlyContrast(addresses);
-  return `${only.number}, ${contrast === null ? only.name : scopeWords(contrast.scope, only)}`;
+  const place = contrast === null ? only.name : lowered(scopeWords(contrast.scope, only));
+  return `${only.number}, ${place}`;
 }
 
 function linesOf(
@@ -141,13 +142,18 @@ export function inStepWith(
   printed: PrintedBlock,
   others: Iterable<readonly [string, PrintedBlock]>,
 ): CaptionedElement | null {
-  const own = new Map(printed.bound.map(({ address, text }) => [addressKey(address), text]));
+  const own = new Map(printed.bound.map(({ address, text }) => [addressKey(address), bare(text)]));
   for (const [, other] of others) {
     const captioned = other.elements.find(hasCaption);
     if (captioned === undefined || other === printed) continue;
     const shared = other.bound.filter(({ address }) => own.has(addressKey(address)));
-    const agree = shared.every(({ address, text }) => own.get(addressKey(address)) === text);
+    const agree = shared.every(({ address, text }) => own.get(addressKey(address)) === bare(text));
     if (shared.length > 0 && agree) return captioned;
   }
   return null;
+}
+
+/** Figures without the signs that a table's head says once for all of its cells. */
+function bare(text: string): string {
+  return text.replace(/^\+|\s*%$/gu, '');
 }

@@ -1,12 +1,14 @@
 import { computed, inject, Injectable, signal } from '@angular/core';
 import type { RunOrigin } from '#shared/layout';
 import { CurrentStudy } from '../../session/current-study';
+import { ReportState } from '../report-store/report-state';
 import { ReportStore } from '../report-store/report-store';
 
 /** What this person has in hand on the proof: a block, a text, a note. Nobody else sees it. */
 @Injectable()
 export class ProofDesk {
   private readonly store = inject(ReportStore);
+  private readonly state = inject(ReportState);
   private readonly study = inject(CurrentStudy);
   private readonly chosen = signal<string | null>(null);
   private readonly opened = signal<string | null>(null);
@@ -24,7 +26,9 @@ export class ProofDesk {
 
   /** Whether this person may add any block at all. */
   readonly mayAdd = computed(
-    () => this.study.may('editWordsBlocks') || this.study.may('editNumbersBlocks'),
+    () =>
+      this.state.isOpen() &&
+      (this.study.may('editWordsBlocks') || this.study.may('editNumbersBlocks')),
   );
   /** The block that the Tab key stops at. */
   readonly tabStop = computed(() => this.selected() ?? this.store.blocks()[0]?.id ?? null);

@@ -41,7 +41,9 @@ export class ProofSlug {
   protected readonly inks = ['lv1', 'lv2', 'lv3', 'lv4', 'lv5', 'ct2', 'ct3', 'ct4'].map(
     (name) => `var(--${name})`,
   );
-  protected readonly mayChooseStyle = computed(() => this.study.may('editHouseStyle'));
+  protected readonly mayChooseStyle = computed(
+    () => this.state.isOpen() && this.study.may('editHouseStyle'),
+  );
   protected readonly cuts = computed(() => {
     const pins = [...this.state.pins().values()];
     return [...new Set(pins.map(({ cut }) => `Cut ${cut.number}, ${shortDate(cut.dataDate)}`))];

@@ -8,12 +8,14 @@ import { BlockActions } from '../block-actions/block-actions';
 import { FRAMING_PATH, hasFraming, ownFraming } from '../block-editors/block-content';
 import { ProofDesk } from '../proof/proof-desk';
 import { ReportProof } from '../proof/report-proof';
+import { ReportState } from '../report-store/report-state';
 import { ReportStore } from '../report-store/report-store';
 
 /** What leads in the effects of the report, and which blocks differ. */
 @Injectable()
 export class ReportFraming {
   private readonly store = inject(ReportStore);
+  private readonly state = inject(ReportState);
   private readonly actions = inject(BlockActions);
   private readonly desk = inject(ProofDesk);
   private readonly proof = inject(ReportProof);
@@ -21,7 +23,7 @@ export class ReportFraming {
   private readonly announcer = inject(LiveAnnouncer);
 
   readonly framing = computed(() => this.store.report()?.framing ?? 'both');
-  readonly maySet = computed(() => this.study.may('setFraming'));
+  readonly maySet = computed(() => this.state.isOpen() && this.study.may('setFraming'));
   readonly differing = computed(() =>
     this.store.blocks().filter((block) => {
       const own = ownFraming(block);

@@ -1,7 +1,7 @@
 import { computed, Injectable, signal } from '@angular/core';
 import type { DraftView, ReportView } from '#shared/api';
 import type { HouseStyle } from '#shared/house-style';
-import type { PinnedAnalysis, Report } from '#shared/report';
+import type { PinnedAnalysis, Report, ReportStage } from '#shared/report';
 import { openSharedReport, type SharedReport } from './shared-report';
 
 /** Where a report is found. */
@@ -25,6 +25,11 @@ export class ReportState {
 
   /** The report as this person sees it. */
   readonly report = computed(() => this.shared()?.local.report ?? null);
+  /** Whether the report's stage lets anybody change it. */
+  readonly isOpen = computed(() => {
+    const report = this.report();
+    return report !== null && OPEN_STAGES.includes(report.stage);
+  });
   readonly pending = computed(() => this.shared()?.pending ?? []);
   readonly conflicts = computed(() => this.shared()?.conflicts ?? []);
   readonly houseStyle = computed(() => this.styleOf(this.report()));
@@ -85,6 +90,8 @@ export class ReportState {
     );
   }
 }
+
+const OPEN_STAGES: readonly ReportStage[] = ['drafting', 'inReview'];
 
 function latestOf(
   analysisId: string,

@@ -86,6 +86,16 @@ describe('undo', () => {
     });
   });
 
+  it('leaves the pin that came with the action', () => {
+    const pin = { kind: 'movePin', analysisId: 'a', resultId: 'r1' } as const;
+    const chain = chainOf(
+      made('pin', pin, 'g'),
+      made('1', { kind: 'removeBlock', blockId: 'p' }, 'g'),
+    );
+    const steps = undoSteps(chain, 'g', apply);
+    expect(steps.ok && steps.value.map(({ undoes }) => undoes)).toEqual(['1']);
+  });
+
   it('puts back a block that was taken out', () => {
     const chain = chainOf(made('1', { kind: 'removeBlock', blockId: 'p' }, 'g'));
     expect(undone(chain, 'g').blocks.find(({ id }) => id === 'p')?.removedAt).toBeNull();

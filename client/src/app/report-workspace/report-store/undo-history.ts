@@ -42,8 +42,13 @@ export function undoSteps(
   const first = chain.links.findIndex((link) => link.groupId === groupId);
   if (first === -1) return failure('nothingToUndo');
   if (crossesBarrier(chain.links.slice(first), groupId)) return failure('numbersMovedSince');
-  const group = chain.links.filter((link) => link.groupId === groupId).toReversed();
-  return takenBack(chain, group, apply);
+  const group = chain.links.filter((link) => link.groupId === groupId && isUndone(link));
+  return takenBack(chain, group.toReversed(), apply);
+}
+
+/** Pins move by themselves: one that came with a block stays when the block goes. */
+function isUndone({ step }: ChainLink): boolean {
+  return step.kind !== 'movePin';
 }
 
 function takenBack(
