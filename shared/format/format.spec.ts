@@ -10,12 +10,12 @@ import {
   intervalLabel,
   joinLimits,
   MINUS,
-  NARROW_NO_BREAK_SPACE,
   NO_BREAK_SPACE,
   withPercentSign,
   decimalsUnder,
   type PrecisionBasis,
 } from './index';
+import { NARROW_NO_BREAK_SPACE } from './number-text';
 import { percentDecimals } from './percent-decimals';
 import { OPEN_CLINICAL, styleWith } from './testing/house-style';
 

@@ -14,7 +14,7 @@ export function writeDecimal(
 }
 
 /** The digits on both sides of the decimal mark, without sign. */
-export function digitsOf({ units, decimals }: Decimal): { whole: string; fraction: string } {
+function digitsOf({ units, decimals }: Decimal): { whole: string; fraction: string } {
   const size = (units < 0n ? -units : units).toString().padStart(decimals + 1, '0');
   const cut = size.length - decimals;
   return { whole: size.slice(0, cut), fraction: size.slice(cut) };

@@ -2,6 +2,7 @@ import { intervalLabel } from '#shared/format';
 import type { Framing, PhrasePart } from '../phrase';
 import { fillPattern, joinParts, type SlotFilling } from '../phrasebook/fill-pattern';
 import { countInText } from './counts';
+import { moreDifference, moreRelative, unstratified } from './additions';
 import { bracketed, detailOf, measureName, testDetail } from './details';
 import { differenceWords, type DifferenceWords } from './difference';
 import { countedGroup, groupPart } from './groups';
@@ -32,20 +33,13 @@ function relativeMore(
   return context.claim.design === 'trial' && difference ? moreDifference(context, difference) : [];
 }
 
-function moreDifference(
-  { book }: WordingContext,
-  { signedSize, signedInterval }: DifferenceWords,
-): readonly PhrasePart[] {
-  return fillPattern(book, 'more.difference', { size: signedSize, detail: signedInterval });
-}
-
 function absoluteSentence(
   context: WordingContext,
   difference: DifferenceWords,
   relative: { readonly ratio: RatioWords | null } | null,
 ): readonly PhrasePart[] {
   const more = joinParts([
-    relative ? moreRelative(context, relative.ratio, difference.isUnclear) : [],
+    relative ? moreRelative(context, relative.ratio, difference) : [],
     unstratified(context),
   ]);
   if (difference.isUnclear) {
@@ -155,38 +149,6 @@ function ratioEstimate(context: WordingContext, ratio: RatioWords): readonly Phr
     change: ratio.change,
     detail: bracketed(context, [...named, testDetail(context)]),
   });
-}
-
-/** The relative side behind the absolute one. */
-function moreRelative(
-  context: WordingContext,
-  ratio: RatioWords | null,
-  absoluteIsUnclear: boolean,
-): readonly PhrasePart[] {
-  const { book } = context;
-  const name = measureName(context, 'riskRatio');
-  if (!ratio) {
-    const reason = reasonOf(context, 'riskRatio');
-    return fillPattern(book, 'more.ratioNotEstimable', { ratio: name, reason });
-  }
-  if (absoluteIsUnclear || ratio.form === 'named') {
-    return fillPattern(book, 'more.ratio', { name, value: ratio.value, detail: ratio.interval });
-  }
-  const statistics = ratio.form === 'percent' ? [ratio.named, ratio.interval] : [ratio.interval];
-  const detail = detailOf(context, statistics);
-  return fillPattern(book, 'more.relative', { change: ratio.change, detail });
-}
-
-/** A pooled effect is no comparison of the crude risks; they are given apart and called so. */
-function unstratified(context: WordingContext): readonly PhrasePart[] {
-  const { claim, book } = context;
-  return claim.scope.kind === 'pooled'
-    ? fillPattern(book, 'more.unstratified', {
-        indexCount: countInText(context, claim.index),
-        referenceCount: countInText(context, claim.reference),
-        verb: verbWords(claim.outcome, book),
-      })
-    : [];
 }
 
 function ratioMissing(
