@@ -3,6 +3,7 @@ import { compile, type TopLevelSpec } from 'vega-lite';
 import { groupedBarSpec, vegaTextWidth } from '#shared/figures';
 import type { FigureAppearance } from '#shared/figures';
 import type { FigureModel } from '#shared/layout';
+import { printableFigure } from './printable-figure';
 
 /** Draws a figure as an SVG with live text. */
 export async function figureSvg(
@@ -10,7 +11,7 @@ export async function figureSvg(
   appearance: FigureAppearance,
 ): Promise<string> {
   measureText();
-  const spec = SPECS[figure.kind](figure, appearance);
+  const spec = SPECS[figure.kind](printableFigure(figure), appearance);
   const view = new vega.View(vega.parse(compile(spec).spec), { renderer: 'none' });
   try {
     return await view.toSVG();

@@ -52,7 +52,6 @@ export function drawNotes(
     return new Paragraph({
       style: PARAGRAPH_STYLES.tableNote,
       keepNext: index < notes.length - 1,
-      suppressLineNumbers: true,
       ...(index === notes.length - 1 ? { spacing: { after: SPACE_AFTER_NOTES } } : {}),
       children: [...drawRuns(note, bookmarks)],
     });
@@ -86,7 +85,6 @@ function captionParagraph(
   return new Paragraph({
     style: PARAGRAPH_STYLES.caption,
     keepNext,
-    suppressLineNumbers: true,
     spacing: { before },
     children: [...children],
   });

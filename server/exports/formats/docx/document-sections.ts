@@ -45,7 +45,6 @@ function opened(title: string, request: ExportRequest): readonly FileChild[] {
     ...lines.map((line, index) => {
       return new Paragraph({
         style: PARAGRAPH_STYLES.draft,
-        suppressLineNumbers: true,
         ...(index === lines.length - 1 ? { spacing: { after: 280 } } : {}),
         children: [...textRuns(line)],
       });
@@ -103,7 +102,6 @@ function edgeParagraph(children: readonly TextRun[]): Paragraph {
   return new Paragraph({
     style: PARAGRAPH_STYLES.draft,
     alignment: AlignmentType.RIGHT,
-    suppressLineNumbers: true,
     children: [...children],
   });
 }

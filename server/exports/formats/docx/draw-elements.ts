@@ -1,7 +1,7 @@
 import { HeadingLevel, ImageRun, Paragraph, type FileChild } from 'docx';
 import type { HeadingElement, LayoutElement } from '#shared/layout';
 import { drawElement, type Drawing, type ElementOf } from '../../drawing';
-import { printableText } from '../../printable-text';
+import { printableLine } from '../../printable-text';
 import { continuation, drawCaption, drawNotes, SPACE_AFTER_NOTES } from './captions';
 import type { DocumentContext } from './document-context';
 import { PARAGRAPH_STYLES } from './document-styles';
@@ -117,7 +117,6 @@ function drawPicture(
   return new Paragraph({
     style: PARAGRAPH_STYLES.figure,
     keepNext,
-    suppressLineNumbers: true,
     ...(keepNext ? {} : { spacing: { after: SPACE_AFTER_NOTES } }),
     children: [
       new ImageRun({
@@ -127,7 +126,7 @@ function drawPicture(
         transformation: { width, height },
         altText: {
           name: `${label} ${String(number)}`,
-          description: printableText(element.altText),
+          description: printableLine(element.altText),
         },
       }),
     ],

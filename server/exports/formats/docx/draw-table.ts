@@ -37,7 +37,10 @@ export function drawTableGrid(
   { setting, notesFollow }: GridPlace,
   context: DocumentContext,
 ): Table {
-  const widths = columnWidths(table, setting, context.houseStyle).map(twips);
+  // Rounded down, so that a table never reaches past the margin.
+  const widths = columnWidths(table, setting, context.houseStyle).map((width) =>
+    Math.floor(width * 20),
+  );
   const drawing: TableDrawing = { table, setting, notesFollow, context, widths };
   return new Table({
     width: { size: sum(drawing.widths), type: WidthType.DXA },

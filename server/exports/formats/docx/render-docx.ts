@@ -13,7 +13,7 @@ import { documentStyles } from './document-styles';
 import { drawElements } from './draw-elements';
 import { listNumbering } from './draw-list';
 import { textWidthInPoints } from './page-setup';
-import { steadyDocument } from './steady-document';
+import { finishDocument } from './finish-document';
 import type { Bookmarks } from './text-runs';
 
 /** Makes a Word document of a composed report. */
@@ -34,7 +34,7 @@ export async function renderDocx(request: ExportRequest): Promise<Uint8Array> {
   });
   const { changedAt } = request;
   const { language } = houseStyle;
-  return steadyDocument(await Packer.toBuffer(document), { changedAt, language });
+  return finishDocument(await Packer.toBuffer(document), { changedAt, language });
 }
 
 async function contextOf(request: ExportRequest): Promise<DocumentContext> {

@@ -1,5 +1,6 @@
 import { strFromU8, strToU8 } from 'fflate';
 import { fixedZip, openZip, type ZipParts } from '../../fixed-zip';
+import { PARAGRAPH_STYLES } from './document-styles';
 
 /** What a document says about itself beside its text. */
 export interface DocumentFacts {
@@ -9,10 +10,10 @@ export interface DocumentFacts {
 }
 
 /**
- * Takes out of a document what differs from one making to the next: the moment, ids from counters
- * that never start again, and the random ids of links.
+ * Takes out of a document what differs from one making to the next (the moment, ids from counters
+ * that never start again, the random ids of links), and adds what the library has no word for.
  */
-export function steadyDocument(bytes: Uint8Array, facts: DocumentFacts): Uint8Array {
+export function finishDocument(bytes: Uint8Array, facts: DocumentFacts): Uint8Array {
   const parts = openZip(bytes);
   const body = textOf(parts, BODY);
   const links = linkIds(body);
@@ -21,12 +22,14 @@ export function steadyDocument(bytes: Uint8Array, facts: DocumentFacts): Uint8Ar
     [BODY]: strToU8(steadyIds(body, links)),
     [RELATIONS]: strToU8(withLinkIds(textOf(parts, RELATIONS), links)),
     [PROPERTIES]: strToU8(withFacts(textOf(parts, PROPERTIES), facts)),
+    [STYLES]: strToU8(withUnnumberedStyles(textOf(parts, STYLES))),
   });
 }
 
 const BODY = 'word/document.xml';
 const RELATIONS = 'word/_rels/document.xml.rels';
 const PROPERTIES = 'docProps/core.xml';
+const STYLES = 'word/styles.xml';
 
 function textOf(parts: ZipParts, path: string): string {
   const part = parts[path];
@@ -72,3 +75,17 @@ function withFacts(properties: string, { changedAt, language }: DocumentFacts): 
     .replace(/(<dcterms:(?:created|modified)[^>]*>)[^<]*/g, (_, tag: string) => tag + seconds)
     .replace('</cp:coreProperties>', `<dc:language>${language}</dc:language>$&`);
 }
+
+/** Lines are numbered for reviewers of the text; what stands around it has no numbers. */
+function withUnnumberedStyles(styles: string): string {
+  return styles.replace(/<w:style [^>]*w:styleId="(\w+)".*?<\/w:style>/g, (style, id: string) =>
+    UNNUMBERED.has(id) ? style.replace('<w:spacing ', '<w:suppressLineNumbers/>$&') : style,
+  );
+}
+
+const UNNUMBERED: ReadonlySet<string> = new Set([
+  PARAGRAPH_STYLES.caption,
+  PARAGRAPH_STYLES.tableNote,
+  PARAGRAPH_STYLES.figure,
+  PARAGRAPH_STYLES.draft,
+]);
