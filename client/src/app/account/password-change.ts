@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, inject, signal } from '@angular/cor
 import { FormControl, FormGroup, ReactiveFormsModule, Validators } from '@angular/forms';
 import { ApiProblem } from '../server-api/api-problem';
 import { SessionApi } from '../server-api/session-api';
+import { FocusProblem } from '../ui/field/focus-problem';
 import { FormProblems } from '../ui/field/form-problems';
 import { PASSWORD_HELP, PASSWORD_MESSAGES, PASSWORD_VALIDATORS } from '../ui/password/new-password';
 import { PasswordInput } from '../ui/password/password-input';
@@ -11,7 +12,7 @@ import { ProblemPanel } from '../ui/status/problem-panel';
 /** Changes the password of whoever is signed in. */
 @Component({
   selector: 'eh-password-change',
-  imports: [PasswordInput, ProblemPanel, ReactiveFormsModule],
+  imports: [FocusProblem, PasswordInput, ProblemPanel, ReactiveFormsModule],
   templateUrl: './password-change.html',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })

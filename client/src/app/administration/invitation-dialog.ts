@@ -6,6 +6,7 @@ import { DialogFrame } from '../ui/dialog/dialog-frame';
 import { FormDialog } from '../ui/dialog/form-dialog';
 import { Field } from '../ui/field/field';
 import { FieldControl } from '../ui/field/field-control';
+import { FocusProblem } from '../ui/field/focus-problem';
 import { ProblemPanel } from '../ui/status/problem-panel';
 
 const ADDRESS_WANTED = 'Give an e-mail address such as name@example.org.';
@@ -13,7 +14,7 @@ const ADDRESS_WANTED = 'Give an e-mail address such as name@example.org.';
 /** Name and address of somebody new. */
 @Component({
   selector: 'eh-invitation-dialog',
-  imports: [DialogFrame, Field, FieldControl, ProblemPanel, ReactiveFormsModule],
+  imports: [DialogFrame, Field, FieldControl, FocusProblem, ProblemPanel, ReactiveFormsModule],
   templateUrl: './invitation-dialog.html',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })

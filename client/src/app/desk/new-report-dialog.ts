@@ -10,12 +10,13 @@ import { DialogFrame } from '../ui/dialog/dialog-frame';
 import { FormDialog } from '../ui/dialog/form-dialog';
 import { Field } from '../ui/field/field';
 import { FieldControl } from '../ui/field/field-control';
+import { FocusProblem } from '../ui/field/focus-problem';
 import { ProblemPanel } from '../ui/status/problem-panel';
 
 /** Study, title and house style of a new report. */
 @Component({
   selector: 'eh-new-report-dialog',
-  imports: [DialogFrame, Field, FieldControl, ProblemPanel, ReactiveFormsModule],
+  imports: [DialogFrame, Field, FieldControl, FocusProblem, ProblemPanel, ReactiveFormsModule],
   templateUrl: './new-report-dialog.html',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })

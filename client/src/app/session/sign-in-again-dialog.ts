@@ -7,6 +7,7 @@ import { DialogFrame } from '../ui/dialog/dialog-frame';
 import { DIALOG_SIZE } from '../ui/dialog/dialog-size';
 import { Field } from '../ui/field/field';
 import { FieldControl } from '../ui/field/field-control';
+import { FocusProblem } from '../ui/field/focus-problem';
 import { FormProblems } from '../ui/field/form-problems';
 import { SessionStore } from './session-store';
 
@@ -24,7 +25,7 @@ export async function askForPassword(injector: Injector): Promise<boolean> {
 /** One password field over the page; the page behind keeps what was typed. */
 @Component({
   selector: 'eh-sign-in-again-dialog',
-  imports: [DialogFrame, Field, FieldControl, ReactiveFormsModule],
+  imports: [DialogFrame, Field, FieldControl, FocusProblem, ReactiveFormsModule],
   templateUrl: './sign-in-again-dialog.html',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
@@ -42,7 +43,7 @@ export class SignInAgainDialog {
   });
 
   protected signIn(): void {
-    if (!this.problems.check()) return;
+    if (this.busy() || !this.problems.check()) return;
     this.busy.set(true);
     this.session.signIn({ email: this.email, ...this.form.getRawValue() }).subscribe({
       next: () => {

@@ -5,6 +5,7 @@ import { ApiProblem } from '../server-api/api-problem';
 import { SessionStore } from '../session/session-store';
 import { Field } from '../ui/field/field';
 import { FieldControl } from '../ui/field/field-control';
+import { FocusProblem } from '../ui/field/focus-problem';
 import { FormProblems } from '../ui/field/form-problems';
 import { ProblemPanel } from '../ui/status/problem-panel';
 import { PASSWORD_MESSAGES, PASSWORD_VALIDATORS } from '../ui/password/new-password';
@@ -24,7 +25,15 @@ const MESSAGES = {
 /** The first start without demonstration data: whoever started the server becomes administrator. */
 @Component({
   selector: 'eh-first-administrator-page',
-  imports: [Field, FieldControl, PasswordInput, ProblemPanel, ReactiveFormsModule, SignInLayout],
+  imports: [
+    Field,
+    FieldControl,
+    FocusProblem,
+    PasswordInput,
+    ProblemPanel,
+    ReactiveFormsModule,
+    SignInLayout,
+  ],
   templateUrl: './first-administrator-page.html',
   styleUrl: './sign-in-form.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -46,7 +55,7 @@ export class FirstAdministratorPage {
   protected readonly problems = new FormProblems(this.form, MESSAGES);
 
   protected create(): void {
-    if (!this.problems.check()) return;
+    if (this.busy() || !this.problems.check()) return;
     this.busy.set(true);
     this.session.createFirstAdministrator(this.form.getRawValue()).subscribe({
       next: () => void this.router.navigateByUrl('/desk'),

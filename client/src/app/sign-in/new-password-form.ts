@@ -3,6 +3,7 @@ import { FormControl, FormGroup, ReactiveFormsModule } from '@angular/forms';
 import { RouterLink } from '@angular/router';
 import { ApiProblem } from '../server-api/api-problem';
 import { SessionApi } from '../server-api/session-api';
+import { FocusProblem } from '../ui/field/focus-problem';
 import { FormProblems } from '../ui/field/form-problems';
 import { ProblemPanel } from '../ui/status/problem-panel';
 import { PASSWORD_MESSAGES, PASSWORD_VALIDATORS } from '../ui/password/new-password';
@@ -11,7 +12,7 @@ import { PasswordInput } from '../ui/password/password-input';
 /** Takes the new password of whoever followed the link of a mail. */
 @Component({
   selector: 'eh-new-password-form',
-  imports: [PasswordInput, ProblemPanel, ReactiveFormsModule, RouterLink],
+  imports: [FocusProblem, PasswordInput, ProblemPanel, ReactiveFormsModule, RouterLink],
   templateUrl: './new-password-form.html',
   styleUrl: './sign-in-form.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -28,7 +29,7 @@ export class NewPasswordForm {
   protected readonly problems = new FormProblems(this.form, { newPassword: PASSWORD_MESSAGES });
 
   protected save(): void {
-    if (!this.problems.check()) return;
+    if (this.busy() || !this.problems.check()) return;
     this.busy.set(true);
     const request = { token: this.token(), ...this.form.getRawValue() };
     this.api.completePasswordReset(request).subscribe({

@@ -12,6 +12,7 @@ import { ApiProblem } from '../server-api/api-problem';
 import { SessionApi } from '../server-api/session-api';
 import { Field } from '../ui/field/field';
 import { FieldControl } from '../ui/field/field-control';
+import { FocusProblem } from '../ui/field/focus-problem';
 import { FormProblems } from '../ui/field/form-problems';
 import { ProblemPanel } from '../ui/status/problem-panel';
 
@@ -20,7 +21,7 @@ const ADDRESS_WANTED = 'Give an e-mail address such as name@example.org.';
 /** Asks for the mail with the link. Says the same whether or not the address has an account. */
 @Component({
   selector: 'eh-request-reset-form',
-  imports: [Field, FieldControl, ProblemPanel, ReactiveFormsModule, RouterLink],
+  imports: [Field, FieldControl, FocusProblem, ProblemPanel, ReactiveFormsModule, RouterLink],
   templateUrl: './request-reset-form.html',
   styleUrl: './sign-in-form.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -46,7 +47,7 @@ export class RequestResetForm implements OnInit {
   }
 
   protected ask(): void {
-    if (!this.problems.check()) return;
+    if (this.busy() || !this.problems.check()) return;
     const request = this.form.getRawValue();
     this.busy.set(true);
     this.api.requestPasswordReset(request).subscribe({

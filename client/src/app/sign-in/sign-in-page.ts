@@ -14,6 +14,7 @@ import { ApiProblem } from '../server-api/api-problem';
 import { SessionStore } from '../session/session-store';
 import { Field } from '../ui/field/field';
 import { FieldControl } from '../ui/field/field-control';
+import { FocusProblem } from '../ui/field/focus-problem';
 import { FormProblems } from '../ui/field/form-problems';
 import { afterSignIn } from './after-sign-in';
 import { PasswordInput } from '../ui/password/password-input';
@@ -27,7 +28,15 @@ const MESSAGES = {
 /** Signing in, with the documented accounts at hand where the data are for demonstration. */
 @Component({
   selector: 'eh-sign-in-page',
-  imports: [Field, FieldControl, PasswordInput, ReactiveFormsModule, RouterLink, SignInLayout],
+  imports: [
+    Field,
+    FieldControl,
+    FocusProblem,
+    PasswordInput,
+    ReactiveFormsModule,
+    RouterLink,
+    SignInLayout,
+  ],
   templateUrl: './sign-in-page.html',
   styleUrls: ['./sign-in-form.scss', './sign-in-page.scss'],
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -59,7 +68,7 @@ export class SignInPage {
   }
 
   protected signIn(): void {
-    if (!this.problems.check()) return;
+    if (this.busy() || !this.problems.check()) return;
     this.busy.set(true);
     this.session.signIn(this.form.getRawValue()).subscribe({
       next: () => void this.router.navigateByUrl(afterSignIn(this.then() ?? null)),

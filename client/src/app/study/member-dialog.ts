@@ -8,6 +8,7 @@ import { DialogFrame } from '../ui/dialog/dialog-frame';
 import { FormDialog } from '../ui/dialog/form-dialog';
 import { Field } from '../ui/field/field';
 import { FieldControl } from '../ui/field/field-control';
+import { FocusProblem } from '../ui/field/focus-problem';
 import { ProblemPanel } from '../ui/status/problem-panel';
 import { ROLE_WORDS } from '../ui/words';
 
@@ -16,7 +17,7 @@ const ADDRESS_WANTED = 'Give an e-mail address such as name@example.org.';
 /** Address and role of a new member. */
 @Component({
   selector: 'eh-member-dialog',
-  imports: [DialogFrame, Field, FieldControl, ProblemPanel, ReactiveFormsModule],
+  imports: [DialogFrame, Field, FieldControl, FocusProblem, ProblemPanel, ReactiveFormsModule],
   templateUrl: './member-dialog.html',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })

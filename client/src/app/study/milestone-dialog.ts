@@ -8,6 +8,7 @@ import { FormDialog } from '../ui/dialog/form-dialog';
 import { Field } from '../ui/field/field';
 import { FieldControl } from '../ui/field/field-control';
 import { newId } from '../ui/new-id';
+import { FocusProblem } from '../ui/field/focus-problem';
 import { ProblemPanel } from '../ui/status/problem-panel';
 
 /** A milestone to change, or null for a new one. */
@@ -19,7 +20,7 @@ export interface MilestoneToEdit {
 /** Title and day of a milestone. */
 @Component({
   selector: 'eh-milestone-dialog',
-  imports: [DialogFrame, Field, FieldControl, ProblemPanel, ReactiveFormsModule],
+  imports: [DialogFrame, Field, FieldControl, FocusProblem, ProblemPanel, ReactiveFormsModule],
   templateUrl: './milestone-dialog.html',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })

@@ -11,6 +11,7 @@ import { FormDialog } from '../ui/dialog/form-dialog';
 import { Field } from '../ui/field/field';
 import { FieldControl } from '../ui/field/field-control';
 import { newId } from '../ui/new-id';
+import { FocusProblem } from '../ui/field/focus-problem';
 import { ProblemPanel } from '../ui/status/problem-panel';
 import { outcomeReads } from './outcome-reads';
 
@@ -28,7 +29,7 @@ const MESSAGES = {
 /** The words of an outcome, with the sentence that they will make. */
 @Component({
   selector: 'eh-outcome-dialog',
-  imports: [DialogFrame, Field, FieldControl, ProblemPanel, ReactiveFormsModule],
+  imports: [DialogFrame, Field, FieldControl, FocusProblem, ProblemPanel, ReactiveFormsModule],
   templateUrl: './outcome-dialog.html',
   styleUrl: './outcome-dialog.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -13,6 +13,9 @@ export class FormProblems {
   private readonly version = signal(0);
   private readonly refused = signal<ApiProblem | null>(null);
 
+  /** How often the form was sent and not accepted. */
+  readonly refusals = signal(0);
+
   /** What the server refused last. */
   readonly problem: Signal<ApiProblem | null> = this.refused.asReadonly();
 
@@ -44,6 +47,7 @@ export class FormProblems {
     this.refused.set(null);
     this.form.markAllAsTouched();
     this.version.update((version) => version + 1);
+    if (!this.form.valid) this.countRefusal();
     return this.form.valid;
   }
 
@@ -52,6 +56,11 @@ export class FormProblems {
     this.refused.set(problem);
     for (const field of problem.fields) this.form.get(field.path)?.markAsPristine();
     this.version.update((version) => version + 1);
+    this.countRefusal();
+  }
+
+  private countRefusal(): void {
+    this.refusals.update((count) => count + 1);
   }
 
   private refusedFor(name: string, control: AbstractControl | null): string | null {

@@ -8,6 +8,7 @@ import { DialogFrame } from '../dialog/dialog-frame';
 import { FormDialog } from '../dialog/form-dialog';
 import { Field } from '../field/field';
 import { FieldControl } from '../field/field-control';
+import { FocusProblem } from '../field/focus-problem';
 import { ProblemPanel } from '../status/problem-panel';
 import { DESIGN_WORDS } from '../words';
 
@@ -19,7 +20,7 @@ const MESSAGES = {
 /** Title, design and people of a study: a new one (data null), or one that is there. */
 @Component({
   selector: 'eh-study-details-dialog',
-  imports: [DialogFrame, Field, FieldControl, ProblemPanel, ReactiveFormsModule],
+  imports: [DialogFrame, Field, FieldControl, FocusProblem, ProblemPanel, ReactiveFormsModule],
   templateUrl: './study-details-dialog.html',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
