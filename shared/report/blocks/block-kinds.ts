@@ -36,10 +36,39 @@ export function parseContent(kindId: string, content: unknown): Result<unknown, 
   return kind.ok ? kind.value.parseContent(content) : kind;
 }
 
+/** A block's kind, and its content as that kind reads it. */
+export interface ReadBlock {
+  readonly kind: BlockKind;
+  readonly content: unknown;
+}
+
+/** Reads a block; contents never change, so that each is read once. */
+export function readBlock({
+  kind: kindId,
+  content,
+}: Pick<Block, 'kind' | 'content'>): Result<ReadBlock, ContentIssue> {
+  const known = typeof content === 'object' && content !== null ? KNOWN.get(content) : undefined;
+  if (known?.kindId === kindId) return known.read;
+  const kind = blockKindOf(kindId);
+  const read = kind.ok ? readAs(kind.value, content) : kind;
+  if (typeof content === 'object' && content !== null) KNOWN.set(content, { kindId, read });
+  return read;
+}
+
+function readAs(kind: BlockKind, content: unknown): Result<ReadBlock, ContentIssue> {
+  const parsed = kind.parseContent(content);
+  return parsed.ok ? success({ kind, content: parsed.value }) : parsed;
+}
+
 /** Ids of the analyses that a block shows; none where its content can't be read. */
 export function analysisIdsOf(block: Pick<Block, 'kind' | 'content'>): readonly string[] {
-  const kind = blockKindOf(block.kind);
-  if (!kind.ok) return [];
-  const content = kind.value.parseContent(block.content);
-  return content.ok ? kind.value.analysisIdsOf(content.value) : [];
+  const read = readBlock(block);
+  return read.ok ? read.value.kind.analysisIdsOf(read.value.content) : [];
 }
+
+interface KnownContent {
+  readonly kindId: string;
+  readonly read: Result<ReadBlock, ContentIssue>;
+}
+
+const KNOWN = new WeakMap<object, KnownContent>();

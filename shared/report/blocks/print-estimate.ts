@@ -2,6 +2,7 @@ import { numberOf, readValue } from '#shared/analysis';
 import type { AddressFacet, Quantity, ValueAddress } from '#shared/analysis';
 import type { EffectMeasureId } from '#shared/effects';
 import {
+  decimalsOf,
   DIFFERENCE_SCALES,
   formatCount,
   formatEstimate,
@@ -19,7 +20,6 @@ import { fillWords } from '#shared/wording';
 import type { PatternKey } from '#shared/wording';
 import type { BoundValueFormat } from '../text/text-document';
 import type { PrintedValue, ReadValue } from './print-value';
-import { printedDecimals } from './printed-decimals';
 
 /** A share of people: "20.9%", "34 of 163", "21 per 100", or with its limits. */
 export function printShare(value: ReadValue, format: BoundValueFormat): PrintedValue {
@@ -71,7 +71,7 @@ function printPer(value: ReadValue, unit: 'per100' | 'per1000'): PrintedValue {
 }
 
 function percentText({ result, address, quantity, houseStyle }: ReadValue): string | null {
-  const decimals = printedDecimals(result, houseStyle).percent;
+  const decimals = decimalsOf(result, houseStyle).percent;
   const figure =
     quantity.kind === 'fraction' && address.facet === 'value'
       ? formatShare(
@@ -96,7 +96,7 @@ function shareLimits(value: ReadValue): Pick<EstimateText, 'lower' | 'upper'> | 
   const lower = facet(value, 'lower');
   const upper = facet(value, 'upper');
   if (lower === null || upper === null) return null;
-  const decimals = printedDecimals(result, houseStyle).percent;
+  const decimals = decimalsOf(result, houseStyle).percent;
   const print = (limit: Quantity): NumberText => {
     const printed = formatShareLimit(numberOf(limit), decimals, houseStyle);
     return { ...printed, text: withPercentSign(printed.text, houseStyle) };
@@ -112,7 +112,7 @@ function estimateText(measure: EffectMeasureId, value: ReadValue): EstimateText 
   const { level } = result.specification;
   const interval = { lower: number(limits.lower), upper: number(limits.upper), level, method: '' };
   const estimate = { value: number(exact), interval };
-  const decimals = printedDecimals(result, houseStyle);
+  const decimals = decimalsOf(result, houseStyle);
   return formatEstimate(measure, { estimate, exact }, decimals, houseStyle);
 }
 

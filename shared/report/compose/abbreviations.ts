@@ -1,6 +1,4 @@
-import type { LayoutElement } from '#shared/layout';
 import type { Phrasebook } from '#shared/wording';
-import { runsOf } from './element-runs';
 
 /** An abbreviation with what it stands for. */
 export interface Abbreviation {
@@ -23,20 +21,30 @@ export function abbreviationsInTexts(
   texts: readonly string[],
   book: Phrasebook,
 ): readonly Abbreviation[] {
-  const words = new Set(texts.flatMap((text) => text.split(/[^\p{L}\p{N}]+/u)));
   return Object.entries(book.abbreviations)
-    .filter(([short]) => words.has(short))
+    .filter(([short]) => texts.some((text) => holdsWord(text, short)))
     .map(([short, long]) => ({ short, long }))
     .toSorted((one, other) => (one.short < other.short ? -1 : 1));
 }
 
-/** The abbreviations that a report uses anywhere, alphabetical. */
-export function abbreviationsOf(
-  elements: readonly LayoutElement[],
-  textsOf: (element: LayoutElement) => readonly string[],
-  book: Phrasebook,
+/** Each of these abbreviations once, alphabetical. */
+export function mergeAbbreviations(
+  lists: readonly (readonly Abbreviation[])[],
 ): readonly Abbreviation[] {
-  return abbreviationsInTexts(elements.flatMap(textsOf), book);
+  const merged = new Map(lists.flat().map((one) => [one.short, one]));
+  return [...merged.values()].toSorted((one, other) => (one.short < other.short ? -1 : 1));
+}
+
+function holdsWord(text: string, word: string): boolean {
+  for (let from = text.indexOf(word); from !== -1; from = text.indexOf(word, from + 1)) {
+    const [before, after] = [text.charAt(from - 1), text.charAt(from + word.length)];
+    if (!isWordCharacter(before) && !isWordCharacter(after)) return true;
+  }
+  return false;
+}
+
+function isWordCharacter(character: string): boolean {
+  return /^[\p{L}\p{N}]/u.test(character);
 }
 
 /**
@@ -47,7 +55,8 @@ export function markAbbreviations<Words extends { readonly text: string }>(
   words: Words,
   book: Phrasebook,
 ): readonly (Words & { readonly abbreviation?: string })[] {
-  const parts = words.text.split(/(?<![\p{L}\p{N}])(\p{Lu}{2,})(?![\p{L}\p{N}])/u);
+  if (!/[A-Z]{2}/u.test(words.text)) return [words];
+  const parts = words.text.split(/(?<![\p{L}\p{N}])([A-Z]{2,})(?![\p{L}\p{N}])/u);
   return parts
     .filter((text) => text !== '')
     .map((text) =>
@@ -55,9 +64,4 @@ export function markAbbreviations<Words extends { readonly text: string }>(
         ? { ...words, text, abbreviation: text }
         : { ...words, text },
     );
-}
-
-/** The texts of an element's runs. */
-export function textsOfElement(element: LayoutElement): readonly string[] {
-  return runsOf(element).map(({ text }) => text);
 }

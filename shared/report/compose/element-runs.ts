@@ -25,12 +25,24 @@ export function mapRuns(element: LayoutElement, map: (run: Run) => Run): LayoutE
 
 /** Every run of an element, in the order of reading. */
 export function runsOf(element: LayoutElement): readonly Run[] {
-  const found: Run[] = [];
-  mapRuns(element, (run) => {
-    found.push(run);
-    return run;
-  });
-  return found;
+  switch (element.kind) {
+    case 'heading':
+    case 'paragraph':
+      return element.runs;
+    case 'list':
+      return element.items.flatMap(({ runs }) => runs);
+    case 'table':
+      return [
+        ...element.caption.runs,
+        ...element.head.flatMap((row) => row.flatMap(({ runs }) => runs)),
+        ...element.rows.flatMap(({ cells }) => cells.flatMap(({ runs }) => runs)),
+        ...element.notes.flat(),
+      ];
+    case 'figure':
+      return [...element.caption.runs, ...element.notes.flat()];
+    case 'problem':
+      return [];
+  }
 }
 
 type MapRuns = (list: readonly Run[]) => readonly Run[];

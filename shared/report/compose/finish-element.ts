@@ -28,7 +28,7 @@ export function createElementFinisher(): ElementFinisher {
     const signature = signatureOf(element, needs, firstUses, context.numbers);
     const known = finished.get(element);
     if (known?.signature === signature) return known.result;
-    const result = finish(element, new Set(firstUses), context);
+    const result = finish(element, needs, new Set(firstUses), context);
     finished.set(element, { signature, result });
     return result;
   };
@@ -69,9 +69,12 @@ function signatureOf(
 
 function finish(
   element: LayoutElement,
+  needs: Needs,
   firstUses: Set<string>,
   { numbers, phrasebook }: FinishContext,
 ): LayoutElement {
+  const ownNumberOnly = firstUses.size === 0 && needs.references.length === 0;
+  if (ownNumberOnly) return withNumber(element, numbers);
   let depth = 0;
   const withWords = mapRuns(element, (run) => {
     const text = finishedText(run, { depth, firstUses, numbers, phrasebook });

@@ -1,9 +1,11 @@
 import type { ComposedReport, LayoutElement } from '#shared/layout';
 import type { Phrasebook } from '#shared/wording';
-import { abbreviationsOf, textsOfElement } from './abbreviations';
+import { abbreviationsInTexts, mergeAbbreviations } from './abbreviations';
+import type { Abbreviation } from './abbreviations';
+import { runsOf } from './element-runs';
 import { createElementFinisher } from './finish-element';
-import { remembered } from './remembered';
 import { numberCaptions } from './numbering';
+import { remembered } from './remembered';
 
 /** The report-wide pass over the elements of all blocks. */
 export type Finisher = (
@@ -19,14 +21,24 @@ export type Finisher = (
  */
 export function createFinisher(): Finisher {
   const finishElement = createElementFinisher();
-  const textsOf = remembered(textsOfElement);
+  const abbreviationsUnder = remembered(abbreviationFinder);
   return (title, elements, phrasebook) => {
     const numbers = numberCaptions(elements);
     const seen = new Set<string>();
+    const abbreviations = elements.map(abbreviationsUnder(phrasebook));
     return {
       title,
       elements: elements.map((element) => finishElement(element, { numbers, seen, phrasebook })),
-      abbreviations: abbreviationsOf(elements, textsOf, phrasebook),
+      abbreviations: mergeAbbreviations(abbreviations),
     };
   };
+}
+
+function abbreviationFinder(book: Phrasebook): (element: LayoutElement) => readonly Abbreviation[] {
+  return remembered((element: LayoutElement) =>
+    abbreviationsInTexts(
+      runsOf(element).map(({ text }) => text),
+      book,
+    ),
+  );
 }

@@ -25,8 +25,9 @@ export function fillWords<Key extends PatternKey>(
   key: Key,
   fillings: Readonly<Record<SlotOf<Key>, string>>,
 ): string {
-  return fillPattern(book, key, fillings)
-    .map(({ text }) => text)
+  const named: Readonly<Record<string, string>> = fillings;
+  return piecesOf(book, key)
+    .map(({ slot, words }) => (slot === null ? words : (named[slot] ?? '')))
     .join('');
 }
 

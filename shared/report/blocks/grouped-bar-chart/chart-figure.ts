@@ -1,11 +1,11 @@
 import type { AnalysisResult } from '#shared/analysis';
 import { designGivesRisk } from '#shared/effects';
+import { decimalsOf } from '#shared/format';
 import type { GroupedBarFigure } from '#shared/layout';
 import { fillWords, valueAxisTitle } from '#shared/wording';
 import type { Phrasebook } from '#shared/wording';
 import type { PinnedAnalysis } from '../../report';
 import type { BlockContext } from '../block-context';
-import { printedDecimals } from '../printed-decimals';
 import { chartBar } from './chart-bar';
 import type { BarPlace, ChartSetting } from './chart-bar';
 
@@ -15,7 +15,7 @@ export function figureOf(
   showValues: boolean,
   { houseStyle, phrasebook }: BlockContext,
 ): GroupedBarFigure {
-  const decimals = printedDecimals(result, houseStyle).percent;
+  const decimals = decimalsOf(result, houseStyle).percent;
   const setting: ChartSetting = { analysisId, result, houseStyle, decimals };
   const { exposure } = result.frame;
   const groups = groupsOf(result, phrasebook);

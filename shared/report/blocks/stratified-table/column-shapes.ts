@@ -1,5 +1,5 @@
 import type { TableColumn } from '#shared/layout';
-import { columnHeads, fillWords } from '#shared/wording';
+import { fillWords } from '#shared/wording';
 import type { PatternKey } from '#shared/wording';
 import type { TableColumnId } from './table-plan';
 import type { TableSetting } from './table-setting';
@@ -45,9 +45,7 @@ const SHAPES: Readonly<Record<TableColumnId, Shape>> = {
 
 /** A part's own word, or the column's head for the value itself. */
 function partLabel(part: PartId, id: TableColumnId, setting: TableSetting): string {
-  const { houseStyle, phrasebook } = setting;
-  if (part === 'value') return columnHeads(setting, houseStyle, phrasebook)[id];
-  return fillWords(phrasebook, PART_WORDS[part], {});
+  return part === 'value' ? setting.heads[id] : fillWords(setting.phrasebook, PART_WORDS[part], {});
 }
 
 const PART_WORDS = {

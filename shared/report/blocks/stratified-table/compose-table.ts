@@ -1,11 +1,11 @@
+import { decimalsOf } from '#shared/format';
 import type { LayoutElement, Run, TableElement } from '#shared/layout';
-import { tableTitle } from '#shared/wording';
+import { columnHeads, tableTitle } from '#shared/wording';
 import { documentToRuns } from '../../text/text-runs';
 import type { BlockContext } from '../block-context';
 import { inlineContext } from '../inline-context';
 import { phraseRuns } from '../phrase-runs';
 import { pinnedAnalysis, problemElement } from '../pinned-result';
-import { printedDecimals } from '../printed-decimals';
 import type { StratifiedTableContent } from './content';
 import { layTable } from './lay-table';
 import { notesOfTable } from './table-notes';
@@ -24,15 +24,17 @@ export function composeStratifiedTable(
   if (!pinned.ok) return problemElement(pinned.issue, context);
   const { analysisId, result } = pinned.value;
   const { blockId, houseStyle, phrasebook } = context;
-  const decimals = printedDecimals(result, houseStyle);
-  const setting = { blockId, analysisId, result, decimals, houseStyle, phrasebook };
+  const decimals = decimalsOf(result, houseStyle);
+  const heads = columnHeads(pinned.value, houseStyle, phrasebook);
+  const setting = { blockId, analysisId, result, decimals, heads, houseStyle, phrasebook };
   const plan = planTable(content, result, context.framing);
+  const laid = layTable(plan, setting);
   const table: TableElement = {
     kind: 'table',
     blockId,
     caption: { label: 'Table', number: 0, runs: titleRuns(content, setting, context) },
-    ...layTable(plan, setting),
-    notes: notesOfTable(content.show, plan, setting),
+    ...laid,
+    notes: notesOfTable(content.show, { plan, head: laid.head }, setting),
   };
   return [table];
 }

@@ -2,13 +2,7 @@ import type { ResultScope, ValueAddress } from '#shared/analysis';
 import { EFFECT_MEASURES } from '#shared/effects';
 import { formatCount } from '#shared/format';
 import type { Run, TableHeadCell } from '#shared/layout';
-import {
-  columnHeads,
-  fillPattern,
-  fillWords,
-  headWithInterval,
-  strataWords,
-} from '#shared/wording';
+import { fillPattern, fillWords, headWithInterval, strataWords } from '#shared/wording';
 import { phraseRuns } from '../phrase-runs';
 import { wordsRun } from '../table-cells';
 import { countedLayer } from './counted-layer';
@@ -20,10 +14,9 @@ export function headRows(
   plan: TablePlan,
   setting: TableSetting,
 ): readonly (readonly TableHeadCell[])[] {
-  const { level } = columnHeads(setting, setting.houseStyle, setting.phrasebook);
   const heads = (columns: readonly TableColumnId[]): readonly TableHeadCell[] =>
     columns.map((id) => headCell([wordsRun(headText(id, setting), setting.blockId)], 'end'));
-  const levelRuns = [wordsRun(level, setting.blockId)];
+  const levelRuns = [wordsRun(setting.heads.level, setting.blockId)];
   if (plan.arrangement !== 'sideBySide') {
     return [[headCell(levelRuns, 'start'), ...heads(plan.layers[0]?.columns ?? [])]];
   }
@@ -69,8 +62,8 @@ function withSize(label: string, scope: ResultScope, setting: TableSetting): rea
 }
 
 function headText(id: TableColumnId, setting: TableSetting): string {
-  const { result, houseStyle, phrasebook } = setting;
-  const head = columnHeads(setting, houseStyle, phrasebook)[id];
+  const { result, heads, houseStyle, phrasebook } = setting;
+  const head = heads[id];
   const isEffect = Object.hasOwn(EFFECT_MEASURES, id);
   return isEffect
     ? headWithInterval(head, result.specification.level, houseStyle, phrasebook)

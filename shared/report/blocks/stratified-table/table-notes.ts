@@ -1,18 +1,17 @@
-import type { Run } from '#shared/layout';
+import type { Run, TableElement } from '#shared/layout';
 import { fillPattern, tableNotes } from '#shared/wording';
 import type { Phrase, TableContents } from '#shared/wording';
 import { abbreviationNote } from '../abbreviation-note';
 import { phraseRuns } from '../phrase-runs';
 import { wordsRun } from '../table-cells';
 import type { TableChoice } from './content';
-import { headRows } from './table-heads';
 import type { TablePlan } from './table-plan';
 import type { TableSetting } from './table-setting';
 
 /** The notes of a table as its plan shows it, with its abbreviations where the style wants them. */
 export function notesOfTable(
   show: TableChoice,
-  plan: TablePlan,
+  { plan, head }: { readonly plan: TablePlan; readonly head: TableElement['head'] },
   setting: TableSetting,
 ): readonly (readonly Run[])[] {
   const { houseStyle, phrasebook, blockId } = setting;
@@ -20,8 +19,8 @@ export function notesOfTable(
     ...tableNotes(setting, contentsOf(show, plan), houseStyle, phrasebook),
     ...countsNote(plan, setting),
   ].map((phrase) => phraseRuns(phrase, blockId));
-  const heads = headRows(plan, setting).flat();
-  const texts = [...heads.map(({ runs }) => runs), ...notes].flat().map(({ text }) => text);
+  const heads = head.flat().map(({ runs }) => runs);
+  const texts = [...heads, ...notes].flat().map(({ text }) => text);
   const abbreviations = abbreviationNote(texts, setting);
   const first = houseStyle.table.abbreviations === 'first';
   const all = first ? [...abbreviations, ...notes] : [...notes, ...abbreviations];

@@ -1,7 +1,7 @@
 import type { AnalysisResult } from '#shared/analysis';
 import type { PrintedDecimals } from '#shared/format';
 import type { HouseStyle } from '#shared/house-style';
-import type { Phrasebook } from '#shared/wording';
+import type { ColumnHeads, Phrasebook } from '#shared/wording';
 
 /** What every cell of a table is printed under. */
 export interface TableSetting {
@@ -9,6 +9,7 @@ export interface TableSetting {
   readonly analysisId: string;
   readonly result: AnalysisResult;
   readonly decimals: PrintedDecimals;
+  readonly heads: ColumnHeads;
   readonly houseStyle: HouseStyle;
   readonly phrasebook: Phrasebook;
 }

@@ -1,0 +1,60 @@
+import { mkdirSync, readFileSync, writeFileSync } from 'node:fs';
+
+/** Wall times of repeated runs, in milliseconds. */
+export interface Timing {
+  readonly median: number;
+  readonly lowest: number;
+  readonly highest: number;
+  readonly runs: number;
+}
+
+/** One line of the table of results. */
+export interface Measured {
+  readonly what: string;
+  readonly budgetInMilliseconds: number;
+  readonly timing: Timing;
+  /** What the machine needs for comparable work, measured in the same run; null without one. */
+  readonly floor: { readonly what: string; readonly timing: Timing } | null;
+}
+
+/** Runs work again and again, the first runs uncounted, each on what `prepare` gives. */
+export function timed<Input>(
+  prepare: (run: number) => Input,
+  work: (input: Input) => unknown,
+  { runs = 15, warmUps = 5 }: { readonly runs?: number; readonly warmUps?: number } = {},
+): Timing {
+  const times = Array.from({ length: runs + warmUps }, (_, run) => {
+    const input = prepare(run);
+    const start = performance.now();
+    work(input);
+    return performance.now() - start;
+  })
+    .slice(warmUps)
+    .toSorted((one, other) => one - other);
+  const [lowest = 0] = times;
+  return { median: times[Math.floor(runs / 2)] ?? 0, lowest, highest: times.at(-1) ?? 0, runs };
+}
+
+const FILE = 'coverage/bench.json';
+
+/** Prints a result, and adds it to `coverage/bench.json` in place of an earlier one. */
+export function report(measured: Measured): void {
+  const { what, budgetInMilliseconds, timing, floor } = measured;
+  const ratio =
+    floor === null ? '' : ` · ${(timing.median / floor.timing.median).toFixed(1)} × ${floor.what}`;
+  const spread = `${timing.lowest.toFixed(1)} to ${timing.highest.toFixed(1)}`;
+  console.log(
+    `${what}: ${timing.median.toFixed(1)} ms (${spread}; budget ${String(budgetInMilliseconds)})${ratio}`,
+  );
+  const others = earlier().filter((one) => one.what !== what);
+  mkdirSync('coverage', { recursive: true });
+  writeFileSync(FILE, `${JSON.stringify([...others, measured], null, 2)}\n`);
+}
+
+function earlier(): readonly Measured[] {
+  try {
+    return JSON.parse(readFileSync(FILE, 'utf8')) as readonly Measured[];
+  } catch {
+    return [];
+  }
+}
