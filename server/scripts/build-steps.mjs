@@ -1,4 +1,5 @@
 import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { compressClient } from './compress-client.mjs';
 import { runCommand, say } from './run-command.mjs';
 import { sourceHash } from './source-hash.mjs';
 
@@ -6,15 +7,25 @@ const SETTINGS = ['package.json', 'package-lock.json', 'tsconfig.json', 'shared'
 
 /** Builds client and server into dist, each only when its sources changed; true when both stand. */
 export async function buildAll() {
-  const client = await buildWhenChanged('client', ['client', 'angular.json', ...SETTINGS], () =>
-    runCommand(process.execPath, ['node_modules/@angular/cli/bin/ng.js', 'build'], {
-      environment: { NG_CLI_ANALYTICS: 'false' },
-    }),
+  const client = await buildWhenChanged(
+    'client',
+    ['client', 'angular.json', 'server/scripts', ...SETTINGS],
+    buildClient,
   );
   const server = await buildWhenChanged('server', ['server', 'seeds', ...SETTINGS], () =>
     runCommand(process.execPath, ['server/scripts/bundle-server.mjs']),
   );
   return client && server;
+}
+
+async function buildClient() {
+  const code = await runCommand(
+    process.execPath,
+    ['node_modules/@angular/cli/bin/ng.js', 'build'],
+    { environment: { NG_CLI_ANALYTICS: 'false' } },
+  );
+  if (code === 0) compressClient('dist/client');
+  return code;
 }
 
 async function buildWhenChanged(part, sources, build) {

@@ -1,5 +1,6 @@
 import { extname, join } from 'node:path';
 import express, { Router, type Request, type Response } from 'express';
+import { serveCompressed } from './serve-compressed';
 
 const HASHED_NAME = /-[A-Z0-9]{8,}\.\w+$/;
 const A_YEAR = 'public, max-age=31536000, immutable';
@@ -10,6 +11,7 @@ const A_YEAR = 'public, max-age=31536000, immutable';
  */
 export function serveClient(clientDirectory: string): Router {
   const router = Router();
+  router.use(serveCompressed(clientDirectory, keepHashedFiles));
   router.use(express.static(clientDirectory, { index: false, setHeaders: keepHashedFiles }));
   router.get('/{*path}', (request, response, next) => {
     if (extname(request.path) !== '') next();
