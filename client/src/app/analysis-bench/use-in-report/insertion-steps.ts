@@ -2,12 +2,13 @@ import type { ResultScope } from '#shared/analysis';
 import type { AnalysisView, ReportView, StepSubmission } from '#shared/api';
 import {
   BLOCK_KINDS,
+  type BlockField,
   type BlockKindId,
-  type EffectSentenceContent,
   type InsertBlock,
   type PinnedAnalysis,
   placeAfter,
   visibleBlocks,
+  withFieldValue,
 } from '#shared/report';
 import { newId } from '../../ui/new-id';
 
@@ -57,12 +58,16 @@ function blockAtEnd(
   return { id: newId(), kind, orderKey: placeAfter(report, last).orderKey, content };
 }
 
-/** A sentence speaks of the contrast in view; tables and figures show all of them. */
-function contentOf(kind: BlockKindId, used: UsedAnalysis): unknown {
-  const content = BLOCK_KINDS[kind].emptyContent({ analysis: pinOf(used.analysis) });
-  if (kind !== 'effectSentence') return content;
-  const { levelId: indexLevelId, scope } = used;
-  return { ...(content as EffectSentenceContent), indexLevelId, scope };
+/** What speaks of one contrast speaks of the one in view; tables and figures show all of them. */
+function contentOf(kind: BlockKindId, { analysis, levelId, scope }: UsedAnalysis): unknown {
+  const inView: Partial<Record<BlockField['kind'], unknown>> = { indexLevel: levelId, scope };
+  const blockKind = BLOCK_KINDS[kind];
+  return blockKind.fields
+    .filter((field) => field.kind in inView)
+    .reduce<unknown>(
+      (content, field) => withFieldValue(content, field.path, inView[field.kind]),
+      blockKind.emptyContent({ analysis: pinOf(analysis) }),
+    );
 }
 
 function pinOf(analysis: AnalysisView): PinnedAnalysis {
