@@ -63,6 +63,8 @@ export const analysisViewSchema = analysisSummarySchema.extend({
   cutDataDate: z.string(),
   resultId: z.string(),
   result: z.custom<AnalysisResult>((value) => typeof value === 'object' && value !== null),
+  /** Why it can't be computed under the present code book, in words; null when it can. */
+  problem: z.string().nullable().optional(),
   changes: z.array(
     z.object({
       version: z.int(),
