@@ -40,12 +40,11 @@ const FILE = 'coverage/bench.json';
 /** Prints a result, and adds it to `coverage/bench.json` in place of an earlier one. */
 export function report(measured: Measured): void {
   const { what, budgetInMilliseconds, timing, floor } = measured;
-  const ratio =
-    floor === null ? '' : ` · ${(timing.median / floor.timing.median).toFixed(1)} × ${floor.what}`;
+  const times = floor === null ? 0 : timing.median / floor.timing.median;
+  const ratio = floor === null ? '' : ` · ${times.toFixed(1)} × ${floor.what}`;
   const spread = `${timing.lowest.toFixed(1)} to ${timing.highest.toFixed(1)}`;
-  console.log(
-    `${what}: ${timing.median.toFixed(1)} ms (${spread}; budget ${String(budgetInMilliseconds)})${ratio}`,
-  );
+  const budget = `budget ${String(budgetInMilliseconds)}`;
+  console.log(`${what}: ${timing.median.toFixed(1)} ms (${spread}; ${budget})${ratio}`);
   const others = earlier().filter((one) => one.what !== what);
   mkdirSync('coverage', { recursive: true });
   writeFileSync(FILE, `${JSON.stringify([...others, measured], null, 2)}\n`);
