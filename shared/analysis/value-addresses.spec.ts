@@ -76,6 +76,26 @@ describe('readValue', () => {
     expect(issueAt(at('shareOfCases'))).toBe('notGivenByDesign');
   });
 
+  it('gives limits of the shares of all cases and of all controls', () => {
+    const sampled = resultOf({
+      design: 'caseControl',
+      levels: ['no', 'yes'],
+      counts: [
+        [38, 638],
+        [34, 163],
+      ],
+    });
+    const limit = (quantity: AddressedQuantity, facet: 'lower' | 'upper'): number => {
+      const value = readValue(sampled, at(quantity, facet, 'yes'));
+      return value.ok ? numberOf(value.value) : Number.NaN;
+    };
+    // R 4: prop.test(34, 72, correct = FALSE) and prop.test(129, 729, correct = FALSE)
+    expect(limit('shareOfCases', 'lower')).toBeCloseTo(0.361265103378, 10);
+    expect(limit('shareOfCases', 'upper')).toBeCloseTo(0.585993295099, 10);
+    expect(limit('shareOfControls', 'lower')).toBeCloseTo(0.150965924954, 10);
+    expect(limit('shareOfComparedCases', 'lower')).toBeNaN();
+  });
+
   it('leaves fractions whose products pass 2^53 as real numbers', () => {
     const large = resultOf({
       levels: ['no', 'yes'],

@@ -36,7 +36,7 @@ function newlyShown(report: Report, step: Step): readonly string[] {
   if (applied?.ok !== true) return [];
   const block = applied.value.report.blocks.find(({ id }) => id === blockId);
   const shown = block === undefined ? [] : analysisIdsOf(block);
-  return shown.filter((id) => report.pins[id] === undefined);
+  return shown.filter((id) => !Object.hasOwn(report.pins, id));
 }
 
 function shownAgain(step: Step): string | null {
