@@ -1,7 +1,15 @@
 import { csvText, type CsvRow } from './csv';
 import { randomSource, shuffled } from './random';
 
-const HEADER = ['guest', 'sitting', 'fish_pie', 'mussels', 'potato_salad', 'berry_trifle', 'ill_72h'];
+const HEADER = [
+  'guest',
+  'sitting',
+  'fish_pie',
+  'mussels',
+  'potato_salad',
+  'berry_trifle',
+  'ill_72h',
+];
 
 /** Invented guests by sitting and whether they ate the fish pie: [ill, all]. */
 const GUESTS = [
@@ -20,7 +28,12 @@ export function harbourSupperFiles(): Readonly<Record<string, string>> {
   const rows = shuffled(guests, random).map((guest, at): CsvRow => {
     const tasted = (share: number): string => (random() < share ? 'yes' : 'no');
     const number = `G${String(at + 1).padStart(3, '0')}`;
-    const dishes = [guest.fishPie, tasted(0.45), tasted(guest.fishPie === 'yes' ? 0.7 : 0.5), tasted(0.6)];
+    const dishes = [
+      guest.fishPie,
+      tasted(0.45),
+      tasted(guest.fishPie === 'yes' ? 0.7 : 0.5),
+      tasted(0.6),
+    ];
     return [number, guest.sitting, ...dishes, guest.sick ? 'ill' : 'well'];
   });
   return { 'harbour-supper-guests.csv': csvText(HEADER, rows) };

@@ -3,13 +3,37 @@ import { randomSource, shuffled } from './random';
 
 /** Invented counts [with eczema, all] by hours of wet work per shift, codes 0 to 4. */
 const FIRST_CUT = {
-  ward: [[9, 221], [24, 381], [37, 396], [40, 287], [29, 150]],
-  kitchen: [[5, 112], [9, 160], [22, 229], [38, 251], [41, 204]],
+  ward: [
+    [9, 221],
+    [24, 381],
+    [37, 396],
+    [40, 287],
+    [29, 150],
+  ],
+  kitchen: [
+    [5, 112],
+    [9, 160],
+    [22, 229],
+    [38, 251],
+    [41, 204],
+  ],
 } as const;
 
 const SECOND_CUT = {
-  ward: [[11, 236], [27, 402], [43, 418], [46, 305], [34, 163]],
-  kitchen: [[4, 118], [9, 171], [26, 244], [43, 266], [47, 219]],
+  ward: [
+    [11, 236],
+    [27, 402],
+    [43, 418],
+    [46, 305],
+    [34, 163],
+  ],
+  kitchen: [
+    [4, 118],
+    [9, 171],
+    [26, 244],
+    [43, 266],
+    [47, 219],
+  ],
 } as const;
 
 type CutCounts = Readonly<Record<'ward' | 'kitchen', readonly (readonly [number, number])[]>>;
@@ -67,5 +91,12 @@ function incomplete(unanswered: number, lost: number, random: () => number): Wor
 function recordOf(worker: Worker, at: number, random: () => number): CsvRow {
   const age = 19 + Math.floor((random() + random()) * 22.5);
   const gloves = (random() * (1 + Number(worker.wetWork || 2))).toFixed(1);
-  return [`P${String(at + 1).padStart(4, '0')}`, worker.workplace, worker.wetWork, worker.eczema, age, gloves];
+  return [
+    `P${String(at + 1).padStart(4, '0')}`,
+    worker.workplace,
+    worker.wetWork,
+    worker.eczema,
+    age,
+    gloves,
+  ];
 }

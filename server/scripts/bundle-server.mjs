@@ -2,14 +2,14 @@ import { readdirSync, rmSync } from 'node:fs';
 import { join } from 'node:path';
 import { build } from 'esbuild';
 
-/** Every file named *-worker.ts is an entry of its own beside main.js. */
+/** The server, the seeder, and every file named *-worker.ts are entries beside each other. */
 const workers = readdirSync('server', { recursive: true })
   .filter((path) => path.endsWith('-worker.ts') && !path.includes('testing'))
   .map((path) => join('server', path));
 
 rmSync('dist/server', { recursive: true, force: true });
 await build({
-  entryPoints: ['server/main.ts', ...workers],
+  entryPoints: ['server/main.ts', 'seeds/seed-when-empty.ts', ...workers],
   outdir: 'dist/server',
   entryNames: '[name]',
   bundle: true,

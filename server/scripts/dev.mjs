@@ -4,7 +4,7 @@ import { releaseSignals } from './run-command.mjs';
 
 const SERVER = {
   name: 'server',
-  command: 'tsx watch --clear-screen=false server/main.ts',
+  command: 'tsx seeds/main.ts && tsx watch --clear-screen=false server/main.ts',
 };
 const CLIENT = { name: 'client', command: 'ng serve' };
 

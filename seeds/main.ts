@@ -1,0 +1,3 @@
+import { seedWhenEmpty } from './seed-when-empty';
+
+await seedWhenEmpty();
