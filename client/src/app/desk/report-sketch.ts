@@ -1,17 +1,15 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import type { BlockKindId } from '#shared/report';
 
 type SketchPart = 'head' | 'lines' | 'table' | 'bars';
 
 /** What each kind of block looks like from afar. */
-const PARTS: Readonly<Record<string, SketchPart>> = {
+const PARTS: Readonly<Record<BlockKindId, SketchPart>> = {
   heading: 'head',
   prose: 'lines',
-  effectSentence: 'lines',
-  methodsNote: 'lines',
   stratifiedTable: 'table',
   groupedBarChart: 'bars',
-  estimatePlot: 'bars',
-  participantAccounting: 'table',
+  effectSentence: 'lines',
 };
 
 const BAR_HEIGHTS = [
@@ -35,6 +33,12 @@ export class ReportSketch {
 
   protected readonly bars = BAR_HEIGHTS;
   protected readonly parts = computed(() =>
-    this.blockKinds().map((kind) => PARTS[kind] ?? 'lines'),
+    this.blockKinds()
+      .filter(isKnown)
+      .map((kind) => PARTS[kind]),
   );
+}
+
+function isKnown(kind: string): kind is BlockKindId {
+  return Object.hasOwn(PARTS, kind);
 }
