@@ -51,7 +51,7 @@ async function storeOutcome(
   call: Call<OutcomeParameters, OutcomeWords> & OnStudy,
 ): Promise<Outcome<StudyView>> {
   const { dependencies, person, study, params, body } = call;
-  return withStudy(call, await putOutcome(dependencies, person, study.id, params.outcomeId, body));
+  return withStudy(call, await putOutcome(dependencies, person, study, params.outcomeId, body));
 }
 
 async function dropOutcome(call: Call<OutcomeParameters> & OnStudy): Promise<Outcome<StudyView>> {

@@ -1,23 +1,29 @@
 import type { OutcomeWords } from '#shared/analysis';
 import type { Dependencies } from '../../dependencies';
 import { refuseField, type Outcome as Answer } from '../../errors/server-issue';
+import type { Study } from '../../models/study/study-store';
 import type { Unit } from '../../models/unit-of-work';
 import type { User } from '../../models/user/user-store';
+import { rewordAnalyses } from '../analyses/recompute-analyses';
 import { recordStudyChange } from './record-study-change';
 import { presentOutcome } from './view-study';
 
-/** Adds an outcome to a study, or changes its words. The id in the address and the body agree. */
+/**
+ * Adds an outcome to a study, or changes its words; the analyses that count it follow. The id in
+ * the address and the body agree.
+ */
 export async function putOutcome(
   dependencies: Dependencies,
   person: User,
-  studyId: string,
+  study: Study,
   outcomeId: string,
   words: OutcomeWords,
 ): Promise<Answer<undefined>> {
   if (words.id !== outcomeId) return refuseField('id', 'This must be the id in the address.');
-  await dependencies.database.unitOfWork(`study:${studyId}`, (unit) =>
-    store(dependencies, person, studyId, words, unit),
+  await dependencies.database.unitOfWork(`study:${study.id}`, (unit) =>
+    store(dependencies, person, study.id, words, unit),
   );
+  await rewordAnalyses(dependencies, person.id, study);
   return { ok: true, value: undefined };
 }
 
