@@ -2,7 +2,10 @@ import type { HouseStyle } from '#shared/house-style';
 import type { Phrasebook } from '#shared/wording';
 import type { Configuration } from './config';
 import type { ErrorLog } from './errors/error-handler';
+import type { CountingEngine } from './counting/counting-engine';
+import { createCountingEngine } from './counting/sqlite-counting-engine';
 import { createExporter, type Exporter } from './exports/exporter';
+import { createIntake, type Intake } from './intake/intake';
 import { openDatabase, type Database } from './models/database';
 import { createBackground, type Background } from './runtime/background';
 import { systemClock, type Clock } from './runtime/clock';
@@ -35,6 +38,8 @@ export interface Dependencies extends Runtime {
   readonly writeLetter: WriteLetter;
   readonly background: Background;
   readonly exporter: Exporter;
+  readonly intake: Intake;
+  readonly counting: CountingEngine;
   readonly houseStyles: readonly HouseStyle[];
   readonly phrasebook: Phrasebook;
   /** Lets the first administrator be made; printed at start when there are no accounts. */
@@ -50,6 +55,9 @@ export const SYSTEM_RUNTIME: Runtime = {
     console.error(message, problem);
   },
 };
+
+/** Columns of data cuts that counting keeps in memory. */
+const RESIDENT_BYTES = 256 * 1024 * 1024;
 
 /** Opens the data directory and everything that stands on it. */
 export async function openDependencies(
@@ -69,6 +77,12 @@ export async function openDependencies(
     writeLetter: readLetters(config.templatesDirectory),
     background: createBackground(runtime.log),
     exporter: createExporter(runtime.log),
+    intake: createIntake(runtime.log),
+    counting: createCountingEngine({
+      database,
+      clock: runtime.clock,
+      residentBytes: RESIDENT_BYTES,
+    }),
     houseStyles: readHouseStyles(config.templatesDirectory),
     phrasebook: readPhrasebook(config.templatesDirectory),
     firstAdministratorCode: firstAdministratorCode(runtime.randomness),

@@ -129,6 +129,21 @@ export const ISSUES = {
     title: 'An analysis uses this outcome: {analyses}.',
     wayOut: 'Change or remove the analysis first.',
   },
+  uploadNotReady: {
+    status: 409,
+    title: 'The file is not read yet, or it was stored already.',
+    wayOut: 'Wait until the file is read, then store it.',
+  },
+  uploadStored: {
+    status: 409,
+    title: 'The file was stored as a data cut already.',
+    wayOut: 'Load the file again to read it in another way.',
+  },
+  staleCodeBook: {
+    status: 409,
+    title: 'Somebody saved version {number} of this code book while you edited.',
+    wayOut: 'Look at both versions, then save yours on top of the newer one or give it up.',
+  },
   analysisNotComputable: {
     status: 422,
     title: 'The analysis cannot be computed as it stands.',

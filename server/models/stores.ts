@@ -2,7 +2,10 @@ import type { Sequelize } from 'sequelize';
 import { AnalysisStore } from './analysis/analysis-store';
 import { BlockStore } from './block/block-store';
 import { CodeBookStore } from './code-book/code-book-store';
+import { ColumnChunkStore } from './cut/column-chunk-store';
+import { CutColumnStore } from './cut/cut-column-store';
 import { CutFactsStore } from './cut/cut-facts-store';
+import { CutStore } from './cut/cut-store';
 import { DataSetStore } from './data-set/data-set-store';
 import { DraftStore } from './draft/draft-store';
 import { MailStore } from './mail/mail-store';
@@ -17,8 +20,10 @@ import { MilestoneStore } from './study/milestone-store';
 import { OutcomeStore } from './study/outcome-store';
 import { StudyFiguresStore } from './study/study-figures-store';
 import { StudyStore } from './study/study-store';
+import { TallyStore } from './tally/tally-store';
 import { TokenStore } from './token/token-store';
 import { TrailStore } from './trail/trail-store';
+import { UploadStore } from './upload/upload-store';
 import { UserStore } from './user/user-store';
 
 const STORES = {
@@ -36,6 +41,11 @@ const STORES = {
   dataSets: DataSetStore,
   codeBooks: CodeBookStore,
   cutFacts: CutFactsStore,
+  cuts: CutStore,
+  cutColumns: CutColumnStore,
+  columnChunks: ColumnChunkStore,
+  uploads: UploadStore,
+  tallies: TallyStore,
   analyses: AnalysisStore,
   results: ResultStore,
   reports: ReportStore,

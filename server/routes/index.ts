@@ -1,5 +1,12 @@
 import { administrationRoutes } from './administration/administration-routes';
+import { dataRoutes } from './data/data-routes';
+import { uploadRoutes } from './data/upload-routes';
+import { analysisRoutes } from './analyses/analysis-routes';
 import { houseStyleRoutes } from './house-styles/house-style-routes';
+import { exportRoutes } from './reports/export-routes';
+import { draftRoutes } from './reports/draft-routes';
+import { reportRoutes } from './reports/report-routes';
+import { stepRoutes } from './reports/step-routes';
 import type { Route } from './route';
 import { accountRoutes } from './session/account-routes';
 import { sessionRoutes } from './session/session-routes';
@@ -33,5 +40,12 @@ export const ROUTES: readonly Route[] = [
   ...studyRoutes,
   ...studyPartRoutes,
   ...memberRoutes,
+  ...uploadRoutes,
+  ...dataRoutes,
+  ...analysisRoutes,
+  ...reportRoutes,
+  ...stepRoutes,
+  ...draftRoutes,
   ...houseStyleRoutes,
+  ...exportRoutes,
 ];

@@ -25,6 +25,7 @@ export async function serve(dependencies: Dependencies): Promise<RunningServer> 
     stop: async (patience) => {
       application.stop();
       await close(server, patience);
+      await dependencies.intake.close();
       await dependencies.background.idle();
       await dependencies.exporter.close();
       await dependencies.database.close();

@@ -103,6 +103,17 @@ export const uploadViewSchema = z.object({
   profile: cutProfileSchema.nullable(),
   /** The suggestion to start from: guesses, or the data set's code book carried over. */
   proposedCodeBook: codeBookSchema.nullable(),
+  /** Where the data differ from the code book that was carried over; empty for guesses. */
+  differences: z
+    .array(
+      z.object({
+        code: z.string(),
+        columnId: z.string(),
+        levelId: z.string().nullable(),
+        message: z.string(),
+      }),
+    )
+    .optional(),
   problem: z.object({ code: z.string(), message: z.string(), wayOut: z.string() }).nullable(),
   cutId: z.string().nullable(),
   dataSetId: z.string().nullable(),

@@ -46,6 +46,12 @@ export function rowWeights(
   }
 }
 
+/** Why the rows of a cut can't be counted by the columns of its layout; null when they can. */
+export function checkCounts(cut: EncodedCut, codeBook: CodeBook): TallyIssue | null {
+  const weights = rowWeights(cut, codeBook);
+  return weights.ok ? null : weights.issue;
+}
+
 /** Places of the counted outcome's levels, by id. */
 export function outcomeLevelPlace(levelId: string): number {
   return levelId === COUNTED_OUTCOME_LEVEL_IDS[0] ? EVENT : NON_EVENT;

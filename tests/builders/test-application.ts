@@ -64,6 +64,7 @@ export async function startTestApplication(
     },
     close: async () => {
       application.stop();
+      await dependencies.intake.close();
       await dependencies.background.idle();
       await dependencies.exporter.close();
       await dependencies.database.close();

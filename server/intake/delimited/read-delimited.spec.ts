@@ -114,7 +114,7 @@ describe('a delimited file', () => {
         const header = rows[0]!.map((_, at) => `column ${String(at)}`);
         const lines = [header, ...rows].map((row) => row.map(quoted).join(','));
         const text = lines.join(lineEnd);
-        const expected = (parse(text) as string[][])
+        const expected = parse<string[]>(text)
           .slice(1)
           .filter((row) => !row.every((one) => /^[ \t]*$/.test(one)));
         if (expected.length === 0) return;

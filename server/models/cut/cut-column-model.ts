@@ -10,7 +10,7 @@ import { key, text, whole } from '../columns';
 
 /**
  * One column of a cut, by its place in the file. `columnId` is what the code book calls it. `width`
- * is the number of bytes of the widest code; the codes and the dictionary lie in chunks.
+ * is the number of bytes of the widest code; codes lie in chunks of `chunkRows` rows.
  */
 export interface CutColumnModel extends Model<
   InferAttributes<CutColumnModel>,
@@ -21,6 +21,7 @@ export interface CutColumnModel extends Model<
   columnId: string;
   name: string;
   width: number;
+  chunkRows: number;
   dictionarySize: number;
 }
 
@@ -32,6 +33,7 @@ export function defineCutColumns(sequelize: Sequelize): ModelStatic<CutColumnMod
     columnId: text(),
     name: text(),
     width: whole(),
+    chunkRows: whole(),
     dictionarySize: whole(),
   });
 }

@@ -12,7 +12,7 @@ export type UploadState = 'reading' | 'profiled' | 'storing' | 'stored' | 'faile
 
 /**
  * A file on its way to become a cut. `filePath` is where the bytes are staged, relative to the data
- * directory. JSON: `options` ReadingOptions, `profile` CutProfile, `proposal` the code book to start
+ * directory. JSON: `options` ReadingOptions, `profile` CutProfile, `proposal` a code book to start
  * from, `problem` { code, message, wayOut }.
  */
 export interface UploadModel extends Model<

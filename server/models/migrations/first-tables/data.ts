@@ -31,6 +31,7 @@ export const DATA_TABLES: readonly string[] = [
     column_id TEXT NOT NULL,
     name TEXT NOT NULL,
     width INTEGER NOT NULL,
+    chunk_rows INTEGER NOT NULL,
     dictionary_size INTEGER NOT NULL,
     PRIMARY KEY (cut_id, position),
     UNIQUE (cut_id, column_id)

@@ -1,0 +1,50 @@
+import { QueryTypes, type InferAttributes, type ModelStatic, type Sequelize } from 'sequelize';
+import { within } from '../rows';
+import type { Unit } from '../unit-of-work';
+import { defineColumnChunks, type ChunkPart, type ColumnChunkModel } from './column-chunk-model';
+
+/** A piece of a column as stored. */
+export type ColumnChunk = Readonly<InferAttributes<ColumnChunkModel>>;
+
+/** Reads and writes pieces of columns, each at most 256 KiB. */
+export class ColumnChunkStore {
+  private readonly chunks: ModelStatic<ColumnChunkModel>;
+
+  constructor(private readonly sequelize: Sequelize) {
+    this.chunks = defineColumnChunks(sequelize);
+  }
+
+  /** The bytes of all pieces of a column's part, in order. */
+  async read(cutId: string, position: number, part: ChunkPart): Promise<readonly Buffer[]> {
+    const found = await this.chunks.findAll({
+      attributes: ['bytes'],
+      where: { cutId, position, part },
+      order: [['chunk', 'ASC']],
+    });
+    return found.map(({ bytes }) => bytes);
+  }
+
+  /** The bytes of one piece of the codes; null when there is none. */
+  async readCodes(cutId: string, position: number, chunk: number): Promise<Buffer | null> {
+    const where = { cutId, position, part: 'codes' as const, chunk };
+    return (await this.chunks.findOne({ attributes: ['bytes'], where }))?.bytes ?? null;
+  }
+
+  async insert(chunk: ColumnChunk, unit: Unit): Promise<void> {
+    await this.chunks.create(chunk, within(unit));
+  }
+
+  /** Removes some pieces of a cut; gives how many are left, so that each removal is small. */
+  async removeSome(cutId: string, most: number, unit: Unit): Promise<number> {
+    await this.sequelize.query(REMOVE_SOME, {
+      type: QueryTypes.DELETE,
+      replacements: { cutId, most },
+      ...within(unit),
+    });
+    return this.chunks.count({ where: { cutId }, ...within(unit) });
+  }
+}
+
+const REMOVE_SOME = `DELETE FROM column_chunks WHERE cut_id = :cutId AND
+  (position, part, chunk) IN (SELECT position, part, chunk FROM column_chunks
+    WHERE cut_id = :cutId ORDER BY position, part, chunk LIMIT :most)`;
