@@ -32,18 +32,21 @@ export const analysisSpecificationSchema: z.ZodType<AnalysisSpecification> = z.o
   }),
 });
 
+/** An analysis to save over a cut. */
 export const newAnalysisRequestSchema = z.object({
   name: z.string().trim().min(1, 'Give the analysis a name.').max(200),
   cutId: idSchema,
   specification: analysisSpecificationSchema,
 });
 
+/** An analysis changed against one version of it. */
 export const analysisChangeRequestSchema = newAnalysisRequestSchema.extend({
   baseVersion: z.int(),
   /** Required once a report uses the analysis and a method, level or contrast changes. */
   reason: z.string().trim().max(1000).nullable(),
 });
 
+/** An analysis in a list, with the reports that use it. */
 export const analysisSummarySchema = z.object({
   id: z.string(),
   number: z.string(),
@@ -57,6 +60,7 @@ export const analysisSummarySchema = z.object({
   usedIn: z.array(z.object({ reportId: z.string(), title: z.string(), blocks: z.int() })),
 });
 
+/** An analysis with its specification, newest result and changes. */
 export const analysisViewSchema = analysisSummarySchema.extend({
   specification: analysisSpecificationSchema,
   codeBookNumber: z.int(),
@@ -75,7 +79,11 @@ export const analysisViewSchema = analysisSummarySchema.extend({
   ),
 });
 
+/** An analysis to save over a cut. */
 export type NewAnalysisRequest = z.infer<typeof newAnalysisRequestSchema>;
+/** An analysis changed against one version of it. */
 export type AnalysisChangeRequest = z.infer<typeof analysisChangeRequestSchema>;
+/** An analysis in a list, with the reports that use it. */
 export type AnalysisSummary = z.infer<typeof analysisSummarySchema>;
+/** An analysis with its specification, newest result and changes. */
 export type AnalysisView = z.infer<typeof analysisViewSchema>;

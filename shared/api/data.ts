@@ -84,6 +84,7 @@ export const columnProfileSchema = z.object({
   truncated: z.boolean(),
 });
 
+/** What a file holds, column by column, and how it was read. */
 export const cutProfileSchema = z.object({
   fileName: z.string(),
   rows: z.int(),
@@ -93,6 +94,7 @@ export const cutProfileSchema = z.object({
   sheets: z.array(z.string()),
 });
 
+/** A file on its way to a data cut. */
 export const uploadViewSchema = z.object({
   id: z.string(),
   fileName: z.string(),
@@ -119,6 +121,7 @@ export const uploadViewSchema = z.object({
   dataSetId: z.string().nullable(),
 });
 
+/** The cut to make of an upload that was read. */
 export const storeCutRequestSchema = z.object({
   /** An existing data set for a new cut, or null with a name for a new one. */
   dataSetId: z.string().nullable(),
@@ -148,6 +151,7 @@ export const typedCountsRequestSchema = z.object({
     .max(1000),
 });
 
+/** A data cut in a list. */
 export const cutSummarySchema = z.object({
   id: z.string(),
   number: z.int(),
@@ -159,6 +163,7 @@ export const cutSummarySchema = z.object({
   createdBy: z.string(),
 });
 
+/** A data set with its cuts. */
 export const dataSetViewSchema = z.object({
   id: z.string(),
   name: z.string(),
@@ -166,23 +171,27 @@ export const dataSetViewSchema = z.object({
   codeBookNumber: z.int(),
 });
 
+/** A data cut with what it holds. */
 export const cutViewSchema = cutSummarySchema.extend({
   dataSetId: z.string(),
   dataSetName: z.string(),
   profile: cutProfileSchema,
 });
 
+/** The newest code book of a data set, with its number. */
 export const codeBookViewSchema = z.object({
   dataSetId: z.string(),
   number: z.int(),
   content: codeBookSchema,
 });
 
+/** A code book changed against one number of it. */
 export const codeBookChangeRequestSchema = z.object({
   baseNumber: z.int(),
   content: codeBookSchema,
 });
 
+/** Which columns to count over, and which records to keep. */
 export const tallyRequestSchema = z.object({
   columnIds: z.array(idSchema).min(1).max(8),
   restrictions: z
@@ -191,6 +200,7 @@ export const tallyRequestSchema = z.object({
     .default([]),
 });
 
+/** Counts by level; cells that hold nothing are left out. */
 export const tallySchema = z.object({
   axes: z.array(z.object({ columnId: z.string(), levelIds: z.array(z.string()) })),
   cells: z.array(z.object({ at: z.array(z.int()), count: z.int() })),
@@ -199,6 +209,7 @@ export const tallySchema = z.object({
   leftOut: z.array(z.object({ columnId: z.string(), reason: z.string(), count: z.int() })),
 });
 
+/** Some rows of a cut, as they stood in the file. */
 export const recordsPageSchema = z.object({
   columns: z.array(z.string()),
   rows: z.array(z.array(z.string())),
@@ -206,16 +217,29 @@ export const recordsPageSchema = z.object({
   total: z.int(),
 });
 
+/** How a file is to be read; null lets the reader find out. */
 export type ReadingOptions = z.infer<typeof readingOptionsSchema>;
+/** Something odd in a column or in the file, in plain words. */
 export type IntakeWarning = z.infer<typeof intakeWarningSchema>;
+/** What a column holds. */
 export type ColumnProfile = z.infer<typeof columnProfileSchema>;
+/** What a file holds, column by column, and how it was read. */
 export type CutProfile = z.infer<typeof cutProfileSchema>;
+/** A file on its way to a data cut. */
 export type UploadView = z.infer<typeof uploadViewSchema>;
+/** The cut to make of an upload that was read. */
 export type StoreCutRequest = z.infer<typeof storeCutRequestSchema>;
+/** Counts typed into a grid. */
 export type TypedCountsRequest = z.infer<typeof typedCountsRequestSchema>;
+/** A data cut in a list. */
 export type CutSummary = z.infer<typeof cutSummarySchema>;
+/** A data set with its cuts. */
 export type DataSetView = z.infer<typeof dataSetViewSchema>;
+/** A data cut with what it holds. */
 export type CutView = z.infer<typeof cutViewSchema>;
+/** The newest code book of a data set, with its number. */
 export type CodeBookView = z.infer<typeof codeBookViewSchema>;
+/** A code book changed against one number of it. */
 export type CodeBookChangeRequest = z.infer<typeof codeBookChangeRequestSchema>;
+/** Some rows of a cut, as they stood in the file. */
 export type RecordsPage = z.infer<typeof recordsPageSchema>;

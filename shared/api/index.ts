@@ -56,13 +56,8 @@ export type {
   CodeBookChangeRequest,
   RecordsPage,
 } from './data';
-export {
-  fieldProblemSchema,
-  problemSchema,
-} from './problem';
-export type {
-  Problem,
-} from './problem';
+export { fieldProblemSchema, problemSchema } from './problem';
+export type { Problem } from './problem';
 export {
   newReportRequestSchema,
   reportSummarySchema,

@@ -6,11 +6,13 @@ import { FRAMINGS } from '#shared/wording/phrase';
 
 const idSchema = z.string().min(1).max(100);
 
+/** A report to begin. */
 export const newReportRequestSchema = z.object({
   title: z.string().trim().min(1, 'Give the report a title.').max(300),
   houseStyleId: idSchema.default('open-clinical'),
 });
 
+/** A report in a list. */
 export const reportSummarySchema = z.object({
   id: z.string(),
   studyId: z.string(),
@@ -24,6 +26,7 @@ export const reportSummarySchema = z.object({
   updatedBy: z.string().nullable(),
 });
 
+/** A block of a report; `removedAt` marks the tombstone of a removed one. */
 export const blockSchema = z.object({
   id: idSchema,
   kind: z.string().max(60),
@@ -42,10 +45,12 @@ export const stepSubmissionSchema = z.object({
   step: z.looseObject({ kind: z.string() }),
 });
 
+/** Steps to apply in order, all or none. */
 export const stepsRequestSchema = z.object({
   steps: z.array(stepSubmissionSchema).min(1).max(200),
 });
 
+/** A step that was applied: by whom, when, and what takes it back. */
 export const acceptedStepSchema = stepSubmissionSchema.extend({
   seq: z.int(),
   person: z.string(),
@@ -54,8 +59,10 @@ export const acceptedStepSchema = stepSubmissionSchema.extend({
   inverse: z.looseObject({ kind: z.string() }),
 });
 
+/** Steps after a sequence number, and the newest number. */
 export const stepsViewSchema = z.object({ seq: z.int(), steps: z.array(acceptedStepSchema) });
 
+/** What a person typed into a block and has not made a step yet. */
 export const draftSchema = z.object({
   blockId: z.string(),
   baseVersion: z.int(),
@@ -63,8 +70,10 @@ export const draftSchema = z.object({
   savedAt: z.string(),
 });
 
+/** Typing to keep, against one version of its block. */
 export const draftRequestSchema = z.object({ baseVersion: z.int(), content: z.unknown() });
 
+/** A report with all that is needed to compose it, and the drafts of who asks. */
 export const reportViewSchema = z.object({
   report: z.object({
     id: z.string(),
@@ -82,12 +91,21 @@ export const reportViewSchema = z.object({
   drafts: z.array(draftSchema),
 });
 
+/** A report to begin. */
 export type NewReportRequest = z.infer<typeof newReportRequestSchema>;
+/** A report in a list. */
 export type ReportSummary = z.infer<typeof reportSummarySchema>;
+/** A step as a client sends it. */
 export type StepSubmission = z.infer<typeof stepSubmissionSchema>;
+/** Steps to apply in order, all or none. */
 export type StepsRequest = z.infer<typeof stepsRequestSchema>;
+/** A step that was applied. */
 export type AcceptedStep = z.infer<typeof acceptedStepSchema>;
+/** Steps after a sequence number, and the newest number. */
 export type StepsView = z.infer<typeof stepsViewSchema>;
+/** What a person typed into a block and has not made a step yet. */
 export type DraftView = z.infer<typeof draftSchema>;
+/** Typing to keep, against one version of its block. */
 export type DraftRequest = z.infer<typeof draftRequestSchema>;
+/** A report with all that is needed to compose it. */
 export type ReportView = z.infer<typeof reportViewSchema>;
