@@ -11,23 +11,25 @@ import { BlockActions } from './block-actions';
   template: `
     <button
       type="button"
-      [class.wide]="label() !== ''"
+      [class]="label() === '' ? 'plus' : 'wide'"
       [matMenuTriggerFor]="kinds"
       [attr.aria-label]="label() === '' ? 'Add a block after ' + name() : null"
     >
       <eh-icon name="add" />
       {{ label() }}
     </button>
-    <mat-menu #kinds="matMenu" class="described-menu">
+    <mat-menu #kinds="matMenu">
       @for (kind of offered(); track kind.id) {
         <button mat-menu-item (click)="actions.add(kind.id, after())">
-          <b>{{ kind.label }}</b>
-          <small>{{ kind.description }}</small>
+          <span class="described">
+            <b>{{ kind.label }}</b>
+            <small>{{ kind.description }}</small>
+          </span>
         </button>
       }
     </mat-menu>
   `,
-  styleUrl: './add-block.scss',
+  styleUrls: ['./add-block.scss', './described-item.scss'],
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class AddBlock {

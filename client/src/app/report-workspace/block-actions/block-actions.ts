@@ -89,7 +89,8 @@ export class BlockActions {
     const others = this.store.blocks().filter((each) => each.id !== blockId);
     const previous = others[place - 1]?.id ?? null;
     const { orderKey, rekeyed } = placeAfter(report, previous, blockId);
-    this.make([moveStep(block, orderKey), ...this.rekeySteps(rekeyed)]);
+    if (!this.make([moveStep(block, orderKey), ...this.rekeySteps(rekeyed)])) return;
+    if (this.desk.selected() === blockId) this.desk.focusAfterDrawing(blockId);
   }
 
   /** Makes steps; says in plain words when one cannot be made. */

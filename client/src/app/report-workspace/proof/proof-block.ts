@@ -117,7 +117,7 @@ export class ProofBlock {
 
   protected leave(): void {
     this.desk.leave();
-    this.takeFocus();
+    this.host.focus();
   }
 
   private wasSelected = false;

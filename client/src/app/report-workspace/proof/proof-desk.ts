@@ -1,4 +1,12 @@
-import { computed, inject, Injectable, signal } from '@angular/core';
+import {
+  afterNextRender,
+  computed,
+  DOCUMENT,
+  inject,
+  Injectable,
+  Injector,
+  signal,
+} from '@angular/core';
 import type { RunOrigin } from '#shared/layout';
 import { CurrentStudy } from '../../session/current-study';
 import { ReportState } from '../report-store/report-state';
@@ -7,6 +15,8 @@ import { ReportStore } from '../report-store/report-store';
 /** What this person has in hand on the proof: a block, a text, a note. Nobody else sees it. */
 @Injectable()
 export class ProofDesk {
+  private readonly document = inject(DOCUMENT);
+  private readonly injector = inject(Injector);
   private readonly store = inject(ReportStore);
   private readonly state = inject(ReportState);
   private readonly study = inject(CurrentStudy);
@@ -48,6 +58,13 @@ export class ProofDesk {
   /** Leaves the words and keeps the block in hand. */
   leave(): void {
     this.opened.set(null);
+  }
+
+  /** Puts the focus back on a block that the page is about to draw elsewhere. */
+  focusAfterDrawing(blockId: string): void {
+    afterNextRender(() => this.document.getElementById(`block-${blockId}`)?.focus(), {
+      injector: this.injector,
+    });
   }
 
   /** The block that lies so many places after the one in hand. */

@@ -35,15 +35,18 @@ const DOWNLOADS: readonly Download[] = [
       {{ making() ?? 'Download' }}
       <eh-icon name="down" />
     </button>
-    <mat-menu #menu="matMenu" xPosition="before" class="described-menu">
+    <mat-menu #menu="matMenu" xPosition="before">
       @for (each of downloads; track each.format) {
         <button mat-menu-item (click)="download(each)">
-          <b>{{ each.name }}</b>
-          <small>{{ each.holds }}</small>
+          <span class="described">
+            <b>{{ each.name }}</b>
+            <small>{{ each.holds }}</small>
+          </span>
         </button>
       }
     </mat-menu>
   `,
+  styleUrl: '../block-actions/described-item.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class DownloadMenu {

@@ -8,6 +8,8 @@ export interface ListedValue extends ValueWords {
   readonly key: string;
   readonly address: ValueAddress;
   readonly text: string;
+  /** Of whom and where, in one line. */
+  readonly place: string;
 }
 
 /** How many values are shown at once; searching narrows them down. */
@@ -19,20 +21,19 @@ export function listedValues(
   phrasebook: Phrasebook,
   textOf: (address: ValueAddress) => string,
 ): readonly ListedValue[] {
-  return listValues(pin.result, pin.analysisId).map(({ address }) => ({
-    ...valueWords(address, pin, phrasebook),
-    key: addressKey(address),
-    address,
-    text: textOf(address),
-  }));
+  return listValues(pin.result, pin.analysisId).map(({ address }) => {
+    const words = valueWords(address, pin, phrasebook);
+    const place = [words.whom, words.where].filter(Boolean).join(', ');
+    return { ...words, place, key: addressKey(address), address, text: textOf(address) };
+  });
 }
 
 /** The values whose words or print hold every word that was typed, in any order. */
 export function found(values: readonly ListedValue[], search: string): readonly ListedValue[] {
   const wanted = plain(search).split(' ').filter(Boolean);
   if (wanted.length === 0) return values;
-  return values.filter(({ what, whom, where, text }) => {
-    const words = plain(`${what} ${whom} ${where} ${text}`);
+  return values.filter(({ what, place, text }) => {
+    const words = plain(`${what} ${place} ${text}`);
     return wanted.every((word) => words.includes(word));
   });
 }
