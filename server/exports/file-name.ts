@@ -9,7 +9,10 @@ export function exportFileName(title: string, extension: string): string {
     .replace(/[<>:"/\\|?*%]/g, ' ')
     .replace(/\s+/g, ' ')
     .replace(/^[.\s-]+/, '');
-  const short = Array.from(base).slice(0, LONGEST).join('').replace(/[.\s]+$/, '');
+  const short = Array.from(base)
+    .slice(0, LONGEST)
+    .join('')
+    .replace(/[.\s]+$/, '');
   return `${named(short)}.${extension}`;
 }
 

@@ -37,7 +37,11 @@ afterAll(async () => {
 
 const ORDER = { stratifiedTable: 'a1', groupedBarChart: 'a2' } as const;
 
-function showing(id: string, kind: 'stratifiedTable' | 'groupedBarChart', analysisId: string): Step {
+function showing(
+  id: string,
+  kind: 'stratifiedTable' | 'groupedBarChart',
+  analysisId: string,
+): Step {
   const content = { ...(blockOf(id, kind, null).content as object), analysisId };
   return { kind: 'insertBlock', block: { id, kind, orderKey: ORDER[kind], content } };
 }
@@ -57,47 +61,63 @@ async function download(format: string, browser = desk.browser): Promise<Respons
 }
 
 describe('GET /api/studies/:studyId/reports/:reportId/exports/docx', () => {
-  it('gives the report as it stands, under its title', async () => {
-    const response = await download('docx');
-    expect(response.status).toBe(200);
-    expect(response.type).toContain('wordprocessingml.document');
-    expect(response.headers['content-disposition']).toContain('Twelve-month results.docx');
-    const body = partTree(response.body as Buffer, 'word/document.xml');
-    const text = elementsNamed(body, 'w:t').map(textIn).join('');
-    expect(text).toContain('Twelve months of water.');
-    expect(text).toContain('34/163');
-    expect(elementsNamed(body, 'w:drawing')).toHaveLength(1);
-  }, TIME);
+  it(
+    'gives the report as it stands, under its title',
+    async () => {
+      const response = await download('docx');
+      expect(response.status).toBe(200);
+      expect(response.type).toContain('wordprocessingml.document');
+      expect(response.headers['content-disposition']).toContain('Twelve-month results.docx');
+      const body = partTree(response.body as Buffer, 'word/document.xml');
+      const text = elementsNamed(body, 'w:t').map(textIn).join('');
+      expect(text).toContain('Twelve months of water.');
+      expect(text).toContain('34/163');
+      expect(elementsNamed(body, 'w:drawing')).toHaveLength(1);
+    },
+    TIME,
+  );
 
-  it('gives the same bytes until the report changes', async () => {
-    const [one, other] = [await download('docx'), await download('docx')];
-    expect((one.body as Buffer).equals(other.body as Buffer)).toBe(true);
-    await desk.send({ kind: 'setFraming', framing: 'absolute' });
-    expect((await download('docx')).body).not.toEqual(one.body);
-  }, TIME);
+  it(
+    'gives the same bytes until the report changes',
+    async () => {
+      const [one, other] = [await download('docx'), await download('docx')];
+      expect((one.body as Buffer).equals(other.body as Buffer)).toBe(true);
+      await desk.send({ kind: 'setFraming', framing: 'absolute' });
+      expect((await download('docx')).body).not.toEqual(one.body);
+    },
+    TIME,
+  );
 
-  it('is open to every role of the study', async () => {
-    for (const role of STUDY_ROLES) {
-      const response = await download('docx', await application.memberBrowser(desk.study, role));
-      expect(response.status, role).toBe(200);
-    }
-  }, TIME);
+  it(
+    'is open to every role of the study',
+    async () => {
+      for (const role of STUDY_ROLES) {
+        const response = await download('docx', await application.memberBrowser(desk.study, role));
+        expect(response.status, role).toBe(200);
+      }
+    },
+    TIME,
+  );
 });
 
 describe('GET /api/studies/:studyId/reports/:reportId/exports/xlsx', () => {
-  it('gives tables, values and the code book behind them', async () => {
-    const response = await download('xlsx');
-    expect(response.status).toBe(200);
-    expect(response.type).toContain('spreadsheetml.sheet');
-    const workbook = partTree(response.body as Buffer, 'xl/workbook.xml');
-    expect(elementsNamed(workbook, 'sheet').map(({ attributes }) => attributes.name)).toEqual([
-      'Table 1',
-      'Figure 1',
-      'Values',
-      'Data dictionary',
-      'Notes',
-    ]);
-  }, TIME);
+  it(
+    'gives tables, values and the code book behind them',
+    async () => {
+      const response = await download('xlsx');
+      expect(response.status).toBe(200);
+      expect(response.type).toContain('spreadsheetml.sheet');
+      const workbook = partTree(response.body as Buffer, 'xl/workbook.xml');
+      expect(elementsNamed(workbook, 'sheet').map(({ attributes }) => attributes.name)).toEqual([
+        'Table 1',
+        'Figure 1',
+        'Values',
+        'Data dictionary',
+        'Notes',
+      ]);
+    },
+    TIME,
+  );
 });
 
 for (const format of ['docx', 'xlsx']) {
@@ -117,9 +137,13 @@ for (const format of ['docx', 'xlsx']) {
 }
 
 describe('GET /api/studies/:studyId/reports/:reportId/exports/docx rejects', () => {
-  it('a report of another study', async () => {
-    await expectNotFoundElsewhere('docx');
-  }, TIME);
+  it(
+    'a report of another study',
+    async () => {
+      await expectNotFoundElsewhere('docx');
+    },
+    TIME,
+  );
 
   it('a format that is not in the register', async () => {
     expect((await desk.browser.get(desk.inReport('/exports/exe'))).status).toBe(404);
@@ -127,9 +151,13 @@ describe('GET /api/studies/:studyId/reports/:reportId/exports/docx rejects', () 
 });
 
 describe('GET /api/studies/:studyId/reports/:reportId/exports/xlsx rejects', () => {
-  it('a report of another study', async () => {
-    await expectNotFoundElsewhere('xlsx');
-  }, TIME);
+  it(
+    'a report of another study',
+    async () => {
+      await expectNotFoundElsewhere('xlsx');
+    },
+    TIME,
+  );
 });
 
 /** Somebody who leads another study asks for this report, through either study's address. */

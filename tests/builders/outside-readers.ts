@@ -61,7 +61,11 @@ export async function shownSheets(
 ): Promise<Readonly<Record<string, readonly (readonly string[])[]>>> {
   return withFile('book.xlsx', bytes, async (folder) => {
     // Comma, quotes, UTF-8, from the first line, as shown, every sheet in a file of its own.
-    await convert(folder, 'book.xlsx', `csv:${CSV_FILTER}:44,34,76,1,,0,false,true,true,false,false,-1`);
+    await convert(
+      folder,
+      'book.xlsx',
+      `csv:${CSV_FILTER}:44,34,76,1,,0,false,true,true,false,false,-1`,
+    );
     const files = (await readdir(folder)).filter((file) => file.endsWith('.csv'));
     const sheets = files.map(async (file): Promise<[string, string[][]]> => {
       const name = file.slice('book-'.length, -'.csv'.length);
@@ -77,7 +81,7 @@ export async function askPython(name: string, bytes: Uint8Array, script: string)
     const { stdout } = await run('/usr/bin/python3', ['-c', script, join(folder, name)], {
       maxBuffer: LARGE,
     });
-    return JSON.parse(stdout);
+    return JSON.parse(stdout) as unknown;
   });
 }
 

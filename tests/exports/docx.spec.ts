@@ -6,7 +6,7 @@ import { sampleRequest } from './sample-request';
 
 const REQUEST = sampleRequest();
 
-/** Sequences of the schema. Source: ISO/IEC 29500-1, annex A (CT_PPr, CT_RPr, CT_TcPr, CT_SectPr). */
+/** Sequences of the schema. Source: ISO/IEC 29500-1, annex A (CT_PPr and its like). */
 const PROPERTY_ORDERS: Readonly<Record<string, readonly string[]>> = {
   'w:pPr': words(
     'pStyle keepNext keepLines pageBreakBefore framePr widowControl numPr suppressLineNumbers pBdr',
@@ -119,7 +119,9 @@ describe('captions', () => {
   });
 
   it('are what cross-references point to', () => {
-    const bookmarks = elementsNamed(body, 'w:bookmarkStart').map((mark) => mark.attributes['w:name']);
+    const bookmarks = elementsNamed(body, 'w:bookmarkStart').map(
+      (mark) => mark.attributes['w:name'],
+    );
     const references = elementsNamed(body, 'w:instrText')
       .map((text) => /REF (\S+)/.exec(textIn(text))?.[1])
       .filter((name) => name !== undefined);
@@ -141,7 +143,9 @@ describe('tables', () => {
 
   it('print what the proof prints, cell by cell', () => {
     const [first] = tablesOf(REQUEST.report);
-    const texts = elementsNamed(grid(0), 'w:tr').map((row) => elementsNamed(row, 'w:tc').map(shown));
+    const texts = elementsNamed(grid(0), 'w:tr').map((row) =>
+      elementsNamed(row, 'w:tc').map(shown),
+    );
     const expected = [...first!.head, ...first!.rows.map(({ cells }) => cells)].map((cells) =>
       cells.map(({ runs }) => runs.map(({ text }) => text).join('')),
     );
@@ -169,7 +173,9 @@ describe('tables', () => {
   it('have fixed widths that fit the text', () => {
     for (const table of elementsNamed(body, 'w:tbl').slice(0, 3)) {
       const layout = elementsNamed(table, 'w:tblLayout')[0]!.attributes['w:type'];
-      const widths = elementsNamed(table, 'w:gridCol').map((column) => Number(column.attributes['w:w']));
+      const widths = elementsNamed(table, 'w:gridCol').map((column) =>
+        Number(column.attributes['w:w']),
+      );
       expect(layout).toBe('fixed');
       expect(widths.reduce((total, width) => total + width, 0)).toBeLessThanOrEqual(9072);
     }
@@ -181,7 +187,9 @@ describe('tables', () => {
     expect(paragraphs('Caption').map(shown)).toContain('Table\u00a04, continued');
     const [wide] = tablesOf(REQUEST.report).slice(-1);
     const panels = elementsNamed(body, 'w:tbl').slice(3);
-    const cells = panels.flatMap((panel) => elementsNamed(panel, 'w:tr').flatMap((row) => elementsNamed(row, 'w:tc').map(shown)));
+    const cells = panels.flatMap((panel) =>
+      elementsNamed(panel, 'w:tr').flatMap((row) => elementsNamed(row, 'w:tc').map(shown)),
+    );
     for (const { cells: printed } of wide!.rows) {
       for (const { runs } of printed) {
         expect(cells).toContain(runs.map(({ text }) => text).join(''));
@@ -224,7 +232,9 @@ describe('the document', () => {
       for (const [name, order] of Object.entries(PROPERTY_ORDERS)) {
         for (const element of elementsNamed(tree, name)) {
           const children = element.children.map((child) => (child as XmlElement).name.slice(2));
-          const sorted = children.toSorted((one, other) => order.indexOf(one) - order.indexOf(other));
+          const sorted = children.toSorted(
+            (one, other) => order.indexOf(one) - order.indexOf(other),
+          );
           expect(order).toEqual(expect.arrayContaining(children));
           expect(children).toEqual(sorted);
         }
@@ -241,7 +251,12 @@ describe('the document', () => {
   });
 
   it('has no part that is not well-formed', () => {
-    for (const path of ['word/styles.xml', 'word/numbering.xml', 'word/settings.xml', 'docProps/core.xml']) {
+    for (const path of [
+      'word/styles.xml',
+      'word/numbering.xml',
+      'word/settings.xml',
+      'docProps/core.xml',
+    ]) {
       expect(() => partTree(file, path)).not.toThrow();
     }
   });

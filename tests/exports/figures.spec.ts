@@ -38,7 +38,9 @@ describe('a figure for print', () => {
   });
 
   it('has type of the size that the house style says', () => {
-    const sizes = elementsNamed(parseXml(svg), 'text').map(({ attributes }) => attributes['font-size']);
+    const sizes = elementsNamed(parseXml(svg), 'text').map(
+      ({ attributes }) => attributes['font-size'],
+    );
     const eightPoints = `${(8 * 96) / 72}px`;
     expect(new Set(sizes)).toEqual(new Set([eightPoints]));
   });

@@ -32,24 +32,30 @@ function request(typed: string) {
 }
 
 describe('in a document', () => {
-  it.each(LABELS)('stays text: %s', async (_name, typed, shown) => {
-    const file = await exported('docx', request(typed));
-    const body = partTree(file, 'word/document.xml');
-    const heading = elementsNamed(body, 'w:p').find((paragraph) =>
-      elementsNamed(paragraph, 'w:pStyle').some(({ attributes }) => attributes['w:val'] === 'Heading1'),
-    )!;
-    const lines = elementsNamed(heading, 'w:t').map(textIn);
-    expect(lines.join('\n')).toBe(shown);
-    expect(elementsNamed(body, 'w:instrText').map((text) => textIn(text).trim())).toEqual([
-      'REF _Ref100000001 \\h \\* MERGEFORMAT',
-      'SEQ Table \\* ARABIC',
-      'SEQ Figure \\* ARABIC',
-    ]);
-    expect(elementsNamed(body, 'wp:docPr')[0]!.attributes.descr).toBe(shown.replace('\n', ' '));
-    const title = elementsNamed(partTree(file, 'docProps/core.xml'), 'dc:title').map(textIn);
-    expect(title).toEqual([shown.replace('\n', ' ')]);
-    expect(() => partTree(file, 'word/media/image1.svg')).not.toThrow();
-  }, 60_000);
+  it.each(LABELS)(
+    'stays text: %s',
+    async (_name, typed, shown) => {
+      const file = await exported('docx', request(typed));
+      const body = partTree(file, 'word/document.xml');
+      const heading = elementsNamed(body, 'w:p').find((paragraph) =>
+        elementsNamed(paragraph, 'w:pStyle').some(
+          ({ attributes }) => attributes['w:val'] === 'Heading1',
+        ),
+      )!;
+      const lines = elementsNamed(heading, 'w:t').map(textIn);
+      expect(lines.join('\n')).toBe(shown);
+      expect(elementsNamed(body, 'w:instrText').map((text) => textIn(text).trim())).toEqual([
+        'REF _Ref100000001 \\h \\* MERGEFORMAT',
+        'SEQ Table \\* ARABIC',
+        'SEQ Figure \\* ARABIC',
+      ]);
+      expect(elementsNamed(body, 'wp:docPr')[0]!.attributes.descr).toBe(shown.replace('\n', ' '));
+      const title = elementsNamed(partTree(file, 'docProps/core.xml'), 'dc:title').map(textIn);
+      expect(title).toEqual([shown.replace('\n', ' ')]);
+      expect(() => partTree(file, 'word/media/image1.svg')).not.toThrow();
+    },
+    60_000,
+  );
 
   it('a link to a script is no link', async () => {
     const file = await exported('docx', laidRequest());
@@ -64,24 +70,40 @@ describe('in a document', () => {
 });
 
 describe('in a workbook', () => {
-  it.each(LABELS)('stays text: %s', async (_name, typed, shown) => {
-    const file = await exported('xlsx', request(typed));
-    const sheet = partTree(file, 'xl/worksheets/sheet1.xml');
-    expect(elementsNamed(sheet, 'f')).toHaveLength(0);
-    const strings = elementsNamed(partTree(file, 'xl/sharedStrings.xml'), 'si').map((item) =>
-      elementsNamed(item, 't').map(textIn).join('').replace(/_x005F_/g, '_'),
-    );
-    expect(strings).toContain(shown);
-    expect(elementsNamed(partTree(file, 'xl/workbook.xml'), 'sheet')[0]!.attributes.name).toBe('Table 1');
-  }, 60_000);
+  it.each(LABELS)(
+    'stays text: %s',
+    async (_name, typed, shown) => {
+      const file = await exported('xlsx', request(typed));
+      const sheet = partTree(file, 'xl/worksheets/sheet1.xml');
+      expect(elementsNamed(sheet, 'f')).toHaveLength(0);
+      const strings = elementsNamed(partTree(file, 'xl/sharedStrings.xml'), 'si').map((item) =>
+        elementsNamed(item, 't')
+          .map(textIn)
+          .join('')
+          .replace(/_x005F_/g, '_'),
+      );
+      expect(strings).toContain(shown);
+      expect(elementsNamed(partTree(file, 'xl/workbook.xml'), 'sheet')[0]!.attributes.name).toBe(
+        'Table 1',
+      );
+    },
+    60_000,
+  );
 
-  it.each(LABELS.slice(0, 6))('is marked as text for who edits it: %s', async (_name, typed, shown) => {
-    const file = await exported('xlsx', request(typed));
-    const strings = elementsNamed(partTree(file, 'xl/sharedStrings.xml'), 'si').map(textIn);
-    const cell = elementsNamed(partTree(file, 'xl/worksheets/sheet1.xml'), 'c').find(
-      (one) => one.attributes.t === 's' && strings[Number(textIn(one))] === shown,
-    )!;
-    const formats = elementsNamed(elementsNamed(partTree(file, 'xl/styles.xml'), 'cellXfs')[0]!, 'xf');
-    expect(formats[Number(cell.attributes.s)]!.attributes.quotePrefix).toBe('1');
-  }, 60_000);
+  it.each(LABELS.slice(0, 6))(
+    'is marked as text for who edits it: %s',
+    async (_name, typed, shown) => {
+      const file = await exported('xlsx', request(typed));
+      const strings = elementsNamed(partTree(file, 'xl/sharedStrings.xml'), 'si').map(textIn);
+      const cell = elementsNamed(partTree(file, 'xl/worksheets/sheet1.xml'), 'c').find(
+        (one) => one.attributes.t === 's' && strings[Number(textIn(one))] === shown,
+      )!;
+      const formats = elementsNamed(
+        elementsNamed(partTree(file, 'xl/styles.xml'), 'cellXfs')[0]!,
+        'xf',
+      );
+      expect(formats[Number(cell.attributes.s)]!.attributes.quotePrefix).toBe('1');
+    },
+    60_000,
+  );
 });

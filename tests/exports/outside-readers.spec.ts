@@ -37,15 +37,22 @@ describe.skipIf(skipsWithout('libreOffice', 'popplerText'))('LibreOffice', () =>
     TIME,
   );
 
-  it('breaks no number over two lines', async () => {
-    const request = sampleRequest();
-    const text = await printedText('report.docx', await exported('docx', request));
-    const lines = text.split('\n').map(plain);
-    for (const cell of cellsOf(request.report.elements.filter(isTable))) {
-      const printed = plain(cell.runs.map((run) => run.text).join(''));
-      expect(lines.some((line) => line.includes(printed)), printed).toBe(true);
-    }
-  }, TIME);
+  it(
+    'breaks no number over two lines',
+    async () => {
+      const request = sampleRequest();
+      const text = await printedText('report.docx', await exported('docx', request));
+      const lines = text.split('\n').map(plain);
+      for (const cell of cellsOf(request.report.elements.filter(isTable))) {
+        const printed = plain(cell.runs.map((run) => run.text).join(''));
+        expect(
+          lines.some((line) => line.includes(printed)),
+          printed,
+        ).toBe(true);
+      }
+    },
+    TIME,
+  );
 
   it.each(HOUSE_STYLE_IDS)(
     'shows in the workbook the digits that the report prints: %s',
@@ -62,55 +69,69 @@ describe.skipIf(skipsWithout('libreOffice', 'popplerText'))('LibreOffice', () =>
     TIME,
   );
 
-  it('reads no label as a formula', async () => {
-    const labels = { title: '=1+1', words: '=1+1', level: '@SUM(1)', category: '-2+3' };
-    const sheets = await shownSheets(await exported('xlsx', laidRequest(labels)));
-    expect(sheets['Table 1']!.flat()).toEqual(expect.arrayContaining(['=1+1', '@SUM(1)']));
-    expect(sheets['Figure 1']!.flat()).toEqual(expect.arrayContaining(['-2+3']));
-    const all = [...sheets['Table 1']!, ...sheets['Figure 1']!].flat();
-    expect(all.filter((text) => /^[12]$|Err/.test(text))).toEqual([]);
-  }, TIME);
+  it(
+    'reads no label as a formula',
+    async () => {
+      const labels = { title: '=1+1', words: '=1+1', level: '@SUM(1)', category: '-2+3' };
+      const sheets = await shownSheets(await exported('xlsx', laidRequest(labels)));
+      expect(sheets['Table 1']!.flat()).toEqual(expect.arrayContaining(['=1+1', '@SUM(1)']));
+      expect(sheets['Figure 1']!.flat()).toEqual(expect.arrayContaining(['-2+3']));
+      const all = [...sheets['Table 1']!, ...sheets['Figure 1']!].flat();
+      expect(all.filter((text) => /^[12]$|Err/.test(text))).toEqual([]);
+    },
+    TIME,
+  );
 });
 
 describe.skipIf(skipsWithout('openpyxl'))('openpyxl', () => {
-  it('reads every value at full precision', async () => {
-    const found = await askPython(
-      'report.xlsx',
-      await exported('xlsx', sampleRequest()),
-      `
+  it(
+    'reads every value at full precision',
+    async () => {
+      const found = await askPython(
+        'report.xlsx',
+        await exported('xlsx', sampleRequest()),
+        `
 import json, sys, openpyxl
 sheet = openpyxl.load_workbook(sys.argv[1])['Values']
 print(json.dumps([row[7].value for row in sheet.iter_rows(min_row=2)]))
 `,
-    );
-    const expected = SAMPLE_PINS.flatMap((pin) => listValues(pin.result, pin.analysisId));
-    expect(found).toEqual(expected.map(({ quantity }) => numberOf(quantity)));
-  }, TIME);
+      );
+      const expected = SAMPLE_PINS.flatMap((pin) => listValues(pin.result, pin.analysisId));
+      expect(found).toEqual(expected.map(({ quantity }) => numberOf(quantity)));
+    },
+    TIME,
+  );
 
-  it('sees text where labels look like formulas, marked for who edits them', async () => {
-    const found = await askPython(
-      'report.xlsx',
-      await exported('xlsx', laidRequest({ level: '=1+1' })),
-      `
+  it(
+    'sees text where labels look like formulas, marked for who edits them',
+    async () => {
+      const found = await askPython(
+        'report.xlsx',
+        await exported('xlsx', laidRequest({ level: '=1+1' })),
+        `
 import json, sys, openpyxl
 sheet = openpyxl.load_workbook(sys.argv[1])['Table 1']
 cells = [cell for row in sheet.iter_rows() for cell in row if cell.value == '=1+1']
 print(json.dumps([[cell.data_type, cell.quotePrefix] for cell in cells]))
 `,
-    );
-    expect(found).toEqual([
-      ['s', true],
-      ['s', true],
-    ]);
-  }, TIME);
+      );
+      expect(found).toEqual([
+        ['s', true],
+        ['s', true],
+      ]);
+    },
+    TIME,
+  );
 });
 
 describe.skipIf(skipsWithout('pythonDocx'))('python-docx', () => {
-  it('finds styles, tables, properties and the picture', async () => {
-    const found = await askPython(
-      'report.docx',
-      await exported('docx', laidRequest()),
-      `
+  it(
+    'finds styles, tables, properties and the picture',
+    async () => {
+      const found = await askPython(
+        'report.docx',
+        await exported('docx', laidRequest()),
+        `
 import json, sys, docx
 document = docx.Document(sys.argv[1])
 table = document.tables[0]
@@ -122,30 +143,32 @@ print(json.dumps({
   'pictures': len(document.inline_shapes),
 }))
 `,
-    );
-    expect(found).toMatchObject({
-      row: ['Over 6 h', '34/12\u202f163', '+16.2 (−0.1 to +23.4)'],
-      title: 'A laid report',
-      modified: '2026-02-03T23:30:00',
-      pictures: 1,
-    });
-    expect((found as { styles: string[] }).styles).toEqual([
-      'Title',
-      'Draft Note',
-      'Draft Note',
-      'Draft Note',
-      'Heading 1',
-      'Body Text',
-      'List Number',
-      'List Bullet',
-      'Caption',
-      'Table Note',
-      'Table Note',
-      'Figure',
-      'Caption',
-      'Problem',
-    ]);
-  }, TIME);
+      );
+      expect(found).toMatchObject({
+        row: ['Over 6 h', '34/12\u202f163', '+16.2 (−0.1 to +23.4)'],
+        title: 'A laid report',
+        modified: '2026-02-03T23:30:00',
+        pictures: 1,
+      });
+      expect((found as { styles: string[] }).styles).toEqual([
+        'Title',
+        'Draft Note',
+        'Draft Note',
+        'Draft Note',
+        'Heading 1',
+        'Body Text',
+        'List Number',
+        'List Bullet',
+        'Caption',
+        'Table Note',
+        'Table Note',
+        'Figure',
+        'Caption',
+        'Problem',
+      ]);
+    },
+    TIME,
+  );
 });
 
 /** Pictures hold outlines; their numbers are in the sheets of the workbook. */

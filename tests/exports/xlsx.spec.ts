@@ -89,10 +89,12 @@ describe('a table', () => {
   });
 
   it('merges heads above the lowest row of heads only', () => {
-    const merged = elementsNamed(sheet('Table 1'), 'mergeCell').map(({ attributes }) => attributes.ref);
-    expect(merged.every((range) => !/[A-Z]+(3|[4-9]|1\d):/.test(range!) || range!.startsWith('A'))).toBe(
-      true,
+    const merged = elementsNamed(sheet('Table 1'), 'mergeCell').map(
+      ({ attributes }) => attributes.ref,
     );
+    expect(
+      merged.every((range) => !/[A-Z]+(3|[4-9]|1\d):/.test(range!) || range!.startsWith('A')),
+    ).toBe(true);
   });
 });
 
@@ -107,7 +109,9 @@ describe('the values', () => {
   });
 
   it('are named in words and by address, with the exact fraction where there is one', () => {
-    const row = rowsOf('Values').find((cells) => cells.at(-1) === 'a1/risk/over6/stratum:ward/value');
+    const row = rowsOf('Values').find(
+      (cells) => cells.at(-1) === 'a1/risk/over6/stratum:ward/value',
+    );
     expect(row).toEqual([
       'A1',
       'Hand eczema by wet work',
@@ -149,7 +153,10 @@ it('says in the notes what to mind, what was done, and what could not be printed
 it('names a font in every cell', () => {
   const fonts = elementsNamed(partTree(file, 'xl/styles.xml'), 'font');
   const cells = sheetNames().flatMap((name) => elementsNamed(sheet(name), 'c'));
-  const formats = elementsNamed(elementsNamed(partTree(file, 'xl/styles.xml'), 'cellXfs')[0]!, 'xf');
+  const formats = elementsNamed(
+    elementsNamed(partTree(file, 'xl/styles.xml'), 'cellXfs')[0]!,
+    'xf',
+  );
   const names = cells.map((cell) => {
     const font = fonts[Number(formats[Number(cell.attributes.s)]!.attributes.fontId)]!;
     return elementsNamed(font, 'name')[0]!.attributes.val;

@@ -16,11 +16,7 @@ export interface FigurePicture {
  * whatever fonts a reader has. A text that the fonts of figures can't show stays text instead, for
  * the reader's fonts, and this machine's fonts fill in for the raster.
  */
-export function figurePicture(
-  svg: string,
-  fonts: FigureFonts,
-  dotsPerInch: number,
-): FigurePicture {
+export function figurePicture(svg: string, fonts: FigureFonts, dotsPerInch: number): FigurePicture {
   const covered = fonts.cover(textsOf(svg));
   const drawn = new Resvg(svg, {
     background: FIGURE_COLOURS.print.page,

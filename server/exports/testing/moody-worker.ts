@@ -9,6 +9,8 @@ parentPort?.on('message', ({ request }: ExportJob) => {
   if (title === 'end') process.exit(3);
   made += 1;
   const answer: WorkerAnswer =
-    title === 'fail' ? { ok: false, reason: 'It failed.' } : { ok: true, bytes: Uint8Array.of(made) };
+    title === 'fail'
+      ? { ok: false, reason: 'It failed.' }
+      : { ok: true, bytes: Uint8Array.of(made) };
   parentPort?.postMessage(answer);
 });

@@ -15,7 +15,7 @@ export interface ExportedReport {
   readonly bytes: Uint8Array;
 }
 
-/** Makes a file of a report as it is stored now. The same state of a report gives the same bytes. */
+/** Makes a file of a report as it is stored now; the same state gives the same bytes. */
 export async function exportReport(
   dependencies: Dependencies,
   study: Study,

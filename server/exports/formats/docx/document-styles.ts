@@ -124,7 +124,10 @@ function paragraph(
 }
 
 /** Lines of single height; the rule is named because without it readers clip pictures. */
-function singleLine(before: number, after: number): {
+function singleLine(
+  before: number,
+  after: number,
+): {
   readonly line: number;
   readonly lineRule: typeof LineRuleType.AUTO;
   readonly before: number;

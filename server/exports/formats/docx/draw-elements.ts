@@ -88,10 +88,7 @@ function drawTable(element: ElementOf<'table'>, context: DocumentContext): Drawn
   };
 }
 
-function drawFigure(
-  element: ElementOf<'figure'>,
-  context: DocumentContext,
-): readonly FileChild[] {
+function drawFigure(element: ElementOf<'figure'>, context: DocumentContext): readonly FileChild[] {
   const { blockId, caption, notes } = element;
   const above = context.houseStyle.caption.figurePlace === 'above';
   const hasNotes = notes.length > 0;

@@ -63,9 +63,8 @@ function numbered(id: string, numbers: Map<string, number>): number {
 }
 
 function withLinkIds(relations: string, links: ReadonlyMap<string, string>): string {
-  return relations.replace(
-    / Id="([^"]+)"/g,
-    (whole, id: string) => (links.has(id) ? ` Id="${links.get(id) ?? id}"` : whole),
+  return relations.replace(/ Id="([^"]+)"/g, (whole, id: string) =>
+    links.has(id) ? ` Id="${links.get(id) ?? id}"` : whole,
   );
 }
 

@@ -9,7 +9,10 @@ export function twips(points: number): number {
 }
 
 /** The size of a portrait page in twips; Word turns it by itself. */
-export function paperSize({ paper }: PageStyle): { readonly width: number; readonly height: number } {
+export function paperSize({ paper }: PageStyle): {
+  readonly width: number;
+  readonly height: number;
+} {
   return PAPERS[paper];
 }
 

@@ -16,10 +16,7 @@ export const CELL_MARGIN = 3;
  * Sets the panels of a table alike, so that no number and no word breaks: upright where that fits,
  * else on a page that lies on its side, else in smaller type. Null where nothing fits.
  */
-export function settingOf(
-  panels: readonly TableElement[],
-  style: HouseStyle,
-): TableSetting | null {
+export function settingOf(panels: readonly TableElement[], style: HouseStyle): TableSetting | null {
   const fitting = settingsOf(style).find((setting) =>
     panels.every((panel) => spareWidth(panel, setting, style) >= 0),
   );

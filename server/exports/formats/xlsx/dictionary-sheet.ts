@@ -16,7 +16,12 @@ export function dictionarySheet(codeBooks: readonly ExportedCodeBook[]): SheetPl
   return {
     name: 'Data dictionary',
     rows: [
-      cellsRow(lookingLike(HEADS.map((text) => words(text)), { bold: true, bottom: 'thin' })),
+      cellsRow(
+        lookingLike(
+          HEADS.map((text) => words(text)),
+          { bold: true, bottom: 'thin' },
+        ),
+      ),
       ...codeBooks.flatMap((book) =>
         book.codeBook.columns.flatMap((column) => columnRows(column, book)),
       ),

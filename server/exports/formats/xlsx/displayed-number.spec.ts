@@ -30,9 +30,7 @@ describe('a displayed number', () => {
 
   it('has a true minus, and a plus where the report prints one', () => {
     expect(displayedNumber(percent(-0.0113, '−1.1'), STYLE).format).toBe('0.0;"−"0.0;0.0');
-    expect(displayedNumber(percent(0.0113, '+1.1', true), STYLE).format).toBe(
-      '"+"0.0;"−"0.0;0.0',
-    );
+    expect(displayedNumber(percent(0.0113, '+1.1', true), STYLE).format).toBe('"+"0.0;"−"0.0;0.0');
   });
 
   it('shows no minus before zeros', () => {
@@ -43,8 +41,17 @@ describe('a displayed number', () => {
   });
 
   it('groups thousands as the house style does', () => {
-    const count = (value: number, text: string) => ({ value, scale: 1, decimals: 0, signed: false, text });
-    const narrow: NumberStyle = { ...STYLE, thousands: { separator: 'narrowSpace', fromDigits: 5 } };
+    const count = (value: number, text: string) => ({
+      value,
+      scale: 1,
+      decimals: 0,
+      signed: false,
+      text,
+    });
+    const narrow: NumberStyle = {
+      ...STYLE,
+      thousands: { separator: 'narrowSpace', fromDigits: 5 },
+    };
     expect(displayedNumber(count(1309, '1309'), STYLE).format).toBe('0');
     expect(displayedNumber(count(12345, '12,345'), STYLE).format).toBe('#,##0');
     expect(displayedNumber(count(12345, '12\u202f345'), narrow).format).toBe('#"\u202f"##0');

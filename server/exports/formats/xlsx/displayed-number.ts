@@ -26,15 +26,16 @@ export function displayedNumber(
   const shown = roundRational(rationalOfFifteenDigits(scaled), 1, number.decimals, 'halfUp');
   // A sheet shows a minus before a negative number even where nothing but zeros is left of it.
   const agrees = shown.units === printed && (printed !== 0n || scaled === 0);
-  const value = agrees
-    ? scaled
-    : numberOfDecimal({ units: printed, decimals: number.decimals });
+  const value = agrees ? scaled : numberOfDecimal({ units: printed, decimals: number.decimals });
   return { value, format: numberFormat(number, value, style) };
 }
 
 /** The figure in whole units of its last decimal; null where it is no plain number. */
 function printedUnits(text: string): bigint | null {
-  const plain = text.replace(/[\s,.·\u202f\u00a0]/g, '').replace(/^\+/, '').replace(MINUS, '-');
+  const plain = text
+    .replace(/[\s,.·\u202f\u00a0]/g, '')
+    .replace(/^\+/, '')
+    .replace(MINUS, '-');
   return /^-?\d+$/.test(plain) ? BigInt(plain) : null;
 }
 

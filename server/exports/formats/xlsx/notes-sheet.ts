@@ -49,7 +49,11 @@ function analysisFacts(
 ): readonly (readonly [string, string])[] {
   const { cut, number, name, result, analysisId } = pin;
   const day = dayInWords(cut.dataDate, houseStyle.language);
-  const source = `${name}: data cut ${String(cut.number)}, data of ${day}, engine ${result.engineVersion}.`;
+  const engine = `engine ${result.engineVersion}`;
+  const source = `${name}: data cut ${String(cut.number)}, data of ${day}, ${engine}.`;
   const methods = methodsNoteOf({ analysisId, result }, houseStyle, phrasebook).map(phraseText);
-  return [[`Analysis ${number}`, source], ...methods.map((text) => [`Methods ${number}`, text] as const)];
+  return [
+    [`Analysis ${number}`, source],
+    ...methods.map((text) => [`Methods ${number}`, text] as const),
+  ];
 }

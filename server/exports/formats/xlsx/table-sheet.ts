@@ -121,12 +121,7 @@ function headAt(
 }
 
 /** Whether a spanner to the left reaches over the column. */
-function isCovered(
-  table: TableElement,
-  places: HeadPlaces,
-  row: number,
-  column: number,
-): boolean {
+function isCovered(table: TableElement, places: HeadPlaces, row: number, column: number): boolean {
   return (places[row] ?? []).some((place, index) => {
     const span = table.head[row]?.[index]?.columnSpan ?? 1;
     return place < column && column < place + span;

@@ -17,7 +17,12 @@ export function valuesSheet(pins: readonly PinnedAnalysis[], phrasebook: Phraseb
   return {
     name: 'Values',
     rows: [
-      cellsRow(lookingLike(HEADS.map(([text, align]) => words(text, { align })), HEAD_LOOK)),
+      cellsRow(
+        lookingLike(
+          HEADS.map(([text, align]) => words(text, { align })),
+          HEAD_LOOK,
+        ),
+      ),
       ...pins.flatMap((pin) => analysisRows(pin, phrasebook)),
     ],
     widestColumn: 220,

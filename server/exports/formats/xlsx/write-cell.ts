@@ -51,9 +51,13 @@ function writeWords(cell: Cell, runs: readonly Run[], style: HouseStyle, look: C
       .filter((run) => run.text !== '')
       .map((run) => ({
         text: cellText(printableText(run.text)),
-        font: Object.assign(fontOf(style, look), ...(run.marks ?? []).map((mark) => MARKS[mark])),
+        font: markedFont(run.marks ?? [], fontOf(style, look)),
       })),
   };
+}
+
+function markedFont(marks: readonly RunMark[], font: Partial<Font>): Partial<Font> {
+  return marks.reduce((marked, mark) => ({ ...marked, ...MARKS[mark] }), font);
 }
 
 /** The secondary mark is for the screen. */

@@ -50,13 +50,14 @@ const READABLE_WIDTH = 1400;
 function setUpPrint(sheet: Worksheet, plan: SheetPlan, { page }: HouseStyle, width: number): void {
   const { first, last } = plan.headRows;
   sheet.pageSetup = {
-    ...(page.paper === 'A4' ? { paperSize: A4 } : {}),
     orientation: width > PORTRAIT_WIDTH ? 'landscape' : 'portrait',
     ...(width > READABLE_WIDTH
       ? { printTitlesColumn: 'A:A' }
       : { fitToPage: true, fitToWidth: 1, fitToHeight: 0 }),
     printTitlesRow: `${String(first)}:${String(last)}`,
   };
+  // The library's type for papers is an enumeration that is not there when programs run.
+  if (page.paper === 'A4') Object.assign(sheet.pageSetup, { paperSize: A4 });
   sheet.headerFooter.oddFooter = '&C&A · &P / &N';
 }
 
@@ -88,7 +89,13 @@ function neededWidth({ content, look, across }: SheetCell): number {
 }
 
 /** A text about as long as what the format shows. */
-function shownLength({ value, format }: { readonly value: number; readonly format: string }): string {
+function shownLength({
+  value,
+  format,
+}: {
+  readonly value: number;
+  readonly format: string;
+}): string {
   if (format === 'General') return '0.000000000';
   const decimals = /\.(0+)/.exec(format)?.[1]?.length ?? 0;
   return `+${value.toFixed(decimals)}`;

@@ -1,6 +1,6 @@
 import { expect, it } from 'vitest';
-import { exported, inLines, partText } from './file-parts';
-import { laidRequest } from './laid-report';
+import { exported, inLines, partText } from '../exports/file-parts';
+import { laidRequest } from '../exports/laid-report';
 
 // What one of every element becomes. A change of these files is a change of every export: read it.
 
@@ -23,5 +23,5 @@ it.each(['xl/worksheets/sheet1.xml', 'xl/sharedStrings.xml', 'xl/styles.xml'])(
 );
 
 function golden(path: string): string {
-  return `golden/${path.replaceAll('/', '-')}`;
+  return `exports/${path.replaceAll('/', '-')}`;
 }
