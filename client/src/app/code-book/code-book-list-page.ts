@@ -15,7 +15,7 @@ import { counted } from '../ui/words';
   selector: 'eh-code-book-list-page',
   imports: [Bar, EmptyState, ProblemPanel, RouterLink],
   template: `
-    <eh-bar heading="Code books" [context]="study()?.title ?? ''" [contextLink]="home()" />
+    <eh-bar heading="Code books" [contextText]="study()?.title ?? ''" [contextLink]="home()" />
     <div class="page">
       @if (problem(); as problem) {
         <eh-problem-panel [problem]="problem" />

@@ -111,11 +111,12 @@ export class BenchStore {
     const result = this.result();
     return result === null ? [] : scopesOf(result);
   });
-  /** The layer in view; stays while it is there, else the pooled one or all records. */
+  /** The layer in view: the pooled one as soon as there are strata, until another is chosen. */
   readonly scope = linkedSignal<readonly ResultScope[], ResultScope>({
     source: this.scopes,
     computation: (scopes, before) => {
-      const kept = scopes.find((scope) => before !== undefined && sameScope(scope, before.value));
+      const chosen = before !== undefined && before.source.length > 1 ? before.value : null;
+      const kept = scopes.find((scope) => chosen !== null && sameScope(scope, chosen));
       return kept ?? scopes.find(({ kind }) => kind === 'pooled') ?? { kind: 'crude' };
     },
   });

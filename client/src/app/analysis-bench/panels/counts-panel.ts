@@ -1,5 +1,4 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import type { AnalysisResult, LayerResult } from '#shared/analysis';
 import { columnHeads } from '#shared/wording';
 import { formatCount } from '#shared/format';
 import { ScrollSideways } from '../../ui/scroll-sideways';
@@ -7,9 +6,6 @@ import { BenchStore } from '../bench/bench-store';
 import { columnById } from '../draft/column-choices';
 import type { BenchPrint } from '../print/bench-print';
 import { countsTable } from '../print/counts-rows';
-
-/** More strata than this stand below each other. */
-const MOST_BESIDE = 2;
 
 /** The counts behind every number: levels by outcome, stratum by stratum. */
 @Component({
@@ -29,12 +25,11 @@ export class CountsPanel {
     const print = this.store.print();
     return print === null ? null : headsOf(print);
   });
-  /** Tables of layers that stand beside each other; several tables stand below each other. */
-  protected readonly tables = computed(() => {
+  protected readonly table = computed(() => {
     const print = this.store.print();
-    if (print === null) return [];
-    return layersBeside(print.result).map((layers) => countsTable(print, layers));
+    return print === null ? null : countsTable(print);
   });
+  protected readonly layerColumns = computed(() => (this.givesRisk() ? 3 : 2));
   protected readonly summary = computed(() => {
     const print = this.store.print();
     return print === null ? '' : summaryOf(print);
@@ -72,11 +67,6 @@ function headsOf({ result, style, book }: BenchPrint): CountHeads {
     without: isCaseControl ? heads.controls : 'Without',
     risk: heads.share,
   };
-}
-
-function layersBeside({ crude, strata }: AnalysisResult): readonly (readonly LayerResult[])[] {
-  if (strata.length === 0) return [[crude]];
-  return strata.length <= MOST_BESIDE ? [strata] : strata.map((layer) => [layer]);
 }
 
 function summaryOf({ result, style }: BenchPrint): string {

@@ -10,11 +10,12 @@ import { levelLabel, sameScope, scopeLabel } from '../bench/result-scopes';
 import { shownMeasures } from '../print/bench-print';
 import { type EstimateRow, estimateRows } from '../print/estimate-rows';
 import { ScopeTabs } from './scope-tabs';
+import { TestsLine } from './tests-line';
 
 /** Every level against the reference in one layer: both sizes, drawn and printed. */
 @Component({
   selector: 'eh-estimates-panel',
-  imports: [BalanceGaugeView, ScopeTabs, ScrollSideways],
+  imports: [BalanceGaugeView, ScopeTabs, ScrollSideways, TestsLine],
   templateUrl: './estimates-panel.html',
   styleUrl: './estimates-panel.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

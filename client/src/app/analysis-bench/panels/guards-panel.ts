@@ -25,6 +25,13 @@ const CODE_BOOK_GUARDS: readonly string[] = ['levelsOutOfOrder', 'orderedAsUnord
 interface GuardNote {
   readonly finding: GuardFinding;
   readonly words: GuardWords;
+}
+
+/** What one guard found at several places. */
+interface GuardGroup {
+  readonly title: string;
+  readonly source: string;
+  readonly sentences: readonly string[];
   readonly tone: NoteTone;
   readonly tag: string;
   readonly isAboutCodeBook: boolean;
@@ -50,7 +57,7 @@ export class GuardsPanel {
   });
   /** What is about the whole, or about the layer in view. */
   private readonly here = computed(() => this.notes().filter((note) => this.isHere(note)));
-  protected readonly shown = computed(() => (this.showsAll() ? this.notes() : this.here()));
+  protected readonly shown = computed(() => grouped(this.showsAll() ? this.notes() : this.here()));
   protected readonly elsewhere = computed(() => this.notes().length - this.here().length);
   protected readonly codeBook = computed(() => {
     const dataSetId = this.store.cut()?.dataSet.id;
@@ -75,9 +82,23 @@ export class GuardsPanel {
 }
 
 function noteOf({ result, style, book }: BenchPrint, finding: GuardFinding): GuardNote {
+  return { finding, words: guardWords(finding, { analysisId: '', result }, style, book) };
+}
+
+function grouped(notes: readonly GuardNote[]): readonly GuardGroup[] {
+  const guardIds = [...new Set(notes.map(({ finding }) => finding.guardId))];
+  return guardIds.flatMap((guardId) => {
+    const own = notes.filter(({ finding }) => finding.guardId === guardId);
+    const [first] = own;
+    return first === undefined ? [] : [groupOf(first, own)];
+  });
+}
+
+function groupOf({ finding, words }: GuardNote, notes: readonly GuardNote[]): GuardGroup {
   return {
-    finding,
-    words: guardWords(finding, { analysisId: '', result }, style, book),
+    title: words.title,
+    source: words.source,
+    sentences: notes.map((note) => note.words.sentence),
     tone: TONES[finding.severity],
     tag: TAGS[finding.severity],
     isAboutCodeBook: CODE_BOOK_GUARDS.includes(finding.guardId),

@@ -41,7 +41,8 @@ export class MethodsPanel {
     const [index, reference] = [this.store.levelId(), result.frame.exposure.referenceLevelId];
     const layer = scopeLabel(result, this.scope());
     const interval = intervalLabel(result.specification.level, style);
-    return `${layer}, ${levelLabel(result, index)} against ${levelLabel(result, reference)}, ${interval}`;
+    const pair = `${levelLabel(result, index)} against ${levelLabel(result, reference)}`;
+    return `${layer}, ${pair}, ${interval}`;
   });
   private readonly heads = computed(() => {
     const print = this.store.print();

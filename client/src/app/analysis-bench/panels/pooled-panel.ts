@@ -1,10 +1,11 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import { columnHeads, homogeneityWords } from '#shared/wording';
+import { findGuards } from '#shared/analysis';
+import { columnHeads, guardWords, homogeneityWords } from '#shared/wording';
 import { ScrollSideways } from '../../ui/scroll-sideways';
 import { BenchStore } from '../bench/bench-store';
-import { levelLabel, stratumLabel } from '../bench/result-scopes';
-import { notEstimable, shownMeasures } from '../print/bench-print';
-import { pooledRows } from '../print/pooled-rows';
+import { levelLabel } from '../bench/result-scopes';
+import { shownMeasures } from '../print/bench-print';
+import { pooledRows, untestedWords } from '../print/pooled-rows';
 
 /** The contrasts pooled over strata, and whether the strata differ. */
 @Component({
@@ -40,17 +41,21 @@ export class PooledPanel {
     const print = this.store.print();
     return print === null ? '' : homogeneityWords(print.result, this.measures(), print.book);
   });
-  /** Strata that the pooled numbers could not use, each named once with its reason. */
+  protected readonly caption = computed(
+    () => `Every level against ${this.against()}, pooled over ${this.over()}`,
+  );
+  protected readonly missingMark = computed(
+    () => this.store.print()?.style.table.missingCell.mark ?? '',
+  );
+  /** Why a test has no p-value, each reason once with the levels that it is for. */
+  protected readonly untested = computed(() => untestedWords(this.rows()));
+  /** Strata that the pooled numbers could not use, as their guard says it. */
   protected readonly leftOut = computed(() => {
     const print = this.store.print();
     if (print === null) return [];
-    const said = print.result.pooled.flatMap(({ indexLevelId, leftOut }) =>
-      leftOut.map(({ stratumId, issue }) => {
-        const stratum = stratumLabel(print.result, stratumId);
-        const level = levelLabel(print.result, indexLevelId);
-        return `${stratum}, ${level}. ${notEstimable(print, issue)}`;
-      }),
-    );
-    return [...new Set(said)];
+    const analysis = { analysisId: '', result: print.result };
+    return findGuards(print.result)
+      .filter(({ guardId }) => guardId === 'stratumLeftOut')
+      .map((finding) => guardWords(finding, analysis, print.style, print.book).sentence);
   });
 }

@@ -27,7 +27,7 @@ import { BenchStore } from '../bench/bench-store';
         }
       </p>
       @if (hasChoice()) {
-        <eh-framing-rail [(framing)]="framing" name="What leads the sentence" />
+        <eh-framing-rail compact [(framing)]="framing" name="What leads the sentence" />
       } @else {
         <p class="second">Only odds ratios can be said here.</p>
       }

@@ -22,26 +22,54 @@ export interface CountRow {
   readonly cells: readonly CountCell[];
 }
 
-/** A table of counts over some layers. */
+/** Levels under one head: all of a table, or those of one stratum. */
+export interface CountGroup {
+  readonly name: string | null;
+  readonly rows: readonly CountRow[];
+}
+
+/**
+ * The counts of an analysis: up to two strata beside each other, more below each other, each a
+ * group of rows. `layers` names what stands across.
+ */
 export interface CountsTable {
   readonly layers: readonly string[];
-  readonly rows: readonly CountRow[];
+  readonly groups: readonly CountGroup[];
   readonly totals: readonly CountCell[];
 }
 
-/** The counts of layers beside each other. */
-export function countsTable(print: BenchPrint, layers: readonly LayerResult[]): CountsTable {
-  const { exposure } = print.result.frame;
+const MOST_BESIDE = 2;
+
+/** Lays the counts of a result out. */
+export function countsTable(print: BenchPrint): CountsTable {
+  const { crude, strata } = print.result;
+  if (strata.length > MOST_BESIDE) {
+    const groups = strata.map((layer) => ({
+      name: layerName(print.result, layer.stratumId),
+      rows: rowsOf(print, [layer]),
+    }));
+    return { layers: [layerName(print.result, null)], groups, totals: totalsOf(print, [crude]) };
+  }
+  const layers = strata.length === 0 ? [crude] : strata;
   return {
-    layers: layers.map((layer) => layerName(print.result, layer.stratumId)),
-    rows: exposure.levels.map(({ id, label }) => ({
-      levelId: id,
-      label,
-      isReference: id === exposure.referenceLevelId,
-      cells: layers.map((layer) => cellOf(print, layer, id)),
-    })),
-    totals: layers.map(({ total }) => countCell(print, total, false)),
+    layers: layers.map(({ stratumId }) => layerName(print.result, stratumId)),
+    groups: [{ name: null, rows: rowsOf(print, layers) }],
+    totals: totalsOf(print, layers),
   };
+}
+
+function rowsOf(print: BenchPrint, layers: readonly LayerResult[]): readonly CountRow[] {
+  const { exposure } = print.result.frame;
+  return exposure.levels.map(({ id, label }) => ({
+    levelId: id,
+    label,
+    isReference: id === exposure.referenceLevelId,
+    cells: layers.map((layer) => cellOf(print, layer, id)),
+  }));
+}
+
+function totalsOf(print: BenchPrint, layers: readonly LayerResult[]): readonly CountCell[] {
+  return layers.map(({ total }) => countCell(print, total, false));
 }
 
 function cellOf(print: BenchPrint, layer: LayerResult, levelId: string): CountCell {

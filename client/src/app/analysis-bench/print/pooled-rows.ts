@@ -15,6 +15,17 @@ export interface PooledRow {
   readonly homogeneity: readonly PrintedEstimate[];
 }
 
+/** Why tests of homogeneity have no p-value: each reason once, with its levels. */
+export function untestedWords(rows: readonly PooledRow[]): readonly string[] {
+  const reasons = rows.flatMap(({ label, homogeneity }) =>
+    homogeneity.flatMap((test) => (test.ok ? [] : [{ label, reason: test.reason }])),
+  );
+  return [...new Set(reasons.map(({ reason }) => reason))].map((reason) => {
+    const labels = reasons.filter((each) => each.reason === reason).map(({ label }) => label);
+    return `Not tested for ${[...new Set(labels)].join(', ')}: ${reason}`;
+  });
+}
+
 /** The pooled contrasts for the measures that are shown. */
 export function pooledRows(
   print: BenchPrint,

@@ -1,4 +1,10 @@
-import { type CdkDragDrop, CdkDrag, CdkDragHandle, CdkDropList } from '@angular/cdk/drag-drop';
+import {
+  type CdkDragDrop,
+  CdkDrag,
+  CdkDragHandle,
+  CdkDragPlaceholder,
+  CdkDropList,
+} from '@angular/cdk/drag-drop';
 import { DecimalPipe } from '@angular/common';
 import {
   afterNextRender,
@@ -35,7 +41,7 @@ import { type LevelRow, levelRows } from './level-rows';
 /** The levels or bands of a column: words, order, reference; merging and taking apart. */
 @Component({
   selector: 'eh-level-list',
-  imports: [CdkDrag, CdkDragHandle, CdkDropList, DecimalPipe, Icon, MatMenuModule],
+  imports: [CdkDrag, CdkDragHandle, CdkDragPlaceholder, CdkDropList, DecimalPipe, Icon, MatMenuModule],
   templateUrl: './level-list.html',
   styleUrl: './level-list.scss',
   host: { '(keydown)': 'press($event)' },

@@ -1,4 +1,11 @@
-import { ChangeDetectionStrategy, Component, computed, input, model } from '@angular/core';
+import {
+  booleanAttribute,
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  input,
+  model,
+} from '@angular/core';
 import { FRAMINGS, type Framing } from '#shared/wording/phrase';
 import { FramingGlyph } from './framing-glyph';
 
@@ -27,19 +34,24 @@ let made = 0;
             [checked]="framing() === each"
             (change)="framing.set(each)"
           />
-          <eh-framing-glyph [framing]="each" />
+          @if (!compact()) {
+            <eh-framing-glyph [framing]="each" />
+          }
           {{ words[each] }}
         </label>
       }
     </fieldset>
   `,
   styleUrl: './framing-rail.scss',
+  host: { '[class.compact]': 'compact()' },
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class FramingRail {
   readonly framing = model.required<Framing>();
   readonly name = input('The report says');
   readonly disabled = input(false);
+  /** Whether only the words are shown, for narrow places. */
+  readonly compact = input(false, { transform: booleanAttribute });
 
   protected readonly framings = FRAMINGS;
   protected readonly words = FRAMING_WORDS;
