@@ -14,7 +14,7 @@ export const HARBOUR_SUPPER: DemonstrationStudy = {
   study: {
     title: 'Harbour supper outbreak',
     design: 'cohort',
-    population: 'Guests of one harbour supper who answered the questionnaire',
+    population: 'guests of one harbour supper who answered the questionnaire',
     peopleNoun: 'guests',
   },
   outcome: {
@@ -68,7 +68,7 @@ export const HARBOUR_SUPPER: DemonstrationStudy = {
 function dish(label: string, words: string): ColumnDescription {
   return {
     label,
-    sentenceLabel: words,
+    sentenceLabel: label.toLowerCase(),
     groupPattern: '{people} who {level}',
     referenceLevelId: 'no',
     levels: [

@@ -16,7 +16,7 @@ export const REMINDER_LETTERS: DemonstrationStudy = {
   study: {
     title: 'Reminder letters and screening uptake',
     design: 'trial',
-    population: 'People due for bowel screening at four clinics, assigned by random numbers',
+    population: 'people due for bowel screening at four clinics, assigned by random numbers',
     peopleNoun: 'people',
   },
   outcome: {

@@ -15,7 +15,7 @@ export const SCREEN_USE: DemonstrationStudy = {
   study: {
     title: 'Evening screen use and needing new spectacles',
     design: 'caseControl',
-    population: 'Customers of nine opticians who needed stronger lenses, and customers who did not',
+    population: 'customers of nine opticians who needed stronger lenses, and customers who did not',
     peopleNoun: 'people',
   },
   outcome: {
@@ -34,6 +34,11 @@ export const SCREEN_USE: DemonstrationStudy = {
         sentenceLabel: 'age',
         unit: 'years',
         withinPattern: 'among people aged {level} years',
+        levels: [
+          ['18-29', '18–29', '18 to 29'],
+          ['30-44', '30–44', '30 to 44'],
+          ['45-59', '45–59', '45 to 59'],
+        ],
       },
       'evening-screen-hours': {
         label: 'Evening screen use',

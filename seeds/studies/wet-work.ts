@@ -9,7 +9,7 @@ export const WET_WORK: DemonstrationStudy = {
   study: {
     title: 'Wet work and hand eczema in hospital and kitchen staff',
     design: 'cohort',
-    population: 'Staff of 6 hospitals and 11 canteen kitchens without hand eczema at the start',
+    population: 'staff of 6 hospitals and 11 canteen kitchens without hand eczema at the start',
     peopleNoun: 'workers',
   },
   outcome: {
@@ -137,7 +137,7 @@ function opening(
     ...{ analysisId, levelId, scope: KITCHEN, quantity: 'risk', facet: 'value' },
   });
   return prose(id, [
-    'Over 12 months, ',
+    'Over twelve months, ',
     bound({ ...all, quantity: 'events', facet: 'value' }),
     ' of ',
     bound({ ...all, quantity: 'total', facet: 'value' }),
@@ -150,6 +150,6 @@ function opening(
     bound(kitchen('0')),
     ' among workers with no wet work and ',
     bound(kitchen('4')),
-    ' among those with 6 hours or more per shift.',
+    ' among those with six hours or more per shift.',
   ]);
 }

@@ -3,7 +3,7 @@ import type { PooledContrastResult, StratumLeftOut } from '#shared/analysis';
 import { capitalised, fillPattern } from '../phrasebook/fill-pattern';
 import { issueWords } from '../issue-words';
 import type { Phrase, PhrasePart } from '../phrase';
-import { groupWords } from '../sentence/group-words';
+import { groupAt } from './group-at';
 import { termsOf, textPart, type PrintContext } from './print-context';
 
 /** Which strata the pooled estimates left out, and why, one note a stratum and reason. */
@@ -71,17 +71,6 @@ function emptyLevel(
     (id) => layer?.levels.find(({ levelId }) => levelId === id)?.count.total === 0,
   );
   return empty.length === 1 ? (empty[0] ?? null) : null;
-}
-
-function groupAt({ result, book }: PrintContext, levelId: string): string {
-  const { frame } = result;
-  const level = frame.exposure.levels.find(({ id }) => id === levelId);
-  const naming = {
-    peopleNoun: frame.peopleNoun,
-    exposureSentenceLabel: frame.exposure.sentenceLabel,
-    groupPattern: frame.exposure.groupPattern ?? null,
-  };
-  return groupWords(naming, level?.sentenceLabel ?? '', 'full', book);
 }
 
 function measureNote(

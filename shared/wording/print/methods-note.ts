@@ -3,6 +3,7 @@ import { formatCount, levelPercent } from '#shared/format';
 import type { HouseStyle } from '#shared/house-style';
 import { TEST_METHODS } from '#shared/stats';
 import { fillPattern, fillWords } from '../phrasebook/fill-pattern';
+import { groupAt } from './group-at';
 import type { Phrasebook } from '../phrasebook/phrasebook';
 import type { Phrase, PhrasePart } from '../phrase';
 import {
@@ -60,10 +61,9 @@ function givesRisks({ result }: PrintContext): boolean {
 function comparison(context: PrintContext): Parts {
   const { result, book } = context;
   const { exposure, outcome } = result.frame;
-  const reference = exposure.levels.find(({ id }) => id === exposure.referenceLevelId);
   const shared = {
     exposure: exposure.sentenceLabel,
-    reference: reference?.sentenceLabel ?? '',
+    reference: groupAt(context, exposure.referenceLevelId),
   };
   return givesRisks(context)
     ? fillPattern(book, 'methods.compared', { ...shared, outcome: occurrenceWords(context) })

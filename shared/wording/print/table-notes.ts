@@ -5,6 +5,7 @@ import { fillPattern, startSentence } from '../phrasebook/fill-pattern';
 import type { Phrasebook } from '../phrasebook/phrasebook';
 import type { Phrase, PhrasePart } from '../phrase';
 import { cellNotes } from './cell-notes';
+import { groupAt } from './group-at';
 import { homogeneityNotes, trendNotes } from './test-notes';
 import { leftOutNotes } from './left-out-notes';
 import { intervalMethodsWords, poolingMethodsWords } from './method-words';
@@ -76,16 +77,16 @@ export function standingNotes({ result, book }: PrintContext): readonly Phrase[]
 }
 
 function referenceNotes(
-  { result, book }: PrintContext,
+  context: PrintContext,
   measures: readonly EffectMeasureId[],
 ): readonly Phrase[] {
-  const { levels, referenceLevelId } = result.frame.exposure;
-  const reference = levels.find(({ id }) => id === referenceLevelId);
-  if (measures.length === 0 || !reference) {
+  if (measures.length === 0) {
     return [];
   }
-  const group: PhrasePart = { kind: 'group', text: reference.sentenceLabel, levelId: reference.id };
-  return [{ parts: fillPattern(book, 'note.reference', { reference: group }) }];
+  const { referenceLevelId } = context.result.frame.exposure;
+  const text = groupAt(context, referenceLevelId);
+  const group: PhrasePart = { kind: 'group', text, levelId: referenceLevelId };
+  return [{ parts: fillPattern(context.book, 'note.reference', { reference: group }) }];
 }
 
 function intervalNotes(
