@@ -35,10 +35,8 @@ export function createFinisher(): Finisher {
 }
 
 function abbreviationFinder(book: Phrasebook): (element: LayoutElement) => readonly Abbreviation[] {
-  return remembered((element: LayoutElement) =>
-    abbreviationsInTexts(
-      runsOf(element).map(({ text }) => text),
-      book,
-    ),
-  );
+  return remembered((element: LayoutElement) => {
+    const words = runsOf(element).map(({ text }) => text);
+    return abbreviationsInTexts([words.join('\n')], book);
+  });
 }

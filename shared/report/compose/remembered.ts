@@ -4,7 +4,9 @@ export function remembered<Key extends object, Value>(
 ): (key: Key) => Value {
   const known = new WeakMap<Key, Value>();
   return (key) => {
-    const value = known.get(key) ?? find(key);
+    const before = known.get(key);
+    if (before !== undefined) return before;
+    const value = find(key);
     known.set(key, value);
     return value;
   };

@@ -34,15 +34,20 @@ export function fillWords<Key extends PatternKey>(
 /** One run of parts out of several fillings; neighbouring words become one part. */
 export function joinParts(fillings: readonly SlotFilling[]): readonly PhrasePart[] {
   const joined: PhrasePart[] = [];
-  for (const part of fillings.flatMap(partsOf)) {
-    const last = joined.at(-1);
-    if (last?.kind === 'text' && part.kind === 'text' && last.italic === part.italic) {
-      joined[joined.length - 1] = { ...last, text: last.text + part.text };
-    } else if (part.text !== '') {
-      joined.push(part);
-    }
+  for (const filling of fillings) {
+    for (const part of partsOf(filling)) addPart(joined, part);
   }
   return joined;
+}
+
+function addPart(joined: PhrasePart[], part: PhrasePart): void {
+  if (part.text === '') return;
+  const last = joined.at(-1);
+  if (last?.kind === 'text' && part.kind === 'text' && last.italic === part.italic) {
+    joined[joined.length - 1] = { ...last, text: last.text + part.text };
+  } else {
+    joined.push(part);
+  }
 }
 
 /** A sentence begins with a capital letter, whatever word came first. */
@@ -65,10 +70,14 @@ interface Piece {
 const KNOWN_PIECES = new WeakMap<Phrasebook, Map<PatternKey, readonly Piece[]>>();
 
 function piecesOf(book: Phrasebook, key: PatternKey): readonly Piece[] {
+  const known = KNOWN_PIECES.get(book)?.get(key);
+  return known ?? cutPattern(book, key);
+}
+
+function cutPattern(book: Phrasebook, key: PatternKey): readonly Piece[] {
+  const pieces = book.patterns[key].split(/(\{\w+\})/).map(pieceOf);
   const known = KNOWN_PIECES.get(book) ?? new Map<PatternKey, readonly Piece[]>();
-  KNOWN_PIECES.set(book, known);
-  const pieces = known.get(key) ?? book.patterns[key].split(/(\{\w+\})/).map(pieceOf);
-  known.set(key, pieces);
+  KNOWN_PIECES.set(book, known.set(key, pieces));
   return pieces;
 }
 
