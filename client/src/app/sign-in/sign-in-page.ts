@@ -49,8 +49,11 @@ export class SignInPage {
   private readonly session = inject(SessionStore);
   private readonly submit = viewChild.required<ElementRef<HTMLButtonElement>>('submit');
 
-  protected readonly demonstration = computed(
-    () => this.session.view()?.demonstrationAccounts ?? [],
+  protected readonly demonstration = computed(() =>
+    (this.session.view()?.demonstrationAccounts ?? []).map(({ email, role }) => ({
+      email,
+      role: role.charAt(0).toUpperCase() + role.slice(1),
+    })),
   );
   protected readonly busy = signal(false);
   protected readonly form = new FormGroup({
