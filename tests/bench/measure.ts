@@ -35,6 +35,22 @@ export function timed<Input>(
   return { median: times[Math.floor(runs / 2)] ?? 0, lowest, highest: times.at(-1) ?? 0, runs };
 }
 
+/** The same for work that is waited for. */
+export async function timedWait(
+  work: () => Promise<unknown>,
+  { runs = 7, warmUps = 2 }: { readonly runs?: number; readonly warmUps?: number } = {},
+): Promise<Timing> {
+  const times: number[] = [];
+  for (let run = 0; run < runs + warmUps; run += 1) {
+    const start = performance.now();
+    await work();
+    if (run >= warmUps) times.push(performance.now() - start);
+  }
+  times.sort((one, other) => one - other);
+  const [lowest = 0] = times;
+  return { median: times[Math.floor(runs / 2)] ?? 0, lowest, highest: times.at(-1) ?? 0, runs };
+}
+
 const FILE = 'coverage/bench.json';
 
 /** Prints a result, and adds it to `coverage/bench.json` in place of an earlier one. */

@@ -162,7 +162,6 @@ function bodyCells(row: BodyRow, place: RowPlace, drawing: TableDrawing): TableC
     const columnSpan = isLast ? columns.length - index : 1;
     return new TableCell({
       ...spanOf(index, columnSpan, drawing),
-      verticalAlign: VerticalAlignTable.TOP,
       ...(place.isLast ? { borders: { bottom: OUTER_RULE } } : {}),
       children: [bodyParagraph(cell.runs, { row, index, keepNext: place.keepNext }, drawing)],
     });
@@ -185,7 +184,7 @@ function bodyParagraph(
   const look = { ...lookOf(drawing), ...(row.kind === 'group' ? { bold: true } : {}) };
   return new Paragraph({
     style: PARAGRAPH_STYLES.tableText,
-    alignment: ALIGNMENTS[align],
+    ...(align === 'start' ? {} : { alignment: ALIGNMENTS[align] }),
     ...(keepNext ? { keepNext } : {}),
     ...(row.kind === 'group' ? { spacing: { before: 80 } } : {}),
     ...(indent === null ? {} : { indent: { left: indent } }),

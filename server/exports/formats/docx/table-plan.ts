@@ -18,7 +18,10 @@ export const CELL_MARGIN = 3;
  */
 export function settingOf(panels: readonly TableElement[], style: HouseStyle): TableSetting | null {
   const fitting = settingsOf(style).find((setting) =>
-    panels.every((panel) => spareWidth(panel, setting, style) >= 0),
+    panels.every((panel) => {
+      const needs = columnNeeds(panel, setting.sizeInPoints);
+      return spareOf(needs, setting, style) >= 0;
+    }),
   );
   return fitting ?? null;
 }
@@ -35,7 +38,7 @@ export function columnWidths(
   style: HouseStyle,
 ): readonly number[] {
   const needs = columnNeeds(table, setting.sizeInPoints);
-  const spare = spareWidth(table, setting, style);
+  const spare = spareOf(needs, setting, style);
   const widths = spare < 0 ? squeezed(needs, spare) : widened(needs, spare);
   return widths.map((width) => width + 2 * CELL_MARGIN);
 }
@@ -56,9 +59,8 @@ function settingsOf({ page }: HouseStyle): readonly TableSetting[] {
 }
 
 /** What is left of the page's width when every column has what it needs; negative if too little. */
-function spareWidth(table: TableElement, setting: TableSetting, style: HouseStyle): number {
-  const margins = 2 * CELL_MARGIN * table.columns.length;
-  const needs = columnNeeds(table, setting.sizeInPoints);
+function spareOf(needs: readonly ColumnNeed[], setting: TableSetting, style: HouseStyle): number {
+  const margins = 2 * CELL_MARGIN * needs.length;
   return textWidthInPoints(style, setting.orientation) - margins - leastOf(needs);
 }
 

@@ -3,6 +3,7 @@ import type { NumberStyle } from '#shared/house-style';
 import { drawElement, type Drawing } from '../../drawing';
 import type { ExportRequest } from '../../export-request';
 import { printableLine } from '../../printable-text';
+import { createCellStyles } from './cell-styles';
 import { dictionarySheet } from './dictionary-sheet';
 import { figureSheet } from './figure-sheet';
 import { notesSheet } from './notes-sheet';
@@ -24,8 +25,11 @@ export async function renderXlsx(request: ExportRequest): Promise<Uint8Array> {
     dictionarySheet(request.codeBooks),
     notesSheet(request),
   ];
-  for (const plan of plans) writeSheet(workbook, plan, houseStyle);
-  return steadyWorkbook(new Uint8Array(await workbook.xlsx.writeBuffer()));
+  const setting = { houseStyle, styles: createCellStyles(houseStyle) };
+  for (const plan of plans) writeSheet(workbook, plan, setting);
+  // Packed only once, by `steadyWorkbook`.
+  const loose = await workbook.xlsx.writeBuffer({ zip: { compression: 'STORE' } });
+  return steadyWorkbook(new Uint8Array(loose));
 }
 
 /** Words of the report stay in the document; what could not be printed is listed in the notes. */

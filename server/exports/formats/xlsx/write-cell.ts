@@ -1,63 +1,67 @@
-import type { Alignment, Borders, Cell, Font } from 'exceljs';
+import type { Cell, CellRichTextValue, CellValue, Font } from 'exceljs';
 import type { HouseStyle } from '#shared/house-style';
-import type { Run, RunMark, TableColumn } from '#shared/layout';
+import type { Run, RunMark } from '#shared/layout';
 import { printableText } from '../../printable-text';
 import { textOf } from '../../table-measure';
-import type { CellLook, SheetCell } from './sheet-plan';
+import { fontOf, type CellStyles } from './cell-styles';
+import type { CellContent, CellLook, SheetCell } from './sheet-plan';
 
-/** Size of type in sheets. */
-export const POINTS = 10;
+/** What cells are written with. */
+export interface CellSetting {
+  readonly houseStyle: HouseStyle;
+  readonly styles: CellStyles;
+}
 
 /**
- * The format of words. A cell with it never turns into a formula when it is edited, because
- * `steadyWorkbook` marks it so.
+ * The format of words that look like a formula. A cell with it never turns into one when it is
+ * edited, because `steadyWorkbook` marks it so.
  */
-export const TEXT_FORMAT = '@';
-
-/** The font of a house style's tables. Without a name, readers fall back to one of their own. */
-export function fontOf({ page }: HouseStyle, look: CellLook = {}): Partial<Font> {
-  return { name: page.tableFont, size: POINTS, ...(look.bold === true ? { bold: true } : {}) };
-}
+const TEXT_FORMAT = '@';
 
 /** Writes one cell. */
-export function writeCell(cell: Cell, planned: SheetCell, style: HouseStyle): void {
-  const { content, look } = planned;
-  cell.font = fontOf(style, look);
-  cell.border = bordersOf(look);
-  cell.alignment = alignmentOf(planned);
+export function writeCell(
+  cell: Cell,
+  { content, look }: SheetCell,
+  { houseStyle, styles }: CellSetting,
+): void {
+  const { value, format } = writtenAs(content, look, houseStyle);
+  cell.style = styles(look, format);
+  if (value !== null) cell.value = value;
+}
+
+interface Written {
+  readonly value: CellValue;
+  readonly format: string | null;
+}
+
+function writtenAs(content: CellContent, look: CellLook, houseStyle: HouseStyle): Written {
   switch (content.kind) {
     case 'number':
-      cell.numFmt = content.format;
-      cell.value = content.value;
-      return;
+      return { value: content.value, format: content.format };
     case 'words':
-      writeWords(cell, content.runs, style, look);
-      return;
+      return wordsAs(content.runs, look, houseStyle);
     case 'empty':
-      return;
+      return { value: null, format: null };
   }
 }
 
-function writeWords(cell: Cell, runs: readonly Run[], style: HouseStyle, look: CellLook): void {
+function wordsAs(runs: readonly Run[], look: CellLook, houseStyle: HouseStyle): Written {
   const text = cellText(textOf(runs));
-  if (text === '') return;
-  if (looksLikeFormula(text)) cell.numFmt = TEXT_FORMAT;
-  if (!runs.some(({ marks = [] }) => marks.some((mark) => MARKS[mark] !== null))) {
-    cell.value = text;
-    return;
-  }
-  cell.value = {
+  const format = looksLikeFormula(text) ? TEXT_FORMAT : null;
+  if (text === '') return { value: null, format };
+  const isPlain = runs.every(({ marks = [] }) => marks.every((mark) => MARKS[mark] === null));
+  return { value: isPlain ? text : richText(runs, fontOf(houseStyle, look)), format };
+}
+
+function richText(runs: readonly Run[], font: Partial<Font>): CellRichTextValue {
+  return {
     richText: runs
       .filter((run) => run.text !== '')
-      .map((run) => ({
-        text: cellText(printableText(run.text)),
-        font: markedFont(run.marks ?? [], fontOf(style, look)),
+      .map(({ text, marks = [] }) => ({
+        text: cellText(printableText(text)),
+        font: marks.reduce((marked, mark) => ({ ...marked, ...MARKS[mark] }), font),
       })),
   };
-}
-
-function markedFont(marks: readonly RunMark[], font: Partial<Font>): Partial<Font> {
-  return marks.reduce((marked, mark) => ({ ...marked, ...MARKS[mark] }), font);
 }
 
 /** The secondary mark is for the screen. */
@@ -85,27 +89,4 @@ function cellText(text: string): string {
 
 function looksLikeFormula(text: string): boolean {
   return /^\s*[=+\-@]/.test(text);
-}
-
-const ALIGNMENTS = {
-  start: 'left',
-  end: 'right',
-  center: 'center',
-} as const satisfies Readonly<Record<TableColumn['align'], Alignment['horizontal']>>;
-
-function alignmentOf({ look }: SheetCell): Partial<Alignment> {
-  const { align = 'start', indent = 0, wraps = false } = look;
-  return {
-    horizontal: ALIGNMENTS[align],
-    vertical: look.bold === true ? 'bottom' : 'top',
-    ...(indent > 0 ? { indent } : {}),
-    ...(wraps ? { wrapText: true } : {}),
-  };
-}
-
-function bordersOf({ top, bottom }: CellLook): Partial<Borders> {
-  return {
-    ...(top === undefined ? {} : { top: { style: top } }),
-    ...(bottom === undefined ? {} : { bottom: { style: bottom } }),
-  };
 }

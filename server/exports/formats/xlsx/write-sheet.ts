@@ -1,22 +1,22 @@
 import type { Row, Workbook, Worksheet } from 'exceljs';
 import { textWidth } from '#shared/figures';
-import type { HouseStyle } from '#shared/house-style';
 import type { Run } from '#shared/layout';
 import { textOf } from '../../table-measure';
-import { fontOf, POINTS, writeCell } from './write-cell';
+import { fontOf, POINTS } from './cell-styles';
 import type { SheetCell, SheetPlan, SheetRow } from './sheet-plan';
+import { writeCell, type CellSetting } from './write-cell';
 
 /** Writes a planned sheet: cells, widths, what stays in sight, how it prints. */
-export function writeSheet(workbook: Workbook, plan: SheetPlan, style: HouseStyle): void {
+export function writeSheet(workbook: Workbook, plan: SheetPlan, setting: CellSetting): void {
   const widths = columnWidths(plan);
   const sheet = workbook.addWorksheet(plan.name, { views: [viewOf(plan)] });
-  setUpPrint(sheet, plan, style, sum(widths));
+  setUpPrint(sheet, plan, setting, sum(widths));
   sheet.columns = widths.map((width) => ({
     width: characters(width),
-    style: { font: fontOf(style) },
+    style: { font: fontOf(setting.houseStyle) },
   }));
   for (const [index, row] of plan.rows.entries()) {
-    writeRow(sheet.getRow(index + 1), row, { sheet, widths, style });
+    writeRow(sheet.getRow(index + 1), row, { ...setting, sheet, widths });
   }
   if (plan.filtered) {
     const { last } = plan.headRows;
@@ -27,11 +27,10 @@ export function writeSheet(workbook: Workbook, plan: SheetPlan, style: HouseStyl
   }
 }
 
-interface SheetContext {
+interface SheetContext extends CellSetting {
   readonly sheet: Worksheet;
   /** In points. */
   readonly widths: readonly number[];
-  readonly style: HouseStyle;
 }
 
 function viewOf({ headRows, frozenColumns }: SheetPlan): Worksheet['views'][number] {
@@ -47,7 +46,12 @@ const PORTRAIT_WIDTH = 480;
 /** Printed on one page, a wider sheet would be too small to read. */
 const READABLE_WIDTH = 1400;
 
-function setUpPrint(sheet: Worksheet, plan: SheetPlan, { page }: HouseStyle, width: number): void {
+function setUpPrint(
+  sheet: Worksheet,
+  plan: SheetPlan,
+  { houseStyle }: CellSetting,
+  width: number,
+): void {
   const { first, last } = plan.headRows;
   sheet.pageSetup = {
     orientation: width > PORTRAIT_WIDTH ? 'landscape' : 'portrait',
@@ -57,7 +61,7 @@ function setUpPrint(sheet: Worksheet, plan: SheetPlan, { page }: HouseStyle, wid
     printTitlesRow: `${String(first)}:${String(last)}`,
   };
   // The library's type for papers is an enumeration that is not there when programs run.
-  if (page.paper === 'A4') Object.assign(sheet.pageSetup, { paperSize: A4 });
+  if (houseStyle.page.paper === 'A4') Object.assign(sheet.pageSetup, { paperSize: A4 });
   sheet.headerFooter.oddFooter = '&C&A · &P / &N';
 }
 
@@ -120,7 +124,7 @@ function writeRow(row: Row, planned: SheetRow, context: SheetContext): void {
     return;
   }
   for (const [index, cell] of planned.cells.entries()) {
-    writeCell(row.getCell(index + 1), cell, context.style);
+    writeCell(row.getCell(index + 1), cell, context);
   }
   // Merged cells share one look, so that merging comes last.
   for (const [index, { across }] of planned.cells.entries()) {
@@ -136,15 +140,16 @@ function writeParagraph(
   row: Row,
   runs: readonly Run[],
   bold: boolean,
-  { sheet, widths, style }: SheetContext,
+  context: SheetContext,
 ): void {
   const cell: SheetCell = {
     content: { kind: 'words', runs },
     look: { wraps: true, bold },
     across: 1,
   };
+  const { sheet, widths } = context;
   if (widths.length > 1) sheet.mergeCells(row.number, 1, row.number, widths.length);
-  writeCell(row.getCell(1), cell, style);
+  writeCell(row.getCell(1), cell, context);
   row.height = heightOf(linesOf(cell, Math.max(sum(widths), 1)));
 }
 
