@@ -10,6 +10,7 @@ import { BlockActions } from './block-actions';
   selector: 'eh-block-menu',
   imports: [Icon, KeyLabel, MatMenuModule],
   template: `
+    <button type="button" class="text-button" (click)="opened.emit()">Open</button>
     <button
       type="button"
       class="icon-button"
@@ -42,6 +43,20 @@ import { BlockActions } from './block-actions';
       width: 24px;
       color: var(--ink-3);
       cursor: grab;
+    }
+    .text-button {
+      display: none;
+    }
+    @media (max-width: 719px) {
+      :host {
+        display: flex;
+        justify-content: space-between;
+        align-items: center;
+        width: 100%;
+      }
+      .text-button {
+        display: inline-flex;
+      }
     }
     [mat-menu-item] eh-key-label {
       margin-left: 24px;

@@ -1,9 +1,11 @@
 import {
+  afterNextRender,
   ChangeDetectionStrategy,
   Component,
   computed,
   DestroyRef,
   effect,
+  ElementRef,
   inject,
   input,
   output,
@@ -63,6 +65,11 @@ export class BlockEditor {
     });
     inject(DestroyRef).onDestroy(() => {
       this.session.end();
+    });
+    const host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
+    afterNextRender(() => {
+      // The cursor goes into the words; where there are none, the form takes the focus.
+      if (this.text() === null) host.querySelector<HTMLElement>('select, input')?.focus();
     });
   }
 

@@ -1,4 +1,12 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import {
+  afterNextRender,
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  ElementRef,
+  inject,
+  input,
+} from '@angular/core';
 import {
   type Block,
   type BlockField,
@@ -56,6 +64,8 @@ export class BlockForm {
   readonly block = input.required<Block>();
   /** Paths of fields that are edited elsewhere. */
   readonly without = input<readonly string[]>([]);
+  /** Whether the first control takes the focus at once. */
+  readonly takesFocus = input(false);
 
   private readonly fields = computed(() =>
     (kindOf(this.block())?.fields ?? []).filter((field) => !this.without().includes(field.path)),
@@ -84,7 +94,11 @@ export class BlockForm {
   );
 
   constructor() {
+    const host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
     this.analyses.fetch();
+    afterNextRender(() => {
+      if (this.takesFocus()) host.querySelector<HTMLElement>('select, input, button')?.focus();
+    });
   }
 
   protected choose({ field, options }: ChoiceRow, event: Event): void {

@@ -1,5 +1,6 @@
 import {
   addressKey,
+  type AddressedQuantity,
   findGuards,
   type GuardFinding,
   type GuardId,
@@ -28,20 +29,21 @@ const WEIGHTS: Readonly<Record<GuardSeverity, ProofCheck['weight']>> = {
 };
 
 /**
- * What the guards of an analysis say beside a block. The first block that shows the analysis
- * (`isFirst`) carries all of them, one note for each guard; a later one only what concerns the very
- * comparison that it prints.
+ * What the guards of an analysis say beside a block, one note for each guard. Each is said at the
+ * first block that it matters to, and again where a block prints the very comparison that it speaks
+ * of. `seen` holds what was said beside earlier blocks; this adds to it.
  */
 export function guardChecks(
   blockId: string,
   printed: PrintedBlock,
   pin: PinnedAnalysis,
-  under: GuardPrint & { readonly isFirst: boolean },
+  under: GuardPrint & { readonly seen: Set<string> },
 ): readonly ProofCheck[] {
-  const findings = findGuards(pin.result);
-  const relevant = under.isFirst
-    ? findings
-    : findings.filter((each) => concerns(each, printed, pin));
+  const matters = findGuards(pin.result).filter(({ guardId }) => mattersTo(guardId, printed));
+  const relevant = matters.filter(
+    (each) => !under.seen.has(seenKey(each, pin)) || concerns(each, printed, pin),
+  );
+  for (const finding of relevant) under.seen.add(seenKey(finding, pin));
   const guardIds = [...new Set(relevant.map(({ guardId }) => guardId))];
   const checks = guardIds.map((guardId) => {
     const same = relevant.filter((finding) => finding.guardId === guardId);
@@ -49,6 +51,19 @@ export function guardChecks(
   });
   return [...checks.slice(0, MOST_SHOWN), ...rest(blockId, pin, checks.slice(MOST_SHOWN))];
 }
+
+/** All places of a guard are said together. */
+function seenKey({ guardId }: GuardFinding, { analysisId }: PinnedAnalysis): string {
+  return `${analysisId}/${guardId}`;
+}
+
+/** A caution about odds ratios is none where no odds ratio is printed. */
+function mattersTo(guardId: GuardId, { bound }: PrintedBlock): boolean {
+  const quantity = ABOUT[guardId];
+  return quantity === undefined || bound.some(({ address }) => address.quantity === quantity);
+}
+
+const ABOUT: Readonly<Partial<Record<GuardId, AddressedQuantity>>> = { commonOutcome: 'oddsRatio' };
 
 interface SameGuard {
   readonly guardId: GuardId;

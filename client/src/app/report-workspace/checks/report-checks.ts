@@ -59,7 +59,7 @@ export class ReportChecks {
     return checks;
   }
 
-  /** `seen` holds the analyses that an earlier block has shown; this adds to it. */
+  /** `seen` holds what guards have said beside earlier blocks; this adds to it. */
   private guardsOf(
     blockId: string,
     printed: PrintedBlock,
@@ -67,17 +67,11 @@ export class ReportChecks {
   ): readonly ProofCheck[] {
     const houseStyle = this.state.houseStyle();
     if (houseStyle === null) return [];
+    const under = { houseStyle, phrasebook: this.phrasebook, seen };
     const shown = new Set(printed.bound.map(({ address }) => address.analysisId));
     return [...shown].flatMap((analysisId) => {
       const pin = this.state.pins().get(analysisId);
-      const isFirst = !seen.has(analysisId);
-      seen.add(analysisId);
-      if (pin === undefined) return [];
-      return guardChecks(blockId, printed, pin, {
-        houseStyle,
-        phrasebook: this.phrasebook,
-        isFirst,
-      });
+      return pin === undefined ? [] : guardChecks(blockId, printed, pin, under);
     });
   }
 

@@ -79,8 +79,9 @@ function linesOf(
   const cuts = [...new Set(shown.map(cutWords))];
   if (only === undefined || others.length > 0) return cuts;
   const contrast = onlyContrast(addresses);
-  const against = contrast === null ? [] : [contrastWords(contrast.levelId, only)];
-  return [...against, ...cuts, ...methodLines(only, addresses)];
+  return contrast === null
+    ? [...cuts, ...methodLines(only, addresses)]
+    : [contrastWords(contrast.levelId, only), ...cuts];
 }
 
 function cutWords({ cut }: PinnedAnalysis): string {

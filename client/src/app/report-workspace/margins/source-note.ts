@@ -1,6 +1,7 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import { RouterLink } from '@angular/router';
 import { CurrentStudy } from '../../session/current-study';
+import { BlockActions } from '../block-actions/block-actions';
 import { ProofDesk } from '../proof/proof-desk';
 import { ReportProof } from '../proof/report-proof';
 import { ReportState } from '../report-store/report-state';
@@ -10,34 +11,7 @@ import { blockSources, countWords, inStepWith } from './block-sources';
 @Component({
   selector: 'eh-source-note',
   imports: [RouterLink],
-  template: `
-    @if (sources(); as sources) {
-      <div class="note" [class.lit]="lit()" (mouseenter)="light(true)" (mouseleave)="light(false)">
-        <b>{{ sources.name }}</b>
-        @for (line of sources.lines; track line) {
-          <span class="line">{{ line }}</span>
-        }
-        <span class="count">
-          <i class="dot" [class.partly]="partly()" aria-hidden="true"></i>
-          {{ words() }}
-        </span>
-        @if (step(); as step) {
-          <span class="count line">
-            <i class="dot" aria-hidden="true"></i>
-            In step with {{ step }}
-          </span>
-        }
-        @if (selected() && sources.analysisIds.length === 1) {
-          <a
-            class="text-button"
-            [routerLink]="['/studies', studyId(), 'analyses', sources.analysisIds[0]]"
-          >
-            Open the analysis
-          </a>
-        }
-      </div>
-    }
-  `,
+  templateUrl: './source-note.html',
   styleUrl: './source-note.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
@@ -46,6 +20,9 @@ export class SourceNote {
   private readonly proof = inject(ReportProof);
   private readonly desk = inject(ProofDesk);
   private readonly study = inject(CurrentStudy);
+
+  private readonly actions = inject(BlockActions);
+  private readonly unfolded = signal(false);
 
   readonly blockId = input.required<string>();
   readonly selected = input.required<boolean>();
@@ -73,6 +50,20 @@ export class SourceNote {
     );
   });
   protected readonly studyId = computed(() => this.study.study()?.id ?? '');
+
+  /** Where the margin is a bracket only, the note opens over the page. */
+  protected readonly open = computed(
+    () => this.unfolded() || (this.selected() && this.desk.sourcesOpen()),
+  );
+  protected readonly name = computed(() => this.actions.nameOf(this.blockId()));
+
+  protected unfold(): void {
+    this.unfolded.update((unfolded) => !unfolded);
+  }
+
+  protected fold(): void {
+    this.unfolded.set(false);
+  }
 
   /** A note under the pointer lights its numbers in the block. */
   protected light(on: boolean): void {

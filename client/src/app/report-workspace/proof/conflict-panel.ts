@@ -70,18 +70,23 @@ export class ConflictPanel {
     );
   }
 
+  /** Printed within the whole report, so that references and numbers are as they will be. */
   private printed(content: unknown): readonly LayoutElement[] {
     const report = this.state.report();
     const houseStyle = this.state.houseStyle();
     if (report === null || houseStyle === null) return [];
-    const blocks = [{ ...this.block(), removedAt: null, content }];
+    const blockId = this.block().id;
+    const blocks = report.blocks.map((block) =>
+      block.id === blockId ? { ...block, removedAt: null, content } : block,
+    );
     const pins = this.state.pins();
     const shown = Object.fromEntries([...pins].map(([id, pin]) => [id, pin.resultId]));
-    return composeReport({
+    const composed = composeReport({
       report: { ...report, blocks, pins: shown },
       pins: pins.values(),
       houseStyle,
       phrasebook: this.phrasebook,
-    }).elements;
+    });
+    return composed.elements.filter((element) => element.blockId === blockId);
   }
 }

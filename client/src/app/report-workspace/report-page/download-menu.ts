@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, DOCUMENT, inject, signal } from '@angular/core';
+import { ChangeDetectionStrategy, Component, DOCUMENT, inject, input, signal } from '@angular/core';
 import { toObservable } from '@angular/core/rxjs-interop';
 import { MatMenuModule } from '@angular/material/menu';
 import { filter, finalize, mergeMap, take } from 'rxjs';
@@ -28,7 +28,9 @@ const DOWNLOADS: readonly Download[] = [
   template: `
     <button
       type="button"
-      class="button primary"
+      class="button"
+      [class.primary]="look() === 'primary'"
+      [class.small]="look() === 'small'"
       [matMenuTriggerFor]="menu"
       [disabled]="making() !== null"
     >
@@ -57,6 +59,8 @@ export class DownloadMenu {
   private readonly session = inject(TextEditSession);
   private readonly notices = inject(Notices);
   private readonly allSent = toObservable(this.sync.allSent);
+
+  readonly look = input<'primary' | 'small'>('primary');
 
   protected readonly downloads = DOWNLOADS;
   protected readonly making = signal<string | null>(null);

@@ -1,5 +1,6 @@
 import { DOCUMENT, inject } from '@angular/core';
 import type { Framing } from '#shared/wording';
+import { CurrentStudy } from '../../session/current-study';
 import type { KeyCommand } from '../../ui/keys/key-command';
 import { keyCommands } from '../../ui/keys/key-commands';
 import { BlockActions } from '../block-actions/block-actions';
@@ -17,15 +18,18 @@ const CONTROLS = 'input, select, textarea, [contenteditable=true], [role=menuite
 export function workspaceKeys(): void {
   const document = inject(DOCUMENT);
   const desk = inject(ProofDesk);
+  const study = inject(CurrentStudy);
+  const edits = study.may('editWordsBlocks');
+  const frames = study.may('setFraming');
   const free = (): boolean => document.activeElement?.matches(CONTROLS) !== true;
   const idle = (): boolean => free() && desk.editing() === null;
   keyCommands([
     ...only(() => idle(), walkKeys(desk)),
-    ...only(() => idle() && desk.selected() !== null, blockKeys(desk)),
-    ...only(() => idle() && onBlock(document), wholeBlockKeys(desk)),
-    ...only(free, framingKeys()),
+    ...(edits ? only(() => idle() && desk.selected() !== null, blockKeys(desk)) : []),
+    ...(edits ? only(() => idle() && onBlock(document), wholeBlockKeys(desk)) : []),
+    ...(frames ? only(free, framingKeys()) : []),
     ...only(free, checkKeys()),
-    ...only(free, undoKeys()),
+    ...(edits ? only(free, undoKeys()) : []),
   ]);
 }
 
