@@ -1,6 +1,5 @@
 import { parentPort } from 'node:worker_threads';
-import { workerInput } from '../workers/worker-input';
-import { CHUNK_STORED, type WorkerMessage } from './messages';
+import type { WorkerMessage, WorkerOrder } from './messages';
 import { readFile, type ReadingOrder } from './read-file';
 import type { Progress } from './reading';
 
@@ -16,22 +15,28 @@ let underWay = 0;
 let resume: (() => void) | null = null;
 let reportedAt = 0;
 
-port.on('message', (message) => {
-  if (message !== CHUNK_STORED) return;
+port.on('message', (message: WorkerOrder) => {
+  if (message.kind === 'read') {
+    void read(message.order);
+    return;
+  }
   underWay -= 1;
   resume?.();
 });
 
-const outcome = await readFile(
-  workerInput() as ReadingOrder,
-  (chunk) => {
-    underWay += 1;
-    tell({ kind: 'chunk', chunk }, [chunk.bytes.buffer]);
-  },
-  pause,
-);
-tell({ kind: 'done', outcome });
-port.close();
+/** One file after the other; what goes wrong unexpectedly ends the worker. */
+async function read(order: ReadingOrder): Promise<void> {
+  reportedAt = 0;
+  const outcome = await readFile(
+    order,
+    (chunk) => {
+      underWay += 1;
+      tell({ kind: 'chunk', chunk }, [chunk.bytes.buffer]);
+    },
+    pause,
+  );
+  tell({ kind: 'done', outcome });
+}
 
 function tell(message: WorkerMessage, given: readonly ArrayBuffer[] = []): void {
   port?.postMessage(message, [...given]);

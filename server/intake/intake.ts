@@ -1,12 +1,14 @@
-import type { Worker } from 'node:worker_threads';
 import type { Result } from '#shared/core';
 import type { ErrorLog } from '../errors/error-handler';
-import { startWorker } from '../workers/launch';
-import type { Chunk } from './encode/chunk';
 import type { IntakeIssue } from './intake-issue';
-import { CHUNK_STORED, type WorkerMessage } from './messages';
 import type { ReadFile, ReadingOrder } from './read-file';
 import type { Progress } from './reading';
+import {
+  startReadingThread,
+  type ReadingListener,
+  type ReadingThread,
+  type ThreadOptions,
+} from './reading-thread';
 
 /** How a reading ended; null when it was stopped. */
 export type ReadingEnd = Result<ReadFile, IntakeIssue> | null;
@@ -16,7 +18,7 @@ export interface IntakeJob {
   readonly id: string;
   readonly order: ReadingOrder;
   /** Stores a piece; a failure ends the reading. */
-  readonly storeChunk: (chunk: Chunk) => Promise<void>;
+  readonly storeChunk: ReadingListener['storeChunk'];
 }
 
 /** Reads files in threads of their own, a few at a time. */
@@ -27,32 +29,34 @@ export interface Intake {
   readonly progressOf: (id: string) => Progress | null;
   /** Ends a reading; resolves when nothing of it goes on. */
   readonly stop: (id: string) => Promise<void>;
-  /** Ends all readings. */
+  /** Ends all readings and all threads. */
   readonly close: () => Promise<void>;
 }
 
 /** Limits of the threads that read files. */
-export interface IntakeLimits {
+export interface IntakeLimits extends ThreadOptions {
   readonly atATime: number;
-  readonly memoryInMebibytes: number;
-  /** Which worker; tests name a broken one. */
-  readonly workerPath: string;
+  /** How long a thread waits for the next file. */
+  readonly idleSeconds: number;
 }
 
+/** Limits of a server. */
 export const INTAKE_LIMITS: IntakeLimits = {
   atATime: 2,
+  idleSeconds: 60,
   memoryInMebibytes: 1024,
   workerPath: 'intake/intake-worker',
 };
 
-/** Makes an intake; its threads start when files come and end with them. */
+/** Makes an intake; threads start when files come and end some time after the last one. */
 export function createIntake(log: ErrorLog, limits: IntakeLimits = INTAKE_LIMITS): Intake {
   const readings = new Map<string, Reading>();
   const turns = createTurns(limits.atATime);
+  const threads = createThreads(limits);
 
   const read = async (job: IntakeJob): Promise<ReadingEnd> => {
-    const state: ReadingState = { progress: { share: 0, rows: 0 }, stopped: false, worker: null };
-    const ended = turns.take(() => (state.stopped ? null : runWorker(job, state, limits, log)));
+    const state: ReadingState = { progress: { share: 0, rows: 0 }, stopped: false, thread: null };
+    const ended = turns.take(() => (state.stopped ? null : readNow(job, state, threads, log)));
     const reading = { state, ended };
     readings.set(job.id, reading);
     try {
@@ -66,7 +70,7 @@ export function createIntake(log: ErrorLog, limits: IntakeLimits = INTAKE_LIMITS
     const reading = readings.get(id);
     if (reading === undefined) return;
     reading.state.stopped = true;
-    await reading.state.worker?.terminate();
+    await reading.state.thread?.end();
     await reading.ended;
   };
 
@@ -76,6 +80,7 @@ export function createIntake(log: ErrorLog, limits: IntakeLimits = INTAKE_LIMITS
     progressOf: (id) => readings.get(id)?.state.progress ?? null,
     close: async () => {
       await Promise.all([...readings.keys()].map(stop));
+      await threads.close();
     },
   };
 }
@@ -88,7 +93,61 @@ interface Reading {
 interface ReadingState {
   progress: Progress;
   stopped: boolean;
-  worker: Worker | null;
+  thread: ReadingThread | null;
+}
+
+async function readNow(
+  { order, storeChunk }: IntakeJob,
+  state: ReadingState,
+  threads: Threads,
+  log: ErrorLog,
+): Promise<ReadingEnd> {
+  const thread = threads.take();
+  state.thread = thread;
+  const onProgress = (progress: Progress): void => {
+    state.progress = progress;
+  };
+  const end = await thread.read(order, { storeChunk, onProgress });
+  if (end.kind === 'read') {
+    threads.giveBack(thread);
+    return end.outcome;
+  }
+  await thread.end();
+  if (state.stopped || end.kind === 'stopped') return null;
+  log('Reading a file failed', end.reason);
+  return { ok: false, issue: { code: 'readerFailed' } };
+}
+
+interface Threads {
+  readonly take: () => ReadingThread;
+  readonly giveBack: (thread: ReadingThread) => void;
+  readonly close: () => Promise<void>;
+}
+
+/** Threads that wait for the next file; one that waits too long ends. */
+function createThreads(limits: IntakeLimits): Threads {
+  const waiting = new Map<ReadingThread, NodeJS.Timeout>();
+  const end = async (thread: ReadingThread): Promise<void> => {
+    clearTimeout(waiting.get(thread));
+    waiting.delete(thread);
+    await thread.end();
+  };
+  return {
+    take: () => {
+      const [first] = waiting.keys();
+      if (first === undefined) return startReadingThread(limits);
+      clearTimeout(waiting.get(first));
+      waiting.delete(first);
+      return first;
+    },
+    giveBack: (thread) => {
+      const timer = setTimeout(() => void end(thread), limits.idleSeconds * 1000).unref();
+      waiting.set(thread, timer);
+    },
+    close: async () => {
+      await Promise.all([...waiting.keys()].map(end));
+    },
+  };
 }
 
 interface Turns {
@@ -111,58 +170,5 @@ function createTurns(atATime: number): Turns {
         else next();
       }
     },
-  };
-}
-
-function runWorker(
-  { order, storeChunk }: IntakeJob,
-  reading: ReadingState,
-  { workerPath, memoryInMebibytes }: IntakeLimits,
-  log: ErrorLog,
-): Promise<ReadingEnd> {
-  const resourceLimits = { maxOldGenerationSizeMb: memoryInMebibytes };
-  const worker = startWorker(workerPath, order, { resourceLimits });
-  reading.worker = worker;
-  const storing = createStoring(storeChunk, () => {
-    worker.postMessage(CHUNK_STORED);
-  });
-  return new Promise((resolve) => {
-    let end: ReadingEnd = null;
-    const fail = (problem: unknown): void => {
-      if (!reading.stopped) log('Reading a file failed', problem);
-      end = FAILED;
-      void worker.terminate();
-    };
-    worker.on('message', (message: WorkerMessage) => {
-      if (message.kind === 'progress') reading.progress = message.progress;
-      else if (message.kind === 'done') end = message.outcome;
-      else storing.add(message.chunk).catch(fail);
-    });
-    worker.once('error', fail);
-    worker.once('exit', () => {
-      void storing.idle().then(() => {
-        resolve(reading.stopped ? null : (end ?? FAILED));
-      });
-    });
-  });
-}
-
-const FAILED: ReadingEnd = { ok: false, issue: { code: 'readerFailed' } };
-
-interface Storing {
-  readonly add: (chunk: Chunk) => Promise<void>;
-  /** Resolves when nothing is being stored any more, failed or not. */
-  readonly idle: () => Promise<void>;
-}
-
-/** Stores pieces one after the other; after a failure none any more. */
-function createStoring(storeChunk: IntakeJob['storeChunk'], stored: () => void): Storing {
-  let last: Promise<void> = Promise.resolve();
-  return {
-    add: (chunk) => {
-      last = last.then(() => storeChunk(chunk)).then(stored);
-      return last;
-    },
-    idle: () => last.catch(() => undefined),
   };
 }

@@ -1,14 +1,15 @@
 import type { Result } from '#shared/core';
 import type { Chunk } from './encode/chunk';
 import type { IntakeIssue } from './intake-issue';
-import type { ReadFile } from './read-file';
+import type { ReadFile, ReadingOrder } from './read-file';
 import type { Progress } from './reading';
 
-/** What the intake worker tells: pieces of columns, how far it is, and at last the outcome. */
+/** What an intake worker is told: to read a file, or that a piece of it was stored. */
+export type WorkerOrder =
+  { readonly kind: 'read'; readonly order: ReadingOrder } | { readonly kind: 'chunkStored' };
+
+/** What it tells: pieces of columns, how far it is, and at last the outcome. */
 export type WorkerMessage =
   | { readonly kind: 'chunk'; readonly chunk: Chunk }
   | { readonly kind: 'progress'; readonly progress: Progress }
   | { readonly kind: 'done'; readonly outcome: Result<ReadFile, IntakeIssue> };
-
-/** What the worker is told: a piece was stored. */
-export const CHUNK_STORED = 'chunkStored';

@@ -32,8 +32,11 @@ const MESSAGES: Readonly<Record<TallyIssue['code'], (facts: Facts) => string>> =
   unknownLevel: ({ column, level }) =>
     `"${said(column)}" has no level "${said(level)}" any more. Choose another one.`,
   countNotUsable: ({ column, value, row }) =>
-    `Row ${said(row)} of the count column "${said(column)}" holds "${said(value)}", ` +
-    'which is not a whole number of 0 or more.',
+    said(value).trim() === ''
+      ? `Row ${said(row)} of the count column "${said(column)}" is blank, ` +
+        'and every row has to have a count.'
+      : `Row ${said(row)} of the count column "${said(column)}" holds "${said(value)}", ` +
+        'which is not a whole number of 0 or more.',
   eventsExceedTotal: ({ row, events, total }) =>
     `Row ${said(row)} has more events (${said(events)}) than people in total (${said(total)}).`,
   countsTooLarge: () => 'The counts add up to more than 2^53, which can no longer be exact.',
