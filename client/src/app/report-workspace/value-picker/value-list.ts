@@ -1,7 +1,6 @@
 import { addressKey, listValues, type ValueAddress } from '#shared/analysis';
-import type { PinnedAnalysis } from '#shared/report';
+import { valueWords, type PinnedAnalysis, type ValueWords } from '#shared/report';
 import type { Phrasebook } from '#shared/wording';
-import { valueWords, type ValueWords } from './value-words';
 
 /** A value to choose: in words, and as it prints. */
 export interface ListedValue extends ValueWords {
