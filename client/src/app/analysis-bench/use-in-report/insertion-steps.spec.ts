@@ -31,6 +31,7 @@ const report: ReportView['report'] = {
   stage: 'drafting',
   seq: 0,
   blocks: [],
+  pins: {},
 };
 const used = { analysis, levelId: 'much', scope: { kind: 'pooled' } as const };
 
