@@ -1,4 +1,3 @@
-import { DecimalPipe } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
 import { takeUntilDestroyed } from '@angular/core/rxjs-interop';
 import { RouterLink } from '@angular/router';
@@ -13,11 +12,20 @@ import { ScrollSideways } from '../../ui/scroll-sideways';
 import { EmptyState } from '../../ui/status/empty-state';
 import { ProblemPanel } from '../../ui/status/problem-panel';
 import { type UnfinishedCut, UnfinishedCuts } from '../unfinished-cuts';
+import { GroupedNumberPipe } from '../../ui/grouped-number-pipe';
 
 /** The data sets of a study with their cuts. */
 @Component({
   selector: 'eh-data-page',
-  imports: [Bar, BarActions, DecimalPipe, EmptyState, ProblemPanel, RouterLink, ScrollSideways],
+  imports: [
+    Bar,
+    BarActions,
+    GroupedNumberPipe,
+    EmptyState,
+    ProblemPanel,
+    RouterLink,
+    ScrollSideways,
+  ],
   templateUrl: './data-page.html',
   styleUrl: './data-page.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

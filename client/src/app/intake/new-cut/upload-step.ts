@@ -1,4 +1,3 @@
-import { DecimalPipe } from '@angular/common';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -15,11 +14,12 @@ import { ProgressGauge } from '../../ui/status/progress-gauge';
 import { NewCutStore } from './new-cut-store';
 import { ReadingForm } from './reading-form';
 import { UploadStore } from './upload-store';
+import { GroupedNumberPipe } from '../../ui/grouped-number-pipe';
 
 /** Where the cut goes, and the file that it is made of. */
 @Component({
   selector: 'eh-upload-step',
-  imports: [DecimalPipe, Field, FieldControl, Icon, ProblemPanel, ProgressGauge, ReadingForm],
+  imports: [GroupedNumberPipe, Field, FieldControl, Icon, ProblemPanel, ProgressGauge, ReadingForm],
   templateUrl: './upload-step.html',
   styleUrl: './upload-step.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -1,4 +1,3 @@
-import { DecimalPipe } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, input, model } from '@angular/core';
 import type {
   CodeBook,
@@ -9,11 +8,12 @@ import type {
 } from '#shared/code-book';
 import { levelCounts, missingRows } from './column-contents';
 import { COLUMN_KIND_WORDS } from './column-words';
+import { GroupedNumberPipe } from '../grouped-number-pipe';
 
 /** The columns of a code book; one of them is in view. */
 @Component({
   selector: 'eh-column-list',
-  imports: [DecimalPipe],
+  imports: [GroupedNumberPipe],
   templateUrl: './column-list.html',
   styleUrl: './column-list.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -1,4 +1,3 @@
-import { DecimalPipe } from '@angular/common';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -19,11 +18,12 @@ import {
 import { Icon } from '../marks/icon';
 import type { LevelCounts, UnknownCode } from './column-contents';
 import { shownCode } from './column-words';
+import { GroupedNumberPipe } from '../grouped-number-pipe';
 
 /** The codes of a column that stand for no answer, and what each of them means. */
 @Component({
   selector: 'eh-missing-codes',
-  imports: [DecimalPipe, Icon],
+  imports: [GroupedNumberPipe, Icon],
   templateUrl: './missing-codes.html',
   styleUrl: './missing-codes.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
