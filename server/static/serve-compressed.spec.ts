@@ -47,3 +47,16 @@ it('sends the file itself to whoever does not take brotli', async () => {
 it('sends files without a compressed form as they are', async () => {
   expect((await get('/plain.js', 'br')).text).toBe(SCRIPT);
 });
+
+it('sends the file itself when a build has taken the compressed form away', async () => {
+  writeFileSync(join(directory, 'gone.js'), SCRIPT);
+  writeFileSync(join(directory, 'gone.js.br'), brotliCompressSync(SCRIPT));
+  const app = express().use(serveClient(directory));
+  rmSync(join(directory, 'gone.js.br'));
+  const response = await supertest(app).get('/gone.js').set('Accept-Encoding', 'br');
+  expect([response.status, response.headers['content-encoding'], response.text]).toEqual([
+    200,
+    undefined,
+    SCRIPT,
+  ]);
+});

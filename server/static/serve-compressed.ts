@@ -23,7 +23,12 @@ export function serveCompressed(
     }
     response.set('Content-Encoding', 'br').type(extname(request.path));
     setHeaders(response, request.path);
-    response.sendFile(join(directory, `${request.path}.br`));
+    response.sendFile(join(directory, `${request.path}.br`), (problem?: Error) => {
+      if (problem === undefined || response.headersSent) return;
+      // A build that runs meanwhile has taken it away; the file itself may still be there.
+      response.removeHeader('Content-Encoding');
+      next();
+    });
   };
 }
 
