@@ -1,6 +1,6 @@
 import type { CodeBook, CodeBookColumn } from '#shared/code-book';
 import { expect, it } from 'vitest';
-import { columnDifferences } from './code-book-differences';
+import { columnDifferences, onTopOf } from './code-book-differences';
 
 const column: CodeBookColumn = {
   id: 'c1',
@@ -45,4 +45,15 @@ it('describes both sides of a column that differs', () => {
 it('names a column that only one of them has', () => {
   const [difference] = columnDifferences(book([column]), book([]));
   expect(difference?.theirs).toBe('Not there');
+});
+
+it('puts own changes on top and keeps what only others changed', () => {
+  const second = { ...column, id: 'c2', name: 'site', label: 'Site' };
+  const base = book([column, second]);
+  const theirs = book([column, { ...second, label: 'Place' }]);
+  const mine = book([{ ...column, label: 'Amount' }, second]);
+  expect(onTopOf(theirs, mine, base).columns.map(({ label }) => label)).toEqual([
+    'Amount',
+    'Place',
+  ]);
 });

@@ -14,10 +14,31 @@ export function columnDifferences(mine: CodeBook, theirs: CodeBook): readonly Co
   const ids = new Set([...mine.columns, ...theirs.columns].map(({ id }) => id));
   return [...ids].flatMap((columnId) => {
     const [own, other] = [columnOf(mine, columnId), columnOf(theirs, columnId)];
-    if (JSON.stringify(own) === JSON.stringify(other)) return [];
+    if (isSame(own, other)) return [];
     const label = (own ?? other)?.label ?? columnId;
     return [{ columnId, label, mine: described(own), theirs: described(other) }];
   });
+}
+
+/**
+ * Somebody's newer code book with one's own changes on top: a column that was changed here holds as
+ * it is here, every other one as it is there.
+ */
+export function onTopOf(theirs: CodeBook, mine: CodeBook, base: CodeBook): CodeBook {
+  const isMine = (columnId: string): boolean =>
+    !isSame(columnOf(mine, columnId), columnOf(base, columnId));
+  const kept = theirs.columns.map((column) =>
+    isMine(column.id) ? (columnOf(mine, column.id) ?? column) : column,
+  );
+  const added = mine.columns.filter(
+    ({ id }) => columnOf(theirs, id) === undefined && columnOf(base, id) === undefined,
+  );
+  const layout = isSame(mine.layout, base.layout) ? theirs.layout : mine.layout;
+  return { ...theirs, layout, columns: [...kept, ...added] };
+}
+
+function isSame(one: unknown, other: unknown): boolean {
+  return JSON.stringify(one) === JSON.stringify(other);
 }
 
 function columnOf({ columns }: CodeBook, columnId: string): CodeBookColumn | undefined {

@@ -41,7 +41,7 @@ export class CodeBookPage {
     return cut === null ? '' : `Cut ${cut.number}, ${shortDate(cut.dataDate)}`;
   });
   protected readonly differences = computed(() => {
-    const [mine, theirs] = [this.store.codeBook(), this.store.theirs()];
+    const [mine, theirs] = [this.store.onTop(), this.store.theirs()];
     return mine === null || theirs === null ? [] : columnDifferences(mine, theirs.content);
   });
   protected readonly maySave = computed(

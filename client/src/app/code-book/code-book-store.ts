@@ -5,6 +5,7 @@ import { type Observable, of, switchMap, zip } from 'rxjs';
 import { ApiProblem } from '../server-api/api-problem';
 import { DataApi } from '../server-api/data-api';
 import { CurrentStudy } from '../session/current-study';
+import { onTopOf } from './code-book-differences';
 
 /** The code book of a data set while it is edited. */
 @Injectable()
@@ -21,6 +22,12 @@ export class CodeBookStore {
   /** Somebody else's newer code book, when saving met one. */
   readonly theirs = signal<CodeBookView | null>(null);
 
+  /** Their code book with one's own changes on top. */
+  readonly onTop = computed(() => {
+    const [theirs, mine, saved] = [this.theirs(), this.codeBook(), this.saved()];
+    if (theirs === null || mine === null || saved === null) return null;
+    return onTopOf(theirs.content, mine, saved.content);
+  });
   readonly isChanged = computed(() => {
     const [saved, codeBook] = [this.saved(), this.codeBook()];
     return saved !== null && codeBook !== null && saved.content !== codeBook;
@@ -61,9 +68,9 @@ export class CodeBookStore {
     this.send(saved.dataSetId, saved.number, content);
   }
 
-  /** Puts the own version on top of the newer one. */
+  /** Puts the own changes on top of the newer code book. */
   keepOwn(): void {
-    const [theirs, content] = [this.theirs(), this.codeBook()];
+    const [theirs, content] = [this.theirs(), this.onTop()];
     if (theirs !== null && content !== null) this.send(theirs.dataSetId, theirs.number, content);
   }
 

@@ -22,6 +22,9 @@ const TAGS: Readonly<Record<GuardSeverity, string>> = {
 /** Guards that the code book can answer. */
 const CODE_BOOK_GUARDS: readonly string[] = ['levelsOutOfOrder', 'orderedAsUnordered'];
 
+/** This one stands beside its cause, the study's design. */
+const SAID_BELOW_THE_SENTENCE = 'noRiskByDesign';
+
 interface GuardNote {
   readonly finding: GuardFinding;
   readonly words: GuardWords;
@@ -53,7 +56,9 @@ export class GuardsPanel {
     const print = this.store.print();
     if (print === null) return [];
     const context = { repeatedIdentifiers: this.store.repeatedIdentifiers() };
-    return findGuards(print.result, context).map((finding) => noteOf(print, finding));
+    return findGuards(print.result, context)
+      .filter(({ guardId }) => guardId !== SAID_BELOW_THE_SENTENCE)
+      .map((finding) => noteOf(print, finding));
   });
   /** What is about the whole, or about the layer in view. */
   private readonly here = computed(() => this.notes().filter((note) => this.isHere(note)));

@@ -1,5 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import { layerAt, pooledAt } from '#shared/analysis';
+import { layerAt, type LayerResult, pooledAt } from '#shared/analysis';
 import type { Result } from '#shared/core';
 import {
   type EstimationIssue,
@@ -84,8 +84,12 @@ function testsOf(print: BenchPrint, store: BenchStore): readonly PrintedTest[] {
     printed(print, 'pearsonChiSquare', pair, contrast.pearson),
     printed(print, 'fisherExact', pair, contrast.fisher),
     ...(severalLevels ? [printed(print, 'pearsonChiSquare', 'all levels', layer.association)] : []),
-    printed(print, 'cochranArmitage', `all levels, scores ${scoresOf(print)}`, layer.trend),
+    ...(severalLevels ? [trendOf(print, layer)] : []),
   ];
+}
+
+function trendOf(print: BenchPrint, layer: LayerResult): PrintedTest {
+  return printed(print, 'cochranArmitage', `all levels, scores ${scoresOf(print)}`, layer.trend);
 }
 
 function printed(

@@ -11,7 +11,8 @@ export interface CountCell {
   readonly without: string;
   /** Null where the design gives no risk; a mark where nobody is in the group. */
   readonly risk: string | null;
-  readonly isSparse: boolean;
+  /** Which of the two counts makes the level's expected counts small; null where neither does. */
+  readonly sparse: 'with' | 'without' | null;
 }
 
 /** One exposure level across the layers. */
@@ -69,16 +70,18 @@ function rowsOf(print: BenchPrint, layers: readonly LayerResult[]): readonly Cou
 }
 
 function totalsOf(print: BenchPrint, layers: readonly LayerResult[]): readonly CountCell[] {
-  return layers.map(({ total }) => countCell(print, total, false));
+  return layers.map(({ total }) => countCell(print, total));
 }
 
 function cellOf(print: BenchPrint, layer: LayerResult, levelId: string): CountCell {
   const level = layer.levels.find((candidate) => candidate.levelId === levelId);
   const count = level?.count ?? { events: 0, total: 0 };
-  return countCell(print, count, isSparse(print.result, layer, levelId));
+  const cell = countCell(print, count);
+  if (!isSparse(print.result, layer, levelId)) return cell;
+  return { ...cell, sparse: count.events * 2 <= count.total ? 'with' : 'without' };
 }
 
-function countCell(print: BenchPrint, count: GroupCount, isSparse: boolean): CountCell {
+function countCell(print: BenchPrint, count: GroupCount): CountCell {
   const { style, decimals, result } = print;
   const givesRisk = result.frame.design !== 'caseControl';
   return {
@@ -87,6 +90,6 @@ function countCell(print: BenchPrint, count: GroupCount, isSparse: boolean): Cou
     risk: givesRisk
       ? (formatShare(count, decimals.percent, style)?.text ?? style.table.missingCell.mark)
       : null,
-    isSparse,
+    sparse: null,
   };
 }

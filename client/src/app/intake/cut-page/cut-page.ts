@@ -1,4 +1,3 @@
-import { DecimalPipe } from '@angular/common';
 import {
   ChangeDetectionStrategy,
   Component,
@@ -20,6 +19,7 @@ import { ScrollSideways } from '../../ui/scroll-sideways';
 import { MarginNote } from '../../ui/status/margin-note';
 import { ProblemPanel } from '../../ui/status/problem-panel';
 import { RecordsTable } from './records-table';
+import { GroupedNumberPipe } from '../../ui/grouped-number-pipe';
 
 /** What a cut holds: its profile, and its records for whoever may see them. */
 @Component({
@@ -27,7 +27,7 @@ import { RecordsTable } from './records-table';
   imports: [
     Bar,
     BarActions,
-    DecimalPipe,
+    GroupedNumberPipe,
     MarginNote,
     ProblemPanel,
     RecordsTable,
@@ -73,7 +73,7 @@ export class CutPage {
     const byCount = column.values.toSorted((one, other) => other.count - one.count);
     return byCount
       .slice(0, 4)
-      .map(({ value, count }) => `${shownCode(value)} ${count.toLocaleString('en')}`)
+      .map(({ value, count }) => `${shownCode(value)} (${count.toLocaleString('en')})`)
       .join(', ');
   }
 

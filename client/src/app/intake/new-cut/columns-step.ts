@@ -1,4 +1,3 @@
-import { DecimalPipe } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, output } from '@angular/core';
 import type { ColumnProfile } from '#shared/api';
 import {
@@ -13,6 +12,7 @@ import { COLUMN_KIND_WORDS, shownCode } from '../../ui/code-book-editor/column-w
 import { ScrollSideways } from '../../ui/scroll-sideways';
 import { LayoutForm } from './layout-form';
 import { NewCutStore } from './new-cut-store';
+import { GroupedNumberPipe } from '../../ui/grouped-number-pipe';
 
 interface ColumnRow {
   readonly column: CodeBookColumn;
@@ -26,7 +26,7 @@ const SAMPLE_VALUES = 4;
 /** How the rows count, and what each column is. */
 @Component({
   selector: 'eh-columns-step',
-  imports: [DecimalPipe, LayoutForm, ScrollSideways],
+  imports: [GroupedNumberPipe, LayoutForm, ScrollSideways],
   templateUrl: './columns-step.html',
   styleUrl: './columns-step.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

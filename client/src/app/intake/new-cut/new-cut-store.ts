@@ -21,6 +21,7 @@ export class NewCutStore {
   private readonly now = inject(NOW);
   private readonly studyId = inject(CurrentStudy).study()?.id ?? '';
   private aimedId: string | null = null;
+  private suggested = { name: '', date: '' };
 
   readonly dataSets = signal<readonly DataSetView[]>([]);
   readonly dataSet = this.previous.dataSet.asReadonly();
@@ -77,8 +78,7 @@ export class NewCutStore {
 
   send(file: File): void {
     this.drop();
-    if (this.dataSetName() === '') this.dataSetName.set(nameOfFile(file.name));
-    if (this.dataDate() === '') this.dataDate.set(dateOfFile(file.name));
+    this.suggestFrom(file.name);
     this.uploads.send(file, this.dataSet()?.id ?? null);
   }
 
@@ -139,6 +139,14 @@ export class NewCutStore {
     this.codeBook.set(null);
     this.problem.set(null);
     this.uploads.discard();
+  }
+
+  /** What the file's name says, unless a person said something else. */
+  private suggestFrom(fileName: string): void {
+    const before = this.suggested;
+    this.suggested = { name: nameOfFile(fileName), date: dateOfFile(fileName) };
+    if (['', before.name].includes(this.dataSetName())) this.dataSetName.set(this.suggested.name);
+    if (['', before.date].includes(this.dataDate())) this.dataDate.set(this.suggested.date);
   }
 
   private begin(upload: UploadView): void {

@@ -1,6 +1,6 @@
 import { effect, inject, Injectable, signal } from '@angular/core';
 import type { CodeBookView, CutView, DataSetView } from '#shared/api';
-import type { Subscription } from 'rxjs';
+import { Subscription } from 'rxjs';
 import { DataApi } from '../../server-api/data-api';
 import { CurrentStudy } from '../../session/current-study';
 
@@ -30,9 +30,12 @@ export class PreviousCut {
 
   /** Comparing is a help: without the answers the new cut can still be made. */
   private read(dataSet: DataSetView): Subscription {
-    const reading = this.api.readCodeBook(this.studyId, dataSet.id).subscribe((book) => {
-      this.book.set(book);
-    });
+    const reading = new Subscription();
+    reading.add(
+      this.api.readCodeBook(this.studyId, dataSet.id).subscribe((book) => {
+        this.book.set(book);
+      }),
+    );
     const newest = dataSet.cuts.toSorted((one, other) => other.number - one.number)[0];
     if (newest !== undefined) {
       reading.add(

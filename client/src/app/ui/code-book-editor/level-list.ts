@@ -5,7 +5,6 @@ import {
   CdkDragPlaceholder,
   CdkDropList,
 } from '@angular/cdk/drag-drop';
-import { DecimalPipe } from '@angular/common';
 import {
   afterNextRender,
   ChangeDetectionStrategy,
@@ -34,14 +33,24 @@ import {
   splitLevel,
 } from '#shared/code-book';
 import { Icon } from '../marks/icon';
+import { counted } from '../words';
 import type { LevelCounts } from './column-contents';
 import { shownCode } from './column-words';
 import { type LevelRow, levelRows } from './level-rows';
+import { GroupedNumberPipe } from '../grouped-number-pipe';
 
 /** The levels or bands of a column: words, order, reference; merging and taking apart. */
 @Component({
   selector: 'eh-level-list',
-  imports: [CdkDrag, CdkDragHandle, CdkDragPlaceholder, CdkDropList, DecimalPipe, Icon, MatMenuModule],
+  imports: [
+    CdkDrag,
+    CdkDragHandle,
+    CdkDragPlaceholder,
+    CdkDropList,
+    GroupedNumberPipe,
+    Icon,
+    MatMenuModule,
+  ],
   templateUrl: './level-list.html',
   styleUrl: './level-list.scss',
   host: { '(keydown)': 'press($event)' },
@@ -58,6 +67,14 @@ export class LevelList {
   protected readonly rows = computed(() => levelRows(this.column(), this.counts()));
   protected readonly movable = computed(
     () => !this.readOnly() && FACTOR_SOURCE[this.column().kind] === 'levels',
+  );
+  protected readonly countHead = computed(
+    () => this.countNoun().charAt(0).toUpperCase() + this.countNoun().slice(1),
+  );
+  protected readonly partsWords = computed(() =>
+    FACTOR_SOURCE[this.column().kind] === 'bands'
+      ? counted(this.rows().length, 'band', 'bands')
+      : counted(this.rows().length, 'level', 'levels'),
   );
   protected readonly picked = linkedSignal<string, ReadonlySet<string>>({
     source: () => this.column().id,

@@ -1,12 +1,15 @@
-import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
 import type { CodeBookColumn } from '#shared/code-book';
+import { fillWords } from '#shared/wording';
 import { Field } from '../field/field';
 import { FieldControl } from '../field/field-control';
+import { PHRASEBOOK } from '../phrasebook';
 import {
   filledPattern,
   GROUP_PATTERNS,
   patternProblem,
   shownLevels,
+  usablePattern,
   WITHIN_PATTERNS,
 } from './spoken-patterns';
 
@@ -24,6 +27,7 @@ export class ReadingSpecimen {
   readonly readOnly = input(false);
   readonly changed = output<CodeBookColumn>();
 
+  private readonly book = inject(PHRASEBOOK);
   protected readonly groupPatterns = GROUP_PATTERNS;
   protected readonly withinPatterns = WITHIN_PATTERNS;
   protected readonly groupProblem = computed(() => patternProblem(this.column().groupPattern));
@@ -43,17 +47,29 @@ export class ReadingSpecimen {
     this.changed.emit({ ...this.column(), withinPattern: textOf(event) });
   }
 
+  /** What is said where the code book says nothing. */
+  protected readonly usualGroup = computed(() =>
+    fillWords(this.book, 'group.default', {
+      people: '{people}',
+      exposure: this.column().sentenceLabel,
+      level: '{level}',
+    }),
+  );
+  protected readonly usualWithin = computed(() =>
+    fillWords(this.book, 'within.default', {
+      column: this.column().sentenceLabel,
+      level: '{level}',
+    }),
+  );
+
   private groupWords(level: string): string {
-    const { groupPattern, sentenceLabel } = this.column();
-    const own = groupPattern?.includes('{level}') === true ? groupPattern : null;
-    const pattern = own ?? `{people} with ${sentenceLabel} {level}`;
-    return filledPattern(pattern, level, this.peopleNoun());
+    const own = usablePattern(this.column().groupPattern);
+    return filledPattern(own ?? this.usualGroup(), level, this.peopleNoun());
   }
 
   private withinWords(level: string): string {
-    const { withinPattern, sentenceLabel } = this.column();
-    const own = withinPattern?.includes('{level}') === true ? withinPattern : null;
-    return filledPattern(own ?? `within ${sentenceLabel} {level}`, level, this.peopleNoun());
+    const own = usablePattern(this.column().withinPattern);
+    return filledPattern(own ?? this.usualWithin(), level, this.peopleNoun());
   }
 }
 

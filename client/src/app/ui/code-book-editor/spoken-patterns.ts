@@ -25,6 +25,11 @@ export function patternProblem(pattern: string | null | undefined): string | nul
     : 'Write {level} where the level’s words go.';
 }
 
+/** A pattern that names its level; null where there is none that can be used. */
+export function usablePattern(pattern: string | null | undefined): string | null {
+  return pattern?.includes('{level}') === true ? pattern : null;
+}
+
 /** A pattern with its slots filled. */
 export function filledPattern(pattern: string, level: string, people: string): string {
   return pattern.replaceAll('{people}', people).replaceAll('{level}', level);
