@@ -8,11 +8,13 @@ export default defineConfig({
   outputDir: 'test-results/e2e',
   forbidOnly: Boolean(process.env.CI),
   workers: 1,
-  timeout: 60_000,
+  timeout: 120_000,
+  expect: { timeout: 20_000 },
   reporter: 'list',
   use: {
     ...devices['Desktop Chrome'],
     viewport: { width: 1440, height: 900 },
+    actionTimeout: 30_000,
     trace: 'retain-on-failure',
     launchOptions: {
       ...(executablePath === undefined ? {} : { executablePath }),

@@ -1,0 +1,90 @@
+import { demonstrator, openReport } from './demonstration';
+import type { ReportPage } from './pages/report-page';
+import { expectSameDocument, expectSameWorkbook } from './readers/agreement';
+import { readDocx } from './readers/docx';
+import { numbersIn } from './readers/numbers';
+import type { PrintedBlock } from './readers/proof';
+import { readXlsx } from './readers/xlsx';
+import { expect, test } from './test';
+
+test.use({ startingData: 'demonstration', signedIn: demonstrator('lead') });
+
+test('reversing turns table, figure and sentence together, and the files', async ({ page }) => {
+  test.setTimeout(240_000);
+  const report = await openReport(page, 'reminderLetters');
+  const before = await agreed(report);
+  await report.reverse(report.block('Effect sentence'), 'The letter is what is usual by now.');
+  await expect(report.block('Effect sentence')).toContainText(/lower/);
+  await report.untilSaved();
+  const after = await agreed(report);
+
+  expect(sentenceOf(before)).toMatch(/higher/);
+  expect(sentenceOf(after)).toMatch(/lower/);
+  expect(groupsIn(sentenceOf(after))).toEqual(groupsIn(sentenceOf(before)).toReversed());
+
+  const [one, other] = [effectsOf(before), effectsOf(after)];
+  expect(one.length).toBeGreaterThan(3);
+  expect(other.map(({ difference }) => difference)).toEqual(
+    one.map(({ difference: [value = '', lower = '', upper = ''] }) =>
+      [value, upper, lower].map(opposite),
+    ),
+  );
+  for (const [place, { ratio }] of other.entries()) {
+    expect(1 / Number(ratio[0])).toBeCloseTo(Number(one[place]!.ratio[0]), 1);
+    expect(1 / Number(ratio[1])).toBeCloseTo(Number(one[place]!.ratio[2]), 1);
+  }
+  expect(referenceRows(after)).not.toEqual(referenceRows(before));
+  expect(labelsOf(after)).not.toEqual(labelsOf(before));
+});
+
+/** What the page prints, once both files have been held to it. */
+async function agreed(report: ReportPage): Promise<readonly PrintedBlock[]> {
+  const printed = await report.printed();
+  expectSameDocument(printed, readDocx(await report.download('DOCX')));
+  expectSameWorkbook(printed, readXlsx(await report.download('XLSX')));
+  return printed;
+}
+
+function blockNamed(blocks: readonly PrintedBlock[], name: string): PrintedBlock {
+  return blocks.find((block) => block.name === name)!;
+}
+
+function sentenceOf(blocks: readonly PrintedBlock[]): string {
+  return blockNamed(blocks, 'Effect sentence').paragraphs.join(' ');
+}
+
+/** The two groups, in the order in which the sentence names them. */
+function groupsIn(sentence: string): readonly string[] {
+  return sentence.match(/the usual invitation|a reminder letter/g) ?? [];
+}
+
+interface Effect {
+  readonly difference: readonly string[];
+  readonly ratio: readonly string[];
+}
+
+/** The rows of the table that hold effects: a difference and a ratio, each with its limits. */
+function effectsOf(blocks: readonly PrintedBlock[]): readonly Effect[] {
+  const { rows } = blockNamed(blocks, 'Table 1').tables[0]!;
+  return rows.flatMap((cells) => {
+    const [difference = [], ratio = []] = cells
+      .slice(-2)
+      .map((cell) => numbersIn(cell.replace(/ to /, ' ')));
+    return difference.length === 3 && ratio.length === 3 ? [{ difference, ratio }] : [];
+  });
+}
+
+function opposite(number: string): string {
+  if (number.startsWith('-')) return `+${number.slice(1)}`;
+  return `-${number.replace('+', '')}`;
+}
+
+/** Rows whose effect cells say that they are what the others are held against. */
+function referenceRows(blocks: readonly PrintedBlock[]): readonly string[] {
+  const { rows } = blockNamed(blocks, 'Table 1').tables[0]!;
+  return rows.filter((cells) => cells.some((cell) => /^ref/i.test(cell))).map(([label]) => label!);
+}
+
+function labelsOf(blocks: readonly PrintedBlock[]): readonly string[] {
+  return blockNamed(blocks, 'Figure 1').figures[0]!.texts;
+}
