@@ -4,6 +4,7 @@ import {
   ChangeDetectionStrategy,
   Component,
   computed,
+  DOCUMENT,
   effect,
   ElementRef,
   inject,
@@ -21,9 +22,9 @@ import { ConflictPanel } from './conflict-panel';
 import { BlockEditor } from '../block-editors/block-editor';
 import { ProofChart } from '../figures/proof-chart';
 import { ReportState } from '../report-store/report-state';
+import type { PrintedBlock } from './printed-block';
 import { printsNothing } from './prints-nothing';
 import { ProofDesk } from './proof-desk';
-import { ReportProof } from './report-proof';
 
 /** One block as it prints, with what moves, adds and opens it. */
 @Component({
@@ -49,7 +50,8 @@ import { ReportProof } from './report-proof';
     '[attr.aria-details]': 'detailIds() || null',
     '[class.selected]': 'selected()',
     '[class.editing]': 'editing()',
-    '(focusin)': 'take()',
+    '(focusin)': 'takeFocused()',
+    '(pointerdown)': 'press()',
     '(click)': 'click($event)',
     '(dblclick)': 'open()',
   },
@@ -57,19 +59,21 @@ import { ReportProof } from './report-proof';
 })
 export class ProofBlock {
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
+  private readonly document = inject(DOCUMENT);
   protected readonly desk = inject(ProofDesk);
   private readonly state = inject(ReportState);
   private readonly actions = inject(BlockActions);
-  private readonly proof = inject(ReportProof);
 
   readonly block = input.required<Block>();
   readonly selected = input.required<boolean>();
   readonly editing = input.required<boolean>();
+  /** What it prints; null as long as it was not drawn. */
+  readonly printed = input.required<PrintedBlock | null>();
   /** Ids of the notes that tell more about the block. */
   readonly detailIds = input('');
 
   private readonly id = computed(() => this.block().id);
-  protected readonly elements = computed(() => this.proof.of(this.id()).elements);
+  protected readonly elements = computed(() => this.printed()?.elements ?? []);
   protected readonly name = computed(() => this.actions.nameOf(this.id()));
   protected readonly mayChange = computed(() => this.actions.mayChangeKind(this.block().kind));
   protected readonly conflict = computed(() =>
@@ -78,7 +82,7 @@ export class ProofBlock {
   protected readonly companion = computed(() => companionOf(this.block().kind)?.component ?? null);
   protected readonly companionInputs = computed(() => ({ block: this.block() }));
   protected readonly hint = computed(() => {
-    if (!printsNothing(this.elements())) return null;
+    if (this.printed() === null || !printsNothing(this.elements())) return null;
     const text = textOf(this.block());
     return `Empty ${kindOf(this.block())?.label.toLowerCase() ?? 'block'}. ${text?.hint ?? ''}`;
   });
@@ -94,8 +98,26 @@ export class ProofBlock {
     });
   }
 
-  protected take(): void {
-    if (!this.selected()) this.desk.select(this.id());
+  protected takeFocused(): void {
+    if (!this.pressed) this.take();
+  }
+
+  /**
+   * A press takes the block in hand when it ends: what unfolds under a block in hand would move the
+   * button away from under the pointer, and the press would be lost.
+   */
+  protected press(): void {
+    this.pressed = true;
+    this.wasSelected = this.selected();
+    const released = new AbortController();
+    const end = (event: Event): void => {
+      released.abort();
+      this.pressed = false;
+      if (event.type === 'pointerup') this.take();
+    };
+    for (const type of ['pointerup', 'pointercancel']) {
+      this.document.addEventListener(type, end, { signal: released.signal });
+    }
   }
 
   /** The first press takes the block in hand; the next one, into its text, opens it. */
@@ -104,7 +126,6 @@ export class ProofBlock {
     const onText = pressed.closest('eh-proof-element') !== null;
     const onControl = pressed.closest('button, a, summary, input, select') !== null;
     if (this.wasSelected && onText && !onControl && textOf(this.block()) !== null) this.open();
-    this.wasSelected = this.selected();
   }
 
   protected open(): void {
@@ -121,10 +142,15 @@ export class ProofBlock {
   }
 
   private wasSelected = false;
+  private pressed = false;
+
+  private take(): void {
+    if (!this.selected()) this.desk.select(this.id());
+  }
 
   private takeFocus(): void {
-    if (this.host.contains(document.activeElement)) return;
-    const elsewhere = document.activeElement?.closest('[role=dialog], eh-frame-bar') ?? null;
+    if (this.host.contains(this.document.activeElement)) return;
+    const elsewhere = this.document.activeElement?.closest('[role=dialog], eh-frame-bar') ?? null;
     if (elsewhere === null) this.host.focus();
   }
 }
