@@ -68,6 +68,7 @@ export class TextEditSession {
     if (baseVersion === undefined || steps.length === 0) return;
     if (this.actions.make([{ kind: 'editText', blockId, baseVersion, steps }], group)) {
       text.settle();
+      this.sync.keepUnsent();
       this.drafts.drop(blockId);
     }
   }

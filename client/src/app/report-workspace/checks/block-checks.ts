@@ -1,14 +1,15 @@
 import type { LayoutElement } from '#shared/layout';
-import { runsOf } from '#shared/report';
 import { counted } from '../../ui/words';
-import type { PrintedBlock } from '../proof/report-proof';
+import type { PrintedBlock } from '../proof/printed-block';
 import type { ProofCheck } from './proof-check';
-import { keyOf, type Likeness, likeness, type PrintedValue } from './typed-numbers';
+import { type Likeness, likeness, type PrintedValue } from './typed-numbers';
 
 /** What the checks of a block may ask: names of analyses, and every value that could be meant. */
 export interface CheckContext {
   readonly nameOf: (analysisId: string) => string;
   readonly values: () => readonly PrintedValue[];
+  /** The table or figure that prints a value, as in "Table 2"; null when none does. */
+  readonly placeOf: (key: string) => string | null;
 }
 
 /** What is wrong in a block: lost sources, typed numbers, what cannot be printed. */
@@ -40,16 +41,15 @@ function unprintable(blockId: string, element: LayoutElement): readonly ProofChe
   ];
 }
 
-function lostSources(blockId: string, { elements }: PrintedBlock): readonly ProofCheck[] {
-  const lost = elements.flatMap(runsOf).filter((run) => run.origin?.state === 'missing');
-  if (lost.length === 0) return [];
+function lostSources(blockId: string, { missing }: PrintedBlock): readonly ProofCheck[] {
+  if (missing === 0) return [];
   return [
     {
       id: `${blockId}/lost`,
       blockId,
       weight: 'problem',
       tag: 'Source',
-      subject: `${counted(lost.length, 'value has', 'values have')} lost their source`,
+      subject: `${counted(missing, 'value has', 'values have')} lost their source`,
       text: 'The analysis, level or stratum behind it is no longer there. Choose another value.',
       anchor: { selector: '.missing', index: 0 },
       remedies: [{ kind: 'edit', label: 'Open the block' }],
@@ -59,14 +59,11 @@ function lostSources(blockId: string, { elements }: PrintedBlock): readonly Proo
 
 function typedNumbers(
   blockId: string,
-  { elements }: PrintedBlock,
+  { typed }: PrintedBlock,
   context: CheckContext,
 ): readonly ProofCheck[] {
-  const typed = elements
-    .flatMap(runsOf)
-    .filter((run) => run.origin?.state === 'typed')
-    .map((run) => run.text);
-  const alike = typed.map((text) => likeness(text, context.values()));
+  if (typed.length === 0) return [];
+  const alike = typed.map((text) => likeness(text, context.values(), context.placeOf));
   const told = typed.flatMap((text, index) => {
     const found = alike[index];
     return found ? [typedResult(blockId, { text, index }, found, context)] : [];
@@ -81,8 +78,8 @@ function typedResult(
   found: Likeness,
   context: CheckContext,
 ): ProofCheck {
-  const name = context.nameOf(found.value.address.analysisId);
-  const place = found.value.printedIn === null ? '' : `, as ${found.value.printedIn} prints`;
+  const name = context.nameOf(found.value.analysisId);
+  const place = found.printedIn === null ? '' : `, as ${found.printedIn} prints`;
   const says = found.exact ? 'has the same number' : `says ${found.value.text}`;
   return {
     id: `${blockId}/typed/${text}/${index}`,
@@ -93,7 +90,7 @@ function typedResult(
     text: `“${text}” was typed. ${name} ${says}${place}.`,
     anchor: { selector: '.typed', index },
     remedies: [
-      { kind: 'bind', label: `Bind to ${name}`, typedIndex: index, address: keyOf(found) },
+      { kind: 'bind', label: `Bind to ${name}`, typedIndex: index, address: found.value.key },
     ],
   };
 }

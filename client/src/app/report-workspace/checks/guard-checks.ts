@@ -1,6 +1,6 @@
 import {
-  addressKey,
   type AddressedQuantity,
+  type AnalysisResult,
   findGuards,
   type GuardFinding,
   type GuardId,
@@ -10,7 +10,8 @@ import type { HouseStyle } from '#shared/house-style';
 import type { PinnedAnalysis } from '#shared/report';
 import { guardWords, type Phrasebook } from '#shared/wording';
 import { counted } from '../../ui/words';
-import type { PrintedBlock } from '../proof/report-proof';
+import type { PrintedBlock } from '../proof/printed-block';
+import { samePlace } from '../margins/block-sources';
 import type { ProofCheck } from './proof-check';
 
 /** What the words of a guard are said under. */
@@ -39,7 +40,7 @@ export function guardChecks(
   pin: PinnedAnalysis,
   under: GuardPrint & { readonly seen: Set<string> },
 ): readonly ProofCheck[] {
-  const matters = findGuards(pin.result).filter(({ guardId }) => mattersTo(guardId, printed));
+  const matters = findingsOf(pin.result).filter(({ guardId }) => mattersTo(guardId, printed));
   const relevant = matters.filter(
     (each) => !under.seen.has(seenKey(each, pin)) || concerns(each, printed, pin),
   );
@@ -120,20 +121,22 @@ function rest(
 
 /** Whether a block prints an effect at the very place that a guard speaks of. */
 function concerns(finding: GuardFinding, { bound }: PrintedBlock, pin: PinnedAnalysis): boolean {
-  const { scope, levelId } = finding.place;
-  if (finding.severity === 'note' || levelId === null) return false;
-  const place = addressKey({
-    analysisId: pin.analysisId,
-    quantity: 'total',
-    levelId,
-    scope,
-    facet: 'value',
-  });
+  const { place, severity } = finding;
+  if (severity === 'note' || place.levelId === null) return false;
   const effects = bound.filter(
-    ({ address }) => address.facet !== 'value' && address.quantity !== 'risk',
+    ({ address }) =>
+      address.analysisId === pin.analysisId &&
+      address.facet !== 'value' &&
+      address.quantity !== 'risk',
   );
-  const places = new Set(
-    effects.map(({ address }) => addressKey({ ...address, quantity: 'total', facet: 'value' })),
-  );
-  return places.size === 1 && places.has(place);
+  return effects.length > 0 && effects.every(({ address }) => samePlace(address, place));
+}
+
+const FOUND = new WeakMap<AnalysisResult, readonly GuardFinding[]>();
+
+/** A result never changes, and neither does what the guards find in it. */
+function findingsOf(result: AnalysisResult): readonly GuardFinding[] {
+  const findings = FOUND.get(result) ?? findGuards(result);
+  FOUND.set(result, findings);
+  return findings;
 }

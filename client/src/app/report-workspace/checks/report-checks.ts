@@ -1,19 +1,15 @@
 import { computed, inject, Injectable } from '@angular/core';
-import { addressKey, listValues } from '#shared/analysis';
+import { listValues } from '#shared/analysis';
 import { PHRASEBOOK } from '../../ui/phrasebook';
 import { ProofWords } from '../proof/proof-words';
-import { type PrintedBlock, ReportProof } from '../proof/report-proof';
+import type { PrintedBlock } from '../proof/printed-block';
+import { ReportProof } from '../proof/report-proof';
 import { ReportState } from '../report-store/report-state';
 import { ReportStore } from '../report-store/report-store';
 import { blockChecks } from './block-checks';
 import { guardChecks } from './guard-checks';
 import type { ProofCheck } from './proof-check';
-import type { PrintedValue } from './typed-numbers';
-
-interface RememberedChecks {
-  readonly values: readonly PrintedValue[] | null;
-  readonly checks: readonly ProofCheck[];
-}
+import { printedValue, type PrintedValue } from './typed-numbers';
 
 /** What the rules find in the report as it prints now, in the order of its blocks. */
 @Injectable()
@@ -23,7 +19,6 @@ export class ReportChecks {
   private readonly proof = inject(ReportProof);
   private readonly words = inject(ProofWords);
   private readonly phrasebook = inject(PHRASEBOOK);
-  private readonly remembered = new WeakMap<PrintedBlock, RememberedChecks>();
 
   readonly byBlock = computed(() => {
     const blocks = this.proof.blocks();
@@ -46,17 +41,12 @@ export class ReportChecks {
     return this.byBlock().get(blockId) ?? [];
   }
 
-  /** A block that prints what it printed before has the checks that it had before. */
   private checksOf(blockId: string, printed: PrintedBlock): readonly ProofCheck[] {
-    const known = this.remembered.get(printed);
-    if (known !== undefined && (known.values === null || known.values === this.values())) {
-      return known.checks;
-    }
-    const asked: { values: readonly PrintedValue[] | null } = { values: null };
-    const values = (): readonly PrintedValue[] => (asked.values = this.values());
-    const checks = blockChecks(blockId, printed, { nameOf: (id) => this.nameOf(id), values });
-    this.remembered.set(printed, { values: asked.values, checks });
-    return checks;
+    return blockChecks(blockId, printed, {
+      nameOf: (id) => this.nameOf(id),
+      values: () => this.values(),
+      placeOf: (key) => this.names().get(this.proof.captionedPlaces().get(key) ?? '') ?? null,
+    });
   }
 
   /** `seen` holds what guards have said beside earlier blocks; this adds to it. */
@@ -76,27 +66,17 @@ export class ReportChecks {
   }
 
   /** Every value of the pinned analyses as it prints; worked out once a number was typed. */
-  private readonly values = computed((): readonly PrintedValue[] => {
-    const places = this.printedPlaces();
-    return [...this.state.pins().values()].flatMap(({ analysisId, result }) =>
-      listValues(result, analysisId).map(({ address }) => ({
-        address,
-        text: this.words.textOf(address),
-        printedIn: places.get(addressKey(address)) ?? null,
-      })),
-    );
-  });
+  private readonly values = computed((): readonly PrintedValue[] =>
+    [...this.state.pins().values()].flatMap(({ analysisId, result }) =>
+      listValues(result, analysisId).map(({ address }) =>
+        printedValue(address, this.words.textOf(address)),
+      ),
+    ),
+  );
 
-  private printedPlaces(): ReadonlyMap<string, string> {
-    const names = new Map(this.words.references().map((each) => [each.blockId, each.name]));
-    const printed = [...this.proof.blocks()].flatMap(([blockId, { bound }]) => {
-      const name = names.get(blockId);
-      return name === undefined
-        ? []
-        : bound.map(({ address }) => [addressKey(address), name] as const);
-    });
-    return new Map(printed.toReversed());
-  }
+  private readonly names = computed(
+    () => new Map(this.words.references().map(({ blockId, name }) => [blockId, name])),
+  );
 
   private nameOf(analysisId: string): string {
     return this.state.pins().get(analysisId)?.number ?? 'Its analysis';

@@ -1,16 +1,23 @@
-import type { ValueAddress } from '#shared/analysis';
 import { describe, expect, it } from 'vitest';
-import { likeness, type PrintedValue } from './typed-numbers';
+import {
+  type Likeness,
+  likeness as likenessAmong,
+  type PrintedValue,
+  printedValue,
+} from './typed-numbers';
 
-function value(text: string, printedIn: string | null = null, id = text): PrintedValue {
-  const address: ValueAddress = {
-    analysisId: id,
-    quantity: 'risk',
-    levelId: null,
-    scope: { kind: 'crude' },
-    facet: 'value',
-  };
-  return { address, text, printedIn };
+function value(text: string, analysisId = text): PrintedValue {
+  const scope = { kind: 'crude' } as const;
+  return printedValue({ analysisId, quantity: 'risk', levelId: null, scope, facet: 'value' }, text);
+}
+
+function likeness(
+  typed: string,
+  values: PrintedValue[],
+  printed: PrintedValue[] = [],
+): Likeness | null {
+  const keys = new Set(printed.map(({ key }) => key));
+  return likenessAmong(typed, values, (key) => (keys.has(key) ? 'Table 2' : null));
 }
 
 describe('a typed number', () => {
@@ -31,8 +38,8 @@ describe('a typed number', () => {
   });
 
   it('takes the value that the report prints before one that it does not', () => {
-    const found = likeness('22%', [value('22.0%', null, 'a'), value('21.5%', 'Table 2', 'b')]);
-    expect(found?.value.address.analysisId).toBe('b');
+    const [other, shown] = [value('22.0%', 'a'), value('21.5%', 'b')];
+    expect(likeness('22%', [other, shown], [shown])?.value.analysisId).toBe('b');
   });
 
   it('takes no small whole number for a result: hours and months are no findings', () => {

@@ -2,17 +2,33 @@ import { addressKey, type ValueAddress } from '#shared/analysis';
 
 /** A value of a pinned analysis as it prints by itself. */
 export interface PrintedValue {
-  readonly address: ValueAddress;
+  readonly key: string;
+  readonly analysisId: string;
   readonly text: string;
-  /** The table or figure that prints it too, as in "Table 2"; null when none does. */
-  readonly printedIn: string | null;
+  /** What the text says as a number; null when it is no plain figure. */
+  readonly figure: Figure | null;
+}
+
+/** A figure as it was written. */
+export interface Figure {
+  readonly value: number;
+  readonly decimals: number;
+  readonly percent: boolean;
 }
 
 /** A value that a typed number seems to repeat. */
 export interface Likeness {
   readonly value: PrintedValue;
+  /** The table or figure that prints the value too, as in "Table 2". */
+  readonly printedIn: string | null;
   /** Whether it says the same, or only the same after rounding. */
   readonly exact: boolean;
+}
+
+/** A value with what its text says. */
+export function printedValue(address: ValueAddress, text: string): PrintedValue {
+  const { analysisId } = address;
+  return { key: addressKey(address), analysisId, text, figure: readFigure(text) };
 }
 
 /** Whole numbers below this are too common (hours, months, grades) to be taken for results. */
@@ -22,23 +38,20 @@ const LEAST_TELLING_COUNT = 30;
  * The value that a typed number most likely repeats; null when none comes near. Percentages and
  * decimals are compared after rounding to the typed digits, whole numbers only as they are.
  */
-export function likeness(typed: string, values: readonly PrintedValue[]): Likeness | null {
+export function likeness(
+  typed: string,
+  values: readonly PrintedValue[],
+  placeOf: (key: string) => string | null,
+): Likeness | null {
   const number = readFigure(typed);
   if (number === null || !isTelling(number)) return null;
   const alike = values.flatMap((value) => {
-    const printed = readFigure(value.text);
-    return printed !== null && isAlike(number, printed) ? [{ value, printed }] : [];
+    if (value.figure === null || !isAlike(number, value.figure)) return [];
+    const exact = value.figure.value === number.value;
+    return [{ value, exact, printedIn: placeOf(value.key) }];
   });
   const [best] = alike.toSorted((one, other) => rank(other, number) - rank(one, number));
-  return best === undefined
-    ? null
-    : { value: best.value, exact: best.printed.value === number.value };
-}
-
-interface Figure {
-  readonly value: number;
-  readonly decimals: number;
-  readonly percent: boolean;
+  return best ?? null;
 }
 
 /** Reads a figure with the decimal marks, thousands and signs that house styles print. */
@@ -71,16 +84,7 @@ function isAlike(typed: Figure, printed: Figure): boolean {
 }
 
 /** What the report prints already comes first, then what says the very same, then what is near. */
-function rank(
-  { value, printed }: { readonly value: PrintedValue; readonly printed: Figure },
-  typed: Figure,
-): number {
-  const shown = value.printedIn === null ? 0 : 4;
-  const same = printed.value === typed.value ? 2 : 0;
-  return shown + same - Math.abs(printed.value - typed.value);
-}
-
-/** The key that binds a value. */
-export function keyOf(likeness: Likeness): string {
-  return addressKey(likeness.value.address);
+function rank({ value, exact, printedIn }: Likeness, typed: Figure): number {
+  const away = Math.abs((value.figure?.value ?? 0) - typed.value);
+  return (printedIn === null ? 0 : 4) + (exact ? 2 : 0) - away;
 }

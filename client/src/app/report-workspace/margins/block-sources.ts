@@ -1,10 +1,9 @@
-import { addressKey, type ResultScope, type ValueAddress } from '#shared/analysis';
+import type { ResultScope, ValueAddress } from '#shared/analysis';
 import { EFFECT_MEASURE_IDS } from '#shared/effects/measure-ids';
-import type { FigureElement, LayoutElement, TableElement } from '#shared/layout';
-import { type PinnedAnalysis, runsOf } from '#shared/report';
+import type { PinnedAnalysis } from '#shared/report';
 import { shortDate } from '../../ui/dates';
 import { counted } from '../../ui/words';
-import type { PrintedBlock } from '../proof/report-proof';
+import type { PrintedBlock } from '../proof/printed-block';
 import { methodLines } from './method-lines';
 
 /** Where the numbers of a block come from, in the words of the left margin. */
@@ -51,13 +50,8 @@ export function countWords({ bound, typed, missing }: SourceCount): string {
   return `${bound} of ${counted(all, 'number', 'numbers')} bound`;
 }
 
-function countSources({ bound, elements }: PrintedBlock): SourceCount {
-  const states = elements.flatMap(runsOf).map((run) => run.origin?.state);
-  return {
-    bound: bound.length,
-    typed: states.filter((state) => state === 'typed').length,
-    missing: states.filter((state) => state === 'missing').length,
-  };
+function countSources({ bound, typed, missing }: PrintedBlock): SourceCount {
+  return { bound: bound.length, typed: typed.length, missing };
 }
 
 function nameOf(
@@ -100,14 +94,24 @@ function onlyContrast(addresses: readonly ValueAddress[]): OnlyContrast | null {
   );
   const [first] = effects;
   if (first?.levelId === undefined || first.levelId === null) return null;
-  const place = placeKey(first);
-  return effects.every((address) => placeKey(address) === place)
+  return effects.every((address) => samePlace(address, first))
     ? { levelId: first.levelId, scope: first.scope }
     : null;
 }
 
-function placeKey(address: ValueAddress): string {
-  return addressKey({ ...address, quantity: 'total', facet: 'value' });
+type Place = Pick<ValueAddress, 'levelId' | 'scope'>;
+
+/** Whether two values are about the same level in the same people. */
+export function samePlace(one: Place, other: Place): boolean {
+  return (
+    one.levelId === other.levelId &&
+    one.scope.kind === other.scope.kind &&
+    stratumOf(one.scope) === stratumOf(other.scope)
+  );
+}
+
+function stratumOf(scope: ResultScope): string | null {
+  return scope.kind === 'stratum' ? scope.stratumId : null;
 }
 
 function scopeWords(scope: ResultScope, { result }: PinnedAnalysis): string {
@@ -132,29 +136,21 @@ function lowered(label: string): string {
   return /^\p{Lu}[\p{Ll}\s]*$/u.test(label) ? label.toLowerCase() : label;
 }
 
-type CaptionedElement = TableElement | FigureElement;
-
-function hasCaption(element: LayoutElement): element is CaptionedElement {
-  return element.kind === 'table' || element.kind === 'figure';
-}
-
-/** The table or figure whose numbers a block repeats, in the same figures. */
+/**
+ * The table or figure whose numbers a block repeats, in the same figures: "Table 2". `places` says
+ * which captioned block prints a value first.
+ */
 export function inStepWith(
-  printed: PrintedBlock,
-  others: Iterable<readonly [string, PrintedBlock]>,
-): CaptionedElement | null {
-  const own = new Map(printed.bound.map(({ address, text }) => [addressKey(address), bare(text)]));
-  for (const [, other] of others) {
-    const captioned = other.elements.find(hasCaption);
-    if (captioned === undefined || other === printed) continue;
-    const shared = other.bound.filter(({ address }) => own.has(addressKey(address)));
-    const agree = shared.every(({ address, text }) => own.get(addressKey(address)) === bare(text));
-    if (shared.length > 0 && agree) return captioned;
-  }
-  return null;
-}
-
-/** Figures without the signs that a table's head says once for all of its cells. */
-function bare(text: string): string {
-  return text.replace(/^\+|\s*%$/gu, '');
+  blockId: string,
+  blocks: ReadonlyMap<string, PrintedBlock>,
+  places: ReadonlyMap<string, string>,
+): string | null {
+  const own = blocks.get(blockId);
+  const keys = [...(own?.figures.keys() ?? [])];
+  const otherId = keys.map((key) => places.get(key)).find((id) => id && id !== blockId);
+  const other = blocks.get(otherId ?? '');
+  if (own === undefined || other === undefined || other.caption === null) return null;
+  const shared = keys.filter((key) => other.figures.has(key));
+  const agree = shared.every((key) => other.figures.get(key) === own.figures.get(key));
+  return agree ? `${other.caption.label} ${other.caption.number}` : null;
 }

@@ -119,7 +119,9 @@ export class MarginLayout {
     for (const [index, { note, rowTop }] of inOrder.entries()) {
       const place = places[index];
       if (place === undefined) continue;
-      note.element.style.top = `${place.top - rowTop}px`;
+      const top = `${place.top - rowTop}px`;
+      if (note.element.style.top === top) continue;
+      note.element.style.top = top;
       note.element.style.setProperty('--rise', `${Math.max(0, place.rise)}px`);
     }
   }

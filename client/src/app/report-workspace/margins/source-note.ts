@@ -3,6 +3,7 @@ import { RouterLink } from '@angular/router';
 import { CurrentStudy } from '../../session/current-study';
 import { BlockActions } from '../block-actions/block-actions';
 import { ProofDesk } from '../proof/proof-desk';
+import type { PrintedBlock } from '../proof/printed-block';
 import { ReportProof } from '../proof/report-proof';
 import { ReportState } from '../report-store/report-state';
 import { blockSources, countWords, inStepWith } from './block-sources';
@@ -25,10 +26,13 @@ export class SourceNote {
   private readonly unfolded = signal(false);
 
   readonly blockId = input.required<string>();
+  readonly printed = input.required<PrintedBlock | null>();
   readonly selected = input.required<boolean>();
 
-  private readonly printed = computed(() => this.proof.of(this.blockId()));
-  protected readonly sources = computed(() => blockSources(this.printed(), this.state.pins()));
+  protected readonly sources = computed(() => {
+    const printed = this.printed();
+    return printed === null ? null : blockSources(printed, this.state.pins());
+  });
   protected readonly words = computed(() => {
     const sources = this.sources();
     return sources === null ? '' : countWords(sources.count);
@@ -37,10 +41,9 @@ export class SourceNote {
     const count = this.sources()?.count;
     return count !== undefined && count.typed + count.missing > 0;
   });
-  protected readonly step = computed(() => {
-    const other = inStepWith(this.printed(), this.proof.blocks());
-    return other === null ? null : `${other.caption.label} ${other.caption.number}`;
-  });
+  protected readonly step = computed(() =>
+    inStepWith(this.blockId(), this.proof.blocks(), this.proof.captionedPlaces()),
+  );
   protected readonly lit = computed(() => {
     const ids = this.sources()?.analysisIds ?? [];
     const spot = this.desk.spotlight();

@@ -4,8 +4,8 @@ import { shortDate } from '../../ui/dates';
 import { counted } from '../../ui/words';
 import { HouseStyleChoice } from '../report-page/house-style-choice';
 import { ReportState } from '../report-store/report-state';
+import type { PrintedBlock } from './printed-block';
 import { ReportProof } from './report-proof';
-import { runsOf } from '#shared/report';
 
 /** The strip over the page that printers cut off: which proof, of which data, in which style. */
 @Component({
@@ -49,12 +49,12 @@ export class ProofSlug {
     return [...new Set(pins.map(({ cut }) => `Cut ${cut.number}, ${shortDate(cut.dataDate)}`))];
   });
   protected readonly numbers = computed(() => {
-    const bound = this.proof.boundCount();
-    const states = [...this.proof.blocks().values()].flatMap(({ elements }) =>
-      elements.flatMap(runsOf).map((run) => run.origin?.state),
-    );
-    const typed = states.filter((state) => state === 'typed').length;
-    const missing = states.filter((state) => state === 'missing').length;
+    const blocks = [...this.proof.blocks().values()];
+    const sum = (count: (printed: PrintedBlock) => number): number =>
+      blocks.reduce((total, printed) => total + count(printed), 0);
+    const bound = sum((printed) => printed.bound.length);
+    const typed = sum((printed) => printed.typed.length);
+    const missing = sum((printed) => printed.missing);
     const all = counted(bound + typed + missing, 'number', 'numbers');
     return [
       `${all}: ${bound} bound`,

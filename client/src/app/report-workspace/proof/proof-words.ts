@@ -1,13 +1,14 @@
 import { computed, inject, Injectable } from '@angular/core';
 import { addressKey, parseAddress, type ValueAddress } from '#shared/analysis';
 import type { HouseStyle } from '#shared/house-style';
-import type { Caption, LayoutElement } from '#shared/layout';
+import type { LayoutElement } from '#shared/layout';
 import { boundText, formatsOf, type PinnedAnalysis } from '#shared/report';
 import { type BoundValueFormat, textOfBound } from '#shared/report/text';
 import type { Phrasebook } from '#shared/wording';
 import { PHRASEBOOK } from '../../ui/phrasebook';
 import { ReportState } from '../report-store/report-state';
 import type { AtomText, AtomWords } from '../text-editor/atom-words';
+import { captionOf } from './printed-block';
 import { ReportProof } from './report-proof';
 
 /** A table or a figure that words can refer to. */
@@ -99,17 +100,4 @@ function referenceTo(element: LayoutElement): readonly ProofReference[] {
   if (caption === null) return [];
   const title = caption.runs.map((run) => run.text).join('');
   return [{ blockId: element.blockId, name: `${caption.label} ${String(caption.number)}`, title }];
-}
-
-function captionOf(element: LayoutElement): Caption | null {
-  switch (element.kind) {
-    case 'table':
-    case 'figure':
-      return element.caption;
-    case 'heading':
-    case 'paragraph':
-    case 'list':
-    case 'problem':
-      return null;
-  }
 }

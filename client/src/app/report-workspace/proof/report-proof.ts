@@ -1,17 +1,9 @@
 import { computed, inject, Injectable } from '@angular/core';
 import type { LayoutElement } from '#shared/layout';
-import { createComposer, type PrintedNumber, valueLedger } from '#shared/report';
+import { type ComposeRequest, createComposer } from '#shared/report';
 import { PHRASEBOOK } from '../../ui/phrasebook';
 import { ReportState } from '../report-store/report-state';
-
-/** What a block prints, and its numbers. */
-export interface PrintedBlock {
-  readonly elements: readonly LayoutElement[];
-  /** Numbers with a source, in the order of print. */
-  readonly bound: readonly PrintedNumber[];
-}
-
-const NOTHING: PrintedBlock = { elements: [], bound: [] };
+import { NOTHING_PRINTED, type PrintedBlock, printedBlock } from './printed-block';
 
 /**
  * The report as it prints, block by block. A block that prints the same as before is the same
@@ -24,18 +16,19 @@ export class ReportProof {
   private readonly composer = createComposer();
   private before: ReadonlyMap<string, PrintedBlock> = new Map();
 
-  readonly composed = computed(() => {
+  /** What the composer is asked for; null until the report is open. */
+  readonly request = computed((): ComposeRequest | null => {
     const report = this.state.report();
     const houseStyle = this.state.houseStyle();
     if (report === null || houseStyle === null) return null;
     const pins = this.state.pins();
     const shown = Object.fromEntries([...pins].map(([id, pin]) => [id, pin.resultId]));
-    return this.composer.compose({
-      report: { ...report, pins: shown },
-      pins: pins.values(),
-      houseStyle,
-      phrasebook: this.phrasebook,
-    });
+    const { phrasebook } = this;
+    return { report: { ...report, pins: shown }, pins: [...pins.values()], houseStyle, phrasebook };
+  });
+  readonly composed = computed(() => {
+    const request = this.request();
+    return request === null ? null : this.composer.compose(request);
   });
 
   readonly blocks = computed(() => {
@@ -48,13 +41,25 @@ export class ReportProof {
     return this.remembering(blocks);
   });
 
-  /** How many numbers the report prints that have a source. */
-  readonly boundCount = computed(() =>
-    [...this.blocks().values()].reduce((sum, { bound }) => sum + bound.length, 0),
-  );
+  /** Which block prints a value in its table or figure, by the key of the value's address. */
+  readonly captionedPlaces = computed((): ReadonlyMap<string, string> => {
+    const places = new Map<string, string>();
+    for (const [blockId, printed] of this.blocks()) {
+      if (printed.caption === null) continue;
+      for (const key of printed.figures.keys()) {
+        if (!places.has(key)) places.set(key, blockId);
+      }
+    }
+    return places;
+  });
 
   of(blockId: string): PrintedBlock {
-    return this.blocks().get(blockId) ?? NOTHING;
+    return this.blocks().get(blockId) ?? NOTHING_PRINTED;
+  }
+
+  /** Composes a part of the report beforehand, so that it is at hand when it is asked for. */
+  warm(request: ComposeRequest): void {
+    this.composer.compose(request);
   }
 
   private remembering(
@@ -63,7 +68,8 @@ export class ReportProof {
     const now = new Map<string, PrintedBlock>();
     for (const [blockId, elements] of blocks) {
       const known = this.before.get(blockId);
-      now.set(blockId, known && sameElements(known.elements, elements) ? known : printed(elements));
+      const same = known !== undefined && sameElements(known.elements, elements);
+      now.set(blockId, same ? known : printedBlock(elements));
     }
     this.before = now;
     return now;
@@ -72,8 +78,4 @@ export class ReportProof {
 
 function sameElements(one: readonly LayoutElement[], other: readonly LayoutElement[]): boolean {
   return one.length === other.length && one.every((element, index) => element === other[index]);
-}
-
-function printed(elements: readonly LayoutElement[]): PrintedBlock {
-  return { elements, bound: valueLedger({ title: '', elements, abbreviations: [] }) };
 }

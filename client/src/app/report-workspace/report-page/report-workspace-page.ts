@@ -20,6 +20,7 @@ import { StageStamp } from '../../ui/status/stage-stamp';
 import { TextEditSession } from '../block-editors/text-edit-session';
 import { ProofDesk } from '../proof/proof-desk';
 import { ProofSheet } from '../proof/proof-sheet';
+import { warmFramings } from '../proof/warm-framings';
 import { ReportProof } from '../proof/report-proof';
 import { DraftRecovery } from '../report-store/draft-recovery';
 import { ReportState } from '../report-store/report-state';
@@ -78,6 +79,7 @@ export class ReportWorkspacePage implements OnInit {
 
   constructor() {
     workspaceKeys();
+    warmFramings();
     leavingWarning();
   }
 

@@ -8,6 +8,7 @@ import { CheckWalk } from '../checks/check-walk';
 import { ReportChecks } from '../checks/report-checks';
 import { MarginLayout } from '../margins/margin-layout';
 import { SourceReader } from '../margins/source-reader';
+import { DrawQueue } from '../proof/draw-queue';
 import { ProofDesk } from '../proof/proof-desk';
 import { ProofWords } from '../proof/proof-words';
 import { ReportProof } from '../proof/report-proof';
@@ -36,6 +37,7 @@ export const WORKSPACE_PROVIDERS: readonly Provider[] = [
   SaveState,
   ReportProof,
   ProofWords,
+  DrawQueue,
   ProofDesk,
   AnalysisPicker,
   BlockActions,

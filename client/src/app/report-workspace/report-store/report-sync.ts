@@ -93,10 +93,16 @@ export class ReportSync {
     this.recover(this.unsent.takeOver(this.state.place()?.reportId ?? ''));
   }
 
-  /** Sends what is waiting. Until then this browser keeps it, from this very moment on. */
+  /** Sends what is waiting. */
   send(): void {
-    this.keepUnsent();
     this.sending.next();
+  }
+
+  /** Keeps in this browser what is waiting, at once: the page may go away. */
+  keepUnsent(): void {
+    const place = this.state.place();
+    const steps = [...this.recovering(), ...this.state.pending()];
+    if (place !== null) this.unsent.keep(place.reportId, steps);
   }
 
   /** Looks for steps of others. */
@@ -106,12 +112,6 @@ export class ReportSync {
 
   dismiss(refusal: RefusedStep): void {
     this.refused.update((list) => list.filter((each) => each !== refusal));
-  }
-
-  private keepUnsent(): void {
-    const place = this.state.place();
-    const steps = [...this.recovering(), ...this.state.pending()];
-    if (place !== null) this.unsent.keep(place.reportId, steps);
   }
 
   private run(occasion: Observable<unknown>, work: () => Observable<unknown>): void {
