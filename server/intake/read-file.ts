@@ -97,20 +97,11 @@ async function giveDictionaries(
 ): Promise<void> {
   for (const [position, { dictionary }] of table.columns.entries()) {
     let chunk = 0;
-    for (const bytes of packDictionary(valuesOf(dictionary, encoding))) {
+    for (const bytes of packDictionary(asUtf8(dictionary, encoding))) {
       sink({ position, part: 'dictionary', chunk, bytes });
       chunk += 1;
       await pause();
     }
-  }
-}
-
-function* valuesOf(
-  dictionary: ReadTable['table']['columns'][number]['dictionary'],
-  encoding: ReadTable['encoding'],
-): Generator<Uint8Array> {
-  for (let code = 0; code < dictionary.size; code += 1) {
-    yield asUtf8(dictionary.valueAt(code), encoding);
   }
 }
 

@@ -35,11 +35,6 @@ export class ByteDictionary {
     return code;
   }
 
-  /** Counts one more row for a value that is known by its number. */
-  addAgain(code: number): void {
-    this.counts[code]! += 1;
-  }
-
   /** Bytes that the values take up together. */
   get byteLength(): number {
     return this.size === 0 ? 0 : this.ends[this.size - 1]!;
@@ -47,33 +42,49 @@ export class ByteDictionary {
 
   /** The bytes of a value; not to be kept, since they move when the dictionary grows. */
   valueAt(code: number): Uint8Array {
-    return this.bytes.subarray(this.startOf(code), this.ends[code]);
+    return this.valuesFrom(code, code + 1);
+  }
+
+  /** The bytes of the values from one code up to, without, another, one after the other. */
+  valuesFrom(from: number, to: number): Uint8Array {
+    return this.bytes.subarray(this.startOf(from), this.startOf(to));
+  }
+
+  /** Length in bytes of a value. */
+  lengthAt(code: number): number {
+    return this.startOf(code + 1) - this.startOf(code);
+  }
+
+  /** Where a value begins among all bytes, and where the one before it ends. */
+  startOf(code: number): number {
+    return code === 0 ? 0 : this.ends[code - 1]!;
+  }
+
+  /** The bytes of all values, with room behind them; to be looked at, not kept. */
+  get allBytes(): Uint8Array {
+    return this.bytes;
   }
 
   private find(source: Uint8Array, from: number, to: number, hash: number): number {
-    const mask = this.slots.length - 1;
+    const { slots, hashes } = this;
+    const mask = slots.length - 1;
     let slot = spread(hash) & mask;
     for (;;) {
-      const code = this.slots[slot]!;
+      const code = slots[slot]!;
       if (code < 0) return this.insert(source, from, to, hash, slot);
-      if (this.hashes[code] === hash && this.equals(code, source, from, to)) return code;
+      if (hashes[code] === hash && this.equals(code, source, from, to)) return code;
       slot = (slot + 1) & mask;
     }
   }
 
   private equals(code: number, source: Uint8Array, from: number, to: number): boolean {
-    const start = this.startOf(code);
-    const length = to - from;
-    if (this.ends[code]! - start !== length) return false;
-    const { bytes } = this;
-    for (let at = 0; at < length; at += 1) {
-      if (bytes[start + at] !== source[from + at]) return false;
+    const { bytes, ends } = this;
+    let at = code === 0 ? 0 : ends[code - 1]!;
+    if (ends[code]! - at !== to - from) return false;
+    for (let other = from; other < to; other += 1, at += 1) {
+      if (bytes[at] !== source[other]) return false;
     }
     return true;
-  }
-
-  private startOf(code: number): number {
-    return code === 0 ? 0 : this.ends[code - 1]!;
   }
 
   private insert(source: Uint8Array, from: number, to: number, hash: number, slot: number): number {
@@ -82,7 +93,7 @@ export class ByteDictionary {
     const end = start + to - from;
     if (code === this.ends.length) this.growValues();
     if (end > this.bytes.length) this.growBytes(end);
-    this.bytes.set(source.subarray(from, to), start);
+    copyBytes(source, from, to, this.bytes, start);
     this.ends[code] = end;
     this.hashes[code] = hash;
     this.counts[code] = 0;
@@ -113,6 +124,23 @@ export class ByteDictionary {
     }
     this.slots = slots;
   }
+}
+
+const SHORT = 64;
+
+/** Copying a few bytes one by one is quicker than making a view of them. */
+function copyBytes(
+  source: Uint8Array,
+  from: number,
+  to: number,
+  target: Uint8Array,
+  start: number,
+): void {
+  if (to - from > SHORT) {
+    target.set(source.subarray(from, to), start);
+    return;
+  }
+  for (let at = from, put = start; at < to; at += 1, put += 1) target[put] = source[at]!;
 }
 
 /** The low bits of the hash change little between short values; the high ones join in. */

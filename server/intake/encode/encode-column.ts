@@ -23,8 +23,7 @@ export function encodeColumn(position: number, cells: readonly string[]): Encode
     codes.add(dictionary.add(bytes, 0, bytes.length, hashBytes(bytes, 0, bytes.length)));
   }
   codes.flush();
-  const values = Array.from({ length: dictionary.size }, (_, code) => dictionary.valueAt(code));
-  const pieces = [...packDictionary(values)].map((bytes, chunk): Chunk => ({
+  const pieces = [...packDictionary(dictionary)].map((bytes, chunk): Chunk => ({
     position,
     part: 'dictionary',
     chunk,

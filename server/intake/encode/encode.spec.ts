@@ -4,7 +4,7 @@ import { LIMITS } from '../limits';
 import { ByteDictionary, hashBytes } from './byte-dictionary';
 import type { Chunk } from './chunk';
 import { CodeChunks } from './code-chunks';
-import { packDictionary, unpackDictionary } from './dictionary-chunks';
+import { packDictionary, unpackDictionary, type PackableValues } from './dictionary-chunks';
 import { unpackCodes } from './stored-column';
 
 describe('ByteDictionary', () => {
@@ -80,7 +80,7 @@ describe('packDictionary', () => {
           { maxLength: 30 },
         ),
         (values) => {
-          const pieces = [...packDictionary(values.map((value) => Buffer.from(value)))];
+          const pieces = [...packDictionary(packable(values))];
           expect(pieces.every(({ length }) => length <= LIMITS.chunkBytes)).toBe(true);
           expect(pieces.flatMap(unpackDictionary)).toEqual(values);
         },
@@ -88,6 +88,15 @@ describe('packDictionary', () => {
     );
   });
 });
+
+function packable(values: readonly string[]): PackableValues {
+  const bytes = values.map((value) => Buffer.from(value));
+  return {
+    size: bytes.length,
+    lengthAt: (index) => bytes[index]!.length,
+    valuesFrom: (from, to) => Buffer.concat(bytes.slice(from, to)),
+  };
+}
 
 function add(dictionary: ByteDictionary, value: string): number {
   const bytes = Buffer.from(value);

@@ -2,6 +2,8 @@ import { isUtf8 } from 'node:buffer';
 import iconv from 'iconv-lite';
 import { failure, success, type Result } from '#shared/core';
 import type { IntakeIssue } from '../intake-issue';
+import type { ByteDictionary } from './byte-dictionary';
+import type { PackableValues } from './dictionary-chunks';
 
 /** How the characters of a file are written. */
 export type TextEncoding = 'utf-8' | 'windows-1252';
@@ -51,9 +53,17 @@ export function decodeText(bytes: Uint8Array, encoding: TextEncoding): string {
   return encoding === 'utf-8' ? buffer.toString('utf8') : iconv.decode(buffer, 'windows-1252');
 }
 
-/** The same text as UTF-8 bytes. */
-export function asUtf8(bytes: Uint8Array, encoding: TextEncoding): Uint8Array {
-  return encoding === 'utf-8' || isAscii(bytes) ? bytes : Buffer.from(decodeText(bytes, encoding));
+/** A dictionary of the same values whose bytes are UTF-8. */
+export function asUtf8(dictionary: ByteDictionary, encoding: TextEncoding): PackableValues {
+  if (encoding === 'utf-8' || isAscii(dictionary.valuesFrom(0, dictionary.size))) return dictionary;
+  const values = Array.from({ length: dictionary.size }, (_, code) =>
+    Buffer.from(decodeText(dictionary.valueAt(code), encoding)),
+  );
+  return {
+    size: values.length,
+    lengthAt: (index) => values[index]?.length ?? 0,
+    valuesFrom: (from, to) => Buffer.concat(values.slice(from, to)),
+  };
 }
 
 function isAscii(bytes: Uint8Array): boolean {

@@ -107,8 +107,10 @@ export class TableEncoder {
     for (let cell = 0; cell < count; cell += 1) {
       const { dictionary, codes } = columns[cell]!;
       const known = dictionary.size;
-      const code = dictionary.add(bytes, starts[cell]!, ends[cell]!, hashes[cell]!);
-      if (code === known) {
+      const start = starts[cell]!;
+      const end = ends[cell]!;
+      const code = dictionary.add(bytes, start, end, hashes[cell]!);
+      if (code === known && !isShortAscii(bytes, start, end)) {
         const issue = this.lookAtNewValue(columns[cell]!, code, line);
         if (issue !== null) return issue;
       }
@@ -143,6 +145,13 @@ export class TableEncoder {
   private nameOf(column: ColumnEncoder | undefined): string {
     return column === undefined ? '' : decodeText(column.name, 'utf-8');
   }
+}
+
+/** Values that are surely neither too long nor of any doubtful encoding; nearly all are. */
+function isShortAscii(bytes: Uint8Array, from: number, to: number): boolean {
+  let all = 0;
+  for (let at = from; at < to; at += 1) all |= bytes[at]!;
+  return all < 0x80 && to - from <= LIMITS.cellBytes;
 }
 
 function cellsInWords(cells: number): string {

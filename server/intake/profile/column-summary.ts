@@ -26,25 +26,27 @@ export function summarizeColumn(dictionary: ByteDictionary, encoding: TextEncodi
   const numbers = new NumberGatherer();
   let blank = 0;
   let distinct = 0;
+  const bytes = dictionary.allBytes;
   for (let code = 0; code < dictionary.size; code += 1) {
-    const value = dictionary.valueAt(code);
     const rows = dictionary.counts[code]!;
-    if (isBlank(value, encoding)) {
+    const from = dictionary.startOf(code);
+    const to = dictionary.startOf(code + 1);
+    if (isBlank(bytes, from, to, encoding)) {
       blank += rows;
       continue;
     }
     distinct += 1;
-    const number = readNumber(value);
+    const number = readNumber(bytes, from, to);
     if (number !== null) numbers.add(number, rows);
   }
   return { distinct, blank, numbers, ...listedValues(dictionary, encoding) };
 }
 
-function isBlank(value: Uint8Array, encoding: TextEncoding): boolean {
-  if (value.length === 0) return true;
-  const first = value[0]!;
+function isBlank(bytes: Uint8Array, from: number, to: number, encoding: TextEncoding): boolean {
+  if (from === to) return true;
+  const first = bytes[from]!;
   if (first > 0x20 && first < 0x80) return false;
-  return decodeText(value, encoding).trim() === '';
+  return decodeText(bytes.subarray(from, to), encoding).trim() === '';
 }
 
 /** The commonest values, in order of first appearance. */
