@@ -16,12 +16,12 @@ export function dataFile(name: string): string {
   return new URL(`../data/${name}`, import.meta.url).pathname;
 }
 
-/** Shares as they print in percent or percentage points: scaled by 100, one decimal, no sign. */
-export function inPoints(...shares: readonly number[]): readonly string[] {
-  return shares.map((share) => Math.abs(100 * share).toFixed(1));
+/** Shares as they print in percent or percentage points: scaled by 100, without their signs. */
+export function inPoints(shares: readonly number[], decimals = 1): readonly string[] {
+  return shares.map((share) => Math.abs(100 * share).toFixed(decimals));
 }
 
-/** Ratios as they print. */
+/** Ratios as they print: two decimals. */
 export function asRatios(...ratios: readonly number[]): readonly string[] {
-  return ratios.map((ratio) => ratio.toFixed(ratio < 10 ? 2 : 1));
+  return ratios.map((ratio) => ratio.toFixed(2));
 }

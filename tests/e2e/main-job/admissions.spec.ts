@@ -24,7 +24,7 @@ const pooled = {
   ratioLimits: referenceOf(POOLED, 'pooledRiskRatio.limits'),
 };
 
-const OF_WOMEN = `${inPoints(557 / 1835)[0]!}%`;
+const OF_WOMEN = `${inPoints([557 / 1835])[0]!}%`;
 
 const ADMISSIONS: Omit<Journey, 'file' | 'layout'> = {
   study: { title: 'Graduate admissions', design: 'Cross-sectional', people: 'applicants' },
@@ -54,8 +54,8 @@ const ADMISSIONS: Omit<Journey, 'file' | 'layout'> = {
 };
 
 test('the numbers that the guard states are the reference values', () => {
-  expect(inPoints(...crude.difference)).toEqual(['14.2']);
-  expect(inPoints(...pooled.difference)).toEqual(['1.8']);
+  expect(inPoints(crude.difference)).toEqual(['14.2']);
+  expect(inPoints(pooled.difference)).toEqual(['1.8']);
   expect([Math.sign(crude.difference[0]!), Math.sign(pooled.difference[0]!)]).toEqual([1, -1]);
 });
 
@@ -78,12 +78,12 @@ for (const [file, layout] of [
     const [sentence = '', prose = '', crudeSentence = ''] = words.slice(2);
     expectSaid(
       sentence,
-      inPoints(...pooled.difference, ...pooled.limits),
+      inPoints([...pooled.difference, ...pooled.limits]),
       asRatios(...pooled.ratio, ...pooled.ratioLimits),
     );
     expectSaid(
       crudeSentence,
-      inPoints(...crude.difference, ...crude.limits),
+      inPoints([...crude.difference, ...crude.limits]),
       asRatios(...crude.ratio, ...crude.ratioLimits),
     );
     expect(prose).toBe(`Of the women, ${OF_WOMEN} is bound.`);

@@ -76,6 +76,11 @@ export class BenchPage {
     return guards.getByRole('heading', { name: title }).locator('..');
   }
 
+  /** A note below the pooled estimates. */
+  pooledNote(text: string | RegExp): Locator {
+    return this.page.getByRole('main').getByRole('paragraph').filter({ hasText: text });
+  }
+
   /** The cells of a table of the bench, row by row. */
   async rowsOf(table: keyof typeof TABLES): Promise<readonly string[][]> {
     const rows = this.page.getByRole('table', { name: TABLES[table] }).getByRole('row');

@@ -62,13 +62,13 @@ export class CodeBookEditor {
     await this.page.getByRole('button', { name: `Merge ${labels.length} levels` }).click();
   }
 
-  /** Names the levels in their order, for tables and sentences alike. */
+  /** Names the levels in their order; sentences begin them with a small letter. */
   async nameLevels(...labels: readonly string[]): Promise<void> {
     const levels = this.page.getByRole('main').getByRole('list', { name: /^Levels of / });
     for (const [place, label] of labels.entries()) {
       const level = levels.getByRole('listitem').nth(place);
       await level.getByLabel(/^Label for /).fill(label);
-      await level.getByLabel(/ in sentences$/).fill(label);
+      await level.getByLabel(/ in sentences$/).fill(label.charAt(0).toLowerCase() + label.slice(1));
     }
   }
 
