@@ -80,7 +80,8 @@ function tellSurroundings(
     Math.max(...readings.map(of)).toFixed(0);
   console.log(
     `  ${what} of ${(bytes / 1e6).toFixed(0)} MB: ` +
-      `memory ${most((one) => one.memoryAboveIdleInMegabytes)} MB above idle (at most ${String(megabytes)}), ` +
+      `memory ${most((one) => one.memoryAboveIdleInMegabytes)} MB above idle ` +
+      `(at most ${String(megabytes)}), ` +
       `slowest other answer ${most((one) => one.slowestAnswer)} ms (at most 50), ` +
       `longest silence ${most((one) => one.longestSilence)} ms (at most 1000)`,
   );
@@ -121,9 +122,9 @@ function watchServer() {
   let id = '';
   let shown = '';
   let changedAt = performance.now();
-  let going = true;
+  const watch = { going: true };
   const watching = (async () => {
-    while (going) {
+    while (watch.going) {
       const asked = performance.now();
       await dependencies.database.stores.studies.findById(study.id);
       const now = performance.now();
@@ -142,7 +143,7 @@ function watchServer() {
       changedAt = performance.now();
     },
     end: async () => {
-      going = false;
+      watch.going = false;
       await watching;
       return seen;
     },
@@ -169,7 +170,7 @@ function spread(times: readonly number[]): Timing {
 async function parseAlone(path: string): Promise<number> {
   let rows = 0;
   const reading = createReadStream(path, { highWaterMark: 1 << 20 }).pipe(parse());
-  for await (const _ of reading) rows += 1;
+  for await (const row of reading) rows += Array.isArray(row) ? 1 : 0;
   return rows;
 }
 
