@@ -26,7 +26,7 @@ async function scanFile(
   table: TableEncoder,
   context: ReadingContext,
 ): Promise<IntakeIssue | null> {
-  const scanner = new RowScanner(form.delimiterByte, (row) => table.add(row));
+  const scanner = new RowScanner(form.delimiterByte, table);
   for await (const chunk of file.chunks()) {
     const issue = scanner.push(form.convert(chunk)) ?? table.checkSize();
     if (issue !== null) return issue;

@@ -19,8 +19,13 @@ export interface ScannedRow {
   readonly line: number;
 }
 
-/** Takes rows as they are found; an issue ends the reading. The row is valid during the call. */
-export type RowSink = (row: ScannedRow) => IntakeIssue | null;
+/** Takes rows as they are found; an issue ends the reading. */
+export interface RowSink {
+  /** Takes a row. Its places hold during the call, its bytes until `settle`. */
+  readonly add: (row: ScannedRow) => IntakeIssue | null;
+  /** Makes an end of what was taken, since the bytes will be others. */
+  readonly settle: () => IntakeIssue | null;
+}
 
 /**
  * Splits delimited bytes into rows of cells (RFC 4180, with any one-byte delimiter and any kind of
@@ -74,15 +79,16 @@ export class RowScanner {
 
   private scanRows(last: boolean): IntakeIssue | null {
     let from = 0;
-    while (from < this.length) {
+    let issue: IntakeIssue | null = null;
+    while (from < this.length && issue === null) {
       const next = this.scanRow(from, last);
-      if (this.issue !== null) return this.issue;
+      issue = this.issue;
       if (next < 0) break;
-      const issue = this.giveRow();
-      if (issue !== null) return issue;
+      issue = this.giveRow();
       from = next;
     }
-    return this.keepRest(from);
+    // What the rows before hold comes first, as it does in the file.
+    return this.sink.settle() ?? issue ?? this.keepRest(from);
   }
 
   private keepRest(from: number): IntakeIssue | null {
@@ -180,7 +186,7 @@ export class RowScanner {
       if (this.doubled[cell] === 1) this.makeSingle(cell);
     }
     this.line += 1 + this.linesWithin;
-    return this.sink({ bytes, starts, ends, hashes, count, line });
+    return this.sink.add({ bytes, starts, ends, hashes, count, line });
   }
 
   /** Turns doubled quotes into single ones in place; the row is not scanned again. */

@@ -12,6 +12,18 @@ export function hashBytes(bytes: Uint8Array, from: number, to: number): number {
   return hash;
 }
 
+/** Rows of a batch. */
+export const BATCH_ROWS = 256;
+
+/** Cells of some rows, column by column: `BATCH_ROWS` places for each column. */
+export interface CellBatch {
+  readonly bytes: Uint8Array;
+  readonly starts: Int32Array;
+  readonly ends: Int32Array;
+  readonly hashes: Int32Array;
+  readonly rows: number;
+}
+
 /**
  * The distinct values of a column, numbered in order of first appearance.
  *
@@ -33,6 +45,28 @@ export class ByteDictionary {
     const code = this.find(source, from, to, hash);
     this.counts[code]! += 1;
     return code;
+  }
+
+  /** The numbers of the values of a column's cells in a batch, row by row, into `codes`. */
+  addAll(batch: CellBatch, column: number, codes: Uint32Array): void {
+    const { bytes, starts, ends, hashes, rows } = batch;
+    let { slots, counts, hashes: known } = this;
+    const first = column * BATCH_ROWS;
+    for (let row = 0; row < rows; row += 1) {
+      const cell = first + row;
+      const hash = hashes[cell]!;
+      let code = slots[spread(hash) & (slots.length - 1)]!;
+      if (
+        code < 0 ||
+        known[code] !== hash ||
+        !this.equals(code, bytes, starts[cell]!, ends[cell]!)
+      ) {
+        code = this.find(bytes, starts[cell]!, ends[cell]!, hash);
+        ({ slots, counts, hashes: known } = this);
+      }
+      counts[code]! += 1;
+      codes[row] = code;
+    }
   }
 
   /** Bytes that the values take up together. */

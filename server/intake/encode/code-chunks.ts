@@ -15,7 +15,6 @@ export class CodeChunks {
   private codes = new Uint32Array(FIRST_CAPACITY);
   private rows = 0;
   private chunk = 0;
-  private largest = 0;
 
   constructor(
     private readonly position: number,
@@ -23,32 +22,42 @@ export class CodeChunks {
     private readonly sink: ChunkSink,
   ) {}
 
-  /** Takes the code of the next row. */
-  add(code: number): void {
-    if (this.rows === this.codes.length) this.grow();
-    this.codes[this.rows] = code;
-    if (code > this.largest) this.largest = code;
-    this.rows += 1;
-    if (this.rows === this.chunkRows) this.flush();
+  /** Takes the codes of the next rows: the first `rows` of `codes`. */
+  add(codes: Uint32Array, rows: number): void {
+    let taken = 0;
+    while (taken < rows) {
+      const some = Math.min(rows - taken, this.chunkRows - this.rows);
+      this.makeRoom(this.rows + some);
+      this.codes.set(codes.subarray(taken, taken + some), this.rows);
+      this.rows += some;
+      taken += some;
+      if (this.rows === this.chunkRows) this.flush();
+    }
   }
 
   /** Gives away what is gathered; at the end of the column. */
   flush(): void {
     if (this.rows === 0) return;
-    const width = widthOf(this.largest);
+    const width = widthOf(largestOf(this.codes, this.rows));
     const bytes = packed(this.codes, this.rows, width);
     this.sink({ position: this.position, part: 'codes', chunk: this.chunk, bytes });
     this.width = Math.max(this.width, width);
     this.chunk += 1;
     this.rows = 0;
-    this.largest = 0;
   }
 
-  private grow(): void {
-    const larger = new Uint32Array(Math.min(this.chunkRows, this.codes.length * 4));
+  private makeRoom(rows: number): void {
+    if (rows <= this.codes.length) return;
+    const larger = new Uint32Array(Math.min(this.chunkRows, Math.max(rows, this.codes.length * 4)));
     larger.set(this.codes);
     this.codes = larger;
   }
+}
+
+function largestOf(codes: Uint32Array, rows: number): number {
+  let largest = 0;
+  for (let row = 0; row < rows; row += 1) if (codes[row]! > largest) largest = codes[row]!;
+  return largest;
 }
 
 /** Bytes that codes up to `largest` need. */

@@ -18,10 +18,11 @@ export function encodeColumn(position: number, cells: readonly string[]): Encode
   const chunks: Chunk[] = [];
   const codes = new CodeChunks(position, ROWS_OF_A_TYPED_CHUNK, (chunk) => chunks.push(chunk));
   const dictionary = new ByteDictionary();
-  for (const cell of cells) {
+  const cellCodes = Uint32Array.from(cells, (cell) => {
     const bytes = Buffer.from(cell);
-    codes.add(dictionary.add(bytes, 0, bytes.length, hashBytes(bytes, 0, bytes.length)));
-  }
+    return dictionary.add(bytes, 0, bytes.length, hashBytes(bytes, 0, bytes.length));
+  });
+  codes.add(cellCodes, cellCodes.length);
   codes.flush();
   const pieces = [...packDictionary(dictionary)].map((bytes, chunk): Chunk => ({
     position,

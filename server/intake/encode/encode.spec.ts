@@ -41,9 +41,10 @@ describe('CodeChunks', () => {
       const codes = Array.from({ length: rows }, (_, row) => (row * 7919) % (largest + 1));
       const chunks: Chunk[] = [];
       const gathered = new CodeChunks(3, 4096, (chunk) => chunks.push(chunk));
-      codes.forEach((code) => {
-        gathered.add(code);
-      });
+      for (let from = 0; from < rows; from += 999) {
+        const some = Uint32Array.from(codes.slice(from, from + 999));
+        gathered.add(some, some.length);
+      }
       gathered.flush();
       expect(chunks.map(({ position, part, chunk }) => [position, part, chunk])).toEqual(
         chunks.map((_, chunk) => [3, 'codes', chunk]),
@@ -61,9 +62,7 @@ describe('CodeChunks', () => {
   it('keeps a chunk narrow whose codes are small', () => {
     const chunks: Chunk[] = [];
     const gathered = new CodeChunks(0, 2, (chunk) => chunks.push(chunk));
-    [300, 1, 2, 3].forEach((code) => {
-      gathered.add(code);
-    });
+    gathered.add(Uint32Array.of(300, 1, 2, 3), 4);
     expect(chunks.map(({ bytes }) => bytes.length)).toEqual([4, 2]);
   });
 });

@@ -1,12 +1,13 @@
 /* eslint-disable @typescript-eslint/no-non-null-assertion --
    Every index is below a length; checking each again would slow down every cell of a file. */
-import type { ScannedRow } from '../delimited/row-scanner';
+import type { RowSink, ScannedRow } from '../delimited/row-scanner';
 import type { IntakeIssue } from '../intake-issue';
 import { LIMITS } from '../limits';
-import { ByteDictionary } from './byte-dictionary';
+import { BATCH_ROWS, ByteDictionary } from './byte-dictionary';
 import type { ChunkSink } from './chunk';
 import { CodeChunks } from './code-chunks';
 import { decodeText, type EncodingWatch } from './encoding-watch';
+import { RowBatch } from './row-batch';
 
 /** Rows of a chunk, unless there are so many columns that their chunks would fill the memory. */
 const CHUNK_ROWS = 65_536;
@@ -32,12 +33,14 @@ export interface SkippedRows {
  * Blank rows and rows that repeat the names are left out and remembered. Fails on a row with more
  * or fewer cells than there are names, and on cells and columns beyond the limits.
  */
-export class TableEncoder {
+export class TableEncoder implements RowSink {
   columns: readonly ColumnEncoder[] = [];
   chunkRows = CHUNK_ROWS;
   rows = 0;
   private blank = 0;
   private readonly repeatedHeaderLines: number[] = [];
+  private batch = new RowBatch(0);
+  private readonly codes = new Uint32Array(BATCH_ROWS);
 
   constructor(
     private readonly encoding: EncodingWatch,
@@ -60,7 +63,26 @@ export class TableEncoder {
       this.repeatedHeaderLines.push(row.line);
       return null;
     }
-    return this.encode(row);
+    this.batch.add(row);
+    this.rows += 1;
+    return this.batch.full ? this.settle() : null;
+  }
+
+  /** Encodes the rows that were taken since the last time. */
+  settle(): IntakeIssue | null {
+    const { batch, codes } = this;
+    const doubtful: DoubtfulValue[] = [];
+    this.columns.forEach((column, position) => {
+      const known = column.dictionary.size;
+      column.dictionary.addAll(batch, position, codes);
+      column.codes.add(codes, batch.rows);
+      for (let code = known; code < column.dictionary.size; code += 1) {
+        if (isShortAscii(column.dictionary, code)) continue;
+        doubtful.push({ column, code, line: batch.lines[codes.indexOf(code)]! });
+      }
+    });
+    batch.rows = 0;
+    return this.lookAt(doubtful);
   }
 
   /** Gives the last codes away; at the end of the table. */
@@ -83,6 +105,7 @@ export class TableEncoder {
       dictionary: new ByteDictionary(),
       codes: new CodeChunks(position, this.chunkRows, this.sink),
     }));
+    this.batch = new RowBatch(row.count);
     return this.checkNames(row.line);
   }
 
@@ -102,30 +125,18 @@ export class TableEncoder {
     return { code: 'raggedRow', facts };
   }
 
-  private encode({ bytes, starts, ends, hashes, count, line }: ScannedRow): IntakeIssue | null {
-    const { columns } = this;
-    for (let cell = 0; cell < count; cell += 1) {
-      const { dictionary, codes } = columns[cell]!;
-      const known = dictionary.size;
-      const start = starts[cell]!;
-      const end = ends[cell]!;
-      const code = dictionary.add(bytes, start, end, hashes[cell]!);
-      if (code === known && !isShortAscii(bytes, start, end)) {
-        const issue = this.lookAtNewValue(columns[cell]!, code, line);
-        if (issue !== null) return issue;
+  /** Looks at new values in the order of the file, so that the first fault is told. */
+  private lookAt(values: readonly DoubtfulValue[]): IntakeIssue | null {
+    const inOrder = values.toSorted((one, other) => one.line - other.line);
+    for (const { column, code, line } of inOrder) {
+      const value = column.dictionary.valueAt(code);
+      if (value.length > LIMITS.cellBytes) {
+        return { code: 'cellTooLong', facts: { line, column: this.nameOf(column) } };
       }
-      codes.add(code);
+      const issue = this.encoding.look(value, line);
+      if (issue !== null) return issue;
     }
-    this.rows += 1;
     return null;
-  }
-
-  private lookAtNewValue(column: ColumnEncoder, code: number, line: number): IntakeIssue | null {
-    const value = column.dictionary.valueAt(code);
-    if (value.length > LIMITS.cellBytes) {
-      return { code: 'cellTooLong', facts: { line, column: this.nameOf(column) } };
-    }
-    return this.encoding.look(value, line);
   }
 
   private repeatsHeader({ bytes, starts, ends, count }: ScannedRow): boolean {
@@ -147,11 +158,20 @@ export class TableEncoder {
   }
 }
 
-/** Values that are surely neither too long nor of any doubtful encoding; nearly all are. */
-function isShortAscii(bytes: Uint8Array, from: number, to: number): boolean {
+/** A value that appears for the first time and may be too long or of a doubtful encoding. */
+interface DoubtfulValue {
+  readonly column: ColumnEncoder;
+  readonly code: number;
+  readonly line: number;
+}
+
+/** Values that are surely neither; nearly all are. */
+function isShortAscii(dictionary: ByteDictionary, code: number): boolean {
+  const bytes = dictionary.allBytes;
+  const to = dictionary.startOf(code + 1);
   let all = 0;
-  for (let at = from; at < to; at += 1) all |= bytes[at]!;
-  return all < 0x80 && to - from <= LIMITS.cellBytes;
+  for (let at = dictionary.startOf(code); at < to; at += 1) all |= bytes[at]!;
+  return all < 0x80 && dictionary.lengthAt(code) <= LIMITS.cellBytes;
 }
 
 function cellsInWords(cells: number): string {

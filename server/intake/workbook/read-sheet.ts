@@ -140,7 +140,7 @@ class SheetReader {
     this.lastFilledRow = this.row;
     const outside = this.builder.firstOutside(span);
     if (outside !== null) this.notes.cellOutside(outside, this.row);
-    const issue = this.table.add(this.builder.row(span, this.row));
+    const issue = this.table.add(this.builder.row(span, this.row)) ?? this.table.settle();
     if (issue !== null) throw new ReadingStopped(issue);
   }
 
