@@ -33,12 +33,18 @@ export async function drawFigure(
     tooltip: false,
     defaultStyle: false,
   });
-  place.querySelector('svg')?.setAttribute('aria-hidden', 'true');
+  fitSvg(place.querySelector('svg'));
   return {
     end: () => {
       drawn.finalize();
     },
   };
+}
+
+/** On paper, which may be narrower than the page it was drawn for, the picture shrinks. */
+function fitSvg(svg: SVGSVGElement | null): void {
+  svg?.setAttribute('aria-hidden', 'true');
+  svg?.setAttribute('style', 'max-width: 100%; height: auto');
 }
 
 /** The library's types leave its text metrics out. */

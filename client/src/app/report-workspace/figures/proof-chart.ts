@@ -43,7 +43,7 @@ export class ProofChart {
   protected readonly rows = computed(() =>
     figureRows(this.element().figure, (address) => this.words.textOf(address)),
   );
-  private readonly theme = shownTheme();
+  protected readonly theme = shownTheme();
   private drawn: DrawnFigure | null = null;
   private drawing = 0;
 

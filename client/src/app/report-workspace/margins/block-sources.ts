@@ -44,9 +44,10 @@ export function blockSources(
   };
 }
 
-/** "36 of 36 numbers bound" */
+/** "36 of 36 numbers bound"; of a hundred and more the noun finds no room. */
 export function countWords({ bound, typed, missing }: SourceCount): string {
   const all = bound + typed + missing;
+  if (all >= 100) return `${bound} of ${all} bound`;
   return `${bound} of ${counted(all, 'number', 'numbers')} bound`;
 }
 

@@ -7,7 +7,12 @@ import { ReportStore } from '../report-store/report-store';
 @Component({
   selector: 'eh-check-meter',
   template: `
-    <button type="button" (click)="walk.step(1)" title="Go to the next check">
+    <button
+      type="button"
+      title="Go to the next check"
+      [disabled]="fix() + look() === 0"
+      (click)="walk.step(1)"
+    >
       <span class="bar" aria-hidden="true">
         <i class="clear" [style.flex-grow]="clear()"></i>
         <i class="look" [style.flex-grow]="look()"></i>
