@@ -22,7 +22,7 @@ const PICTURES: readonly Picture[] = [
   { name: 'code-book', study: WET_WORK, page: 'codeBook', width: 1440, theme: 'light' },
   { name: 'bench', study: WET_WORK, page: 'bench', width: 1440, theme: 'light' },
   { name: 'report', study: WET_WORK, page: 'report', width: 1440, theme: 'light' },
-  { name: 'report-dark', study: 'Evening screen', page: 'report', width: 1440, theme: 'dark' },
+  { name: 'report-dark', study: WET_WORK, page: 'report', width: 1440, theme: 'dark' },
   { name: 'report-phone', study: 'Harbour supper', page: 'report', width: 390, theme: 'light' },
 ];
 
