@@ -8,6 +8,7 @@ import { asUtf8 } from './encode/encoding-watch';
 import { fileTypeOf, type FileType } from './file-type';
 import type { IntakeIssue } from './intake-issue';
 import { withLimit } from './issue-limits';
+import { summarizeColumn, type ColumnSummary } from './profile/column-summary';
 import { profileTable, type ProfiledTable } from './profile/profile-table';
 import type { Progress, ReadingContext, ReadingOutcome, ReadTable } from './reading';
 import { openSourceFile, type SourceFile } from './source-file';
@@ -59,7 +60,8 @@ export async function readFile(
   try {
     const type = fileTypeOf(order.fileName, file.firstBytes);
     if (!type.ok) return type;
-    const read = await READERS[type.value](file, { options: order.options, sink, pause });
+    const context = { options: order.options, sink, pause: within(pause, 0, READ) };
+    const read = await READERS[type.value](file, context);
     return read.ok
       ? success(await finish(order, file, read.value, sink, pause))
       : failure(withLimit(read.issue));
@@ -68,20 +70,28 @@ export async function readFile(
   }
 }
 
+/** Shares of the work: most is reading the bytes, the rest profiling and giving values away. */
+const READ = 0.9;
+const PROFILED = 0.95;
+
+/** Reports progress within a part of the whole. */
+type Pause = (progress: Progress) => Promise<void>;
+
+function within(pause: Pause, from: number, to: number): Pause {
+  return ({ share, rows }) => pause({ share: from + share * (to - from), rows });
+}
+
 async function finish(
   order: ReadingOrder,
   file: SourceFile,
   read: ReadTable,
   sink: ChunkSink,
-  pause: (progress: Progress) => Promise<void>,
+  pause: Pause,
 ): Promise<ReadFile> {
-  const profiled = profileTable(
-    read.table,
-    { ...read, fileName: order.fileName },
-    order.options,
-    order.previous,
-  );
-  await giveDictionaries(read, sink, () => pause({ share: 1, rows: read.table.rows }));
+  const summaries = await summarize(read, within(pause, READ, PROFILED));
+  const reading = { ...read, fileName: order.fileName };
+  const profiled = profileTable(read.table, summaries, reading, order.options, order.previous);
+  await giveDictionaries(read, sink, within(pause, PROFILED, 1));
   return {
     ...profiled,
     sha256: file.sha256(),
@@ -90,17 +100,29 @@ async function finish(
   };
 }
 
+async function summarize(
+  { table, encoding }: ReadTable,
+  pause: Pause,
+): Promise<readonly ColumnSummary[]> {
+  const summaries: ColumnSummary[] = [];
+  for (const { dictionary } of table.columns) {
+    summaries.push(summarizeColumn(dictionary, encoding));
+    await pause({ share: summaries.length / table.columns.length, rows: table.rows });
+  }
+  return summaries;
+}
+
 async function giveDictionaries(
   { table, encoding }: ReadTable,
   sink: ChunkSink,
-  pause: () => Promise<void>,
+  pause: Pause,
 ): Promise<void> {
   for (const [position, { dictionary }] of table.columns.entries()) {
     let chunk = 0;
     for (const bytes of packDictionary(asUtf8(dictionary, encoding))) {
       sink({ position, part: 'dictionary', chunk, bytes });
       chunk += 1;
-      await pause();
+      await pause({ share: position / table.columns.length, rows: table.rows });
     }
   }
 }

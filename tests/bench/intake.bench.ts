@@ -21,12 +21,15 @@ let folder: string;
 let application: TestApplication;
 let person: User;
 let study: Study;
+/** Memory before the first file came. */
+let idle: number;
 
 beforeAll(async () => {
   folder = await mkdtemp(join(tmpdir(), 'evenhand-bench-'));
   application = await startTestApplication();
   person = await application.addPerson();
   study = await application.addStudy();
+  idle = process.memoryUsage().rss;
 }, 60_000);
 
 afterAll(async () => {
@@ -37,8 +40,8 @@ afterAll(async () => {
 it('reads, profiles, encodes and stores a CSV of 1,000,000 rows × 10 columns', async () => {
   const path = join(folder, 'many.csv');
   await writeCsv(path);
-  const floor = await once3(() => parseAlone(path));
-  const readings = await readings3(path, 'many.csv');
+  const { readings, floors } = await inTurn(path, 'many.csv');
+  const floor = spread(floors);
   report({
     what: 'read and store a CSV of 1,000,000 rows × 10 columns (at most a third of csv-parse)',
     budgetInMilliseconds: Math.round(floor.median / 3),
@@ -51,7 +54,7 @@ it('reads, profiles, encodes and stores a CSV of 1,000,000 rows × 10 columns', 
 it('reads, profiles, encodes and stores an XLSX of 100,000 rows × 10 columns', async () => {
   const path = join(folder, 'many.xlsx');
   await writeXlsx(path);
-  const readings = await readings3(path, 'many.xlsx');
+  const { readings } = await inTurn(path, 'many.xlsx');
   report({
     what: 'read and store an XLSX of 100,000 rows × 10 columns',
     budgetInMilliseconds: 20_000,
@@ -66,6 +69,8 @@ interface Reading {
   readonly memoryAboveIdleInMegabytes: number;
   /** The slowest answer that another request got meanwhile. */
   readonly slowestAnswer: number;
+  /** The time within which 95 % of them came. */
+  readonly mostAnswers: number;
   /** The longest time in which the progress that is shown did not change. */
   readonly longestSilence: number;
 }
@@ -78,30 +83,40 @@ function tellSurroundings(
 ): void {
   const most = (of: (reading: Reading) => number): string =>
     Math.max(...readings.map(of)).toFixed(0);
-  console.log(
-    `  ${what} of ${(bytes / 1e6).toFixed(0)} MB: ` +
-      `memory ${most((one) => one.memoryAboveIdleInMegabytes)} MB above idle ` +
-      `(at most ${String(megabytes)}), ` +
-      `slowest other answer ${most((one) => one.slowestAnswer)} ms (at most 50), ` +
-      `longest silence ${most((one) => one.longestSilence)} ms (at most 1000)`,
-  );
+  const told = [
+    `memory ${most((one) => one.memoryAboveIdleInMegabytes)} MB above idle`,
+    `(at most ${String(megabytes)})`,
+    `slowest other answer ${most((one) => one.slowestAnswer)} ms (at most 50)`,
+    `95 % of them within ${most((one) => one.mostAnswers)} ms`,
+    `longest silence ${most((one) => one.longestSilence)} ms (at most 1000)`,
+  ];
+  console.log(`  ${what} of ${(bytes / 1e6).toFixed(0)} MB: ${told.join(', ')}`);
 }
 
-/** The first reading starts the thread and is not counted. */
-async function readings3(path: string, fileName: string): Promise<readonly Reading[]> {
+const RUNS = 3;
+
+/**
+ * Reads a file some times, each time after the floor, so that both meet the same busy machine. The
+ * first reading starts the thread and is not counted.
+ */
+async function inTurn(
+  path: string,
+  fileName: string,
+): Promise<{ readonly readings: readonly Reading[]; readonly floors: readonly number[] }> {
   await readOnce(path, fileName);
-  return [
-    await readOnce(path, fileName),
-    await readOnce(path, fileName),
-    await readOnce(path, fileName),
-  ];
+  const readings: Reading[] = [];
+  const floors: number[] = [];
+  for (let run = 0; run < RUNS; run += 1) {
+    if (fileName.endsWith('.csv')) floors.push(await parseAlone(path));
+    readings.push(await readOnce(path, fileName));
+  }
+  return { readings, floors };
 }
 
 async function readOnce(path: string, fileName: string): Promise<Reading> {
   const { dependencies } = application;
   const copy = `${path}-copy`;
   await copyOf(path, copy);
-  const idle = process.memoryUsage().rss;
   const watch = watchServer();
   const start = performance.now();
   const arrived = { path: copy, fileName, options: FIND_OUT, dataSetId: null };
@@ -110,54 +125,48 @@ async function readOnce(path: string, fileName: string): Promise<Reading> {
   watch.follow(upload.value.id);
   await dependencies.background.idle();
   const milliseconds = performance.now() - start;
-  const { peak, slowestAnswer, longestSilence } = await watch.end();
-  const memoryAboveIdleInMegabytes = (peak - idle) / 1e6;
-  return { milliseconds, memoryAboveIdleInMegabytes, slowestAnswer, longestSilence };
+  const seen = await watch.end();
+  return { milliseconds, memoryAboveIdleInMegabytes: (seen.peak - idle) / 1e6, ...seen };
 }
 
 /** Asks the server something small again and again, and looks at memory and progress. */
 function watchServer() {
   const { dependencies } = application;
-  const seen = { peak: 0, slowestAnswer: 0, longestSilence: 0 };
-  let id = '';
-  let shown = '';
-  let changedAt = performance.now();
-  const watch = { going: true };
+  const answers: number[] = [];
+  const seen = { peak: 0, longestSilence: 0 };
+  const state = { id: '', shown: '', changedAt: performance.now(), going: true };
+  const look = async (): Promise<void> => {
+    const asked = performance.now();
+    await dependencies.database.stores.studies.findById(study.id);
+    const now = performance.now();
+    answers.push(now - asked);
+    seen.peak = Math.max(seen.peak, process.memoryUsage().rss);
+    const progress = JSON.stringify(dependencies.intake.progressOf(state.id));
+    if (progress !== state.shown) state.changedAt = now;
+    state.shown = progress;
+    if (progress === 'null') return;
+    seen.longestSilence = Math.max(seen.longestSilence, now - state.changedAt);
+  };
   const watching = (async () => {
-    while (watch.going) {
-      const asked = performance.now();
-      await dependencies.database.stores.studies.findById(study.id);
-      const now = performance.now();
-      seen.slowestAnswer = Math.max(seen.slowestAnswer, now - asked);
-      seen.peak = Math.max(seen.peak, process.memoryUsage().rss);
-      const progress = JSON.stringify(dependencies.intake.progressOf(id));
-      if (progress !== shown) changedAt = now;
-      shown = progress;
-      if (progress !== 'null') seen.longestSilence = Math.max(seen.longestSilence, now - changedAt);
+    while (state.going) {
+      await look();
       await wait(5);
     }
   })();
   return {
     follow: (uploadId: string) => {
-      id = uploadId;
-      changedAt = performance.now();
+      state.id = uploadId;
+      state.changedAt = performance.now();
     },
     end: async () => {
-      watch.going = false;
+      state.going = false;
       await watching;
-      return seen;
+      const { highest: slowestAnswer } = spread(answers);
+      const sorted = answers.toSorted((one, other) => one - other);
+      const mostAnswers = sorted[Math.floor(sorted.length * 0.95)] ?? 0;
+      return { ...seen, slowestAnswer, mostAnswers };
     },
   };
-}
-
-async function once3(work: () => Promise<unknown>): Promise<Timing> {
-  const times: number[] = [];
-  for (let run = 0; run < 3; run += 1) {
-    const start = performance.now();
-    await work();
-    times.push(performance.now() - start);
-  }
-  return spread(times);
 }
 
 function spread(times: readonly number[]): Timing {
@@ -167,11 +176,13 @@ function spread(times: readonly number[]): Timing {
   return { median, lowest, highest: sorted.at(-1) ?? 0, runs: sorted.length };
 }
 
+/** Milliseconds that csv-parse needs for the rows alone. */
 async function parseAlone(path: string): Promise<number> {
-  let rows = 0;
+  const start = performance.now();
   const reading = createReadStream(path, { highWaterMark: 1 << 20 }).pipe(parse());
-  for await (const row of reading) rows += Array.isArray(row) ? 1 : 0;
-  return rows;
+  reading.resume();
+  await once(reading, 'end');
+  return performance.now() - start;
 }
 
 async function copyOf(path: string, copy: string): Promise<void> {

@@ -13,7 +13,7 @@ import type { CutProfile, IntakeWarning, ReadingOptions } from '#shared/api';
 import { nameColumns, type ColumnNames } from '../encode/column-names';
 import { decodeText, type TextEncoding } from '../encode/encoding-watch';
 import type { TableEncoder } from '../encode/table-encoder';
-import { summarizeColumn, type ColumnSummary } from './column-summary';
+import type { ColumnSummary } from './column-summary';
 import { columnWarnings } from './column-warnings';
 import { decimalMarkOf, sumOfVotes } from './decimal-mark';
 import { fileWarnings } from './file-warnings';
@@ -38,18 +38,19 @@ export interface ProfiledTable {
 }
 
 /**
- * Profiles an encoded table and proposes its code book.
+ * Profiles an encoded table from the summaries of its columns, and proposes its code book.
  *
  * With the code book of the data set that it belongs to, columns keep their ids and the proposal
  * is that code book carried over.
  */
 export function profileTable(
   table: TableEncoder,
+  summaries: readonly ColumnSummary[],
   reading: ReadingFacts,
   given: ReadingOptions,
   previous: CodeBook | null,
 ): ProfiledTable {
-  const described = describeColumns(table, reading, given, previous);
+  const described = describeColumns(table, summaries, reading, given, previous);
   const profile: CutProfile = {
     fileName: reading.fileName,
     rows: table.rows,
@@ -80,6 +81,7 @@ interface DescribedColumns {
 
 function describeColumns(
   table: TableEncoder,
+  summaries: readonly ColumnSummary[],
   { encoding, delimiter }: ReadingFacts,
   given: ReadingOptions,
   previous: CodeBook | null,
@@ -87,7 +89,6 @@ function describeColumns(
   const givenNames = table.columns.map(({ name }) => decodeText(name, encoding));
   const columnNames = nameColumns(givenNames);
   const ids = idsOf(columnNames.names, previous);
-  const summaries = table.columns.map(({ dictionary }) => summarizeColumn(dictionary, encoding));
   const votes = summaries.map(({ numbers }) => numbers.votes);
   const decimalMark = given.decimalMark ?? decimalMarkOf(votes, delimiter);
   const columns = summaries.map((summary, position) => ({

@@ -16,8 +16,19 @@ const DEFLATED = 8;
  */
 export class UnpackBudget {
   private unpacked = 0;
+  private packedRead = 0;
 
   constructor(private readonly packedBytes: number) {}
+
+  /** Share of the packed bytes that was read, 0..1. */
+  get shareRead(): number {
+    return Math.min(1, this.packedRead / this.packedBytes);
+  }
+
+  /** Counts packed bytes that were read. */
+  read(bytes: number): void {
+    this.packedRead += bytes;
+  }
 
   /** Counts bytes that were unpacked. */
   spend(bytes: number): void {
@@ -33,19 +44,15 @@ export class UnpackBudget {
   }
 }
 
-/** Tells how many packed bytes of a part were read. */
-export type PackedProgress = (bytes: number) => void;
-
 /** The unpacked bytes of a part, chunk by chunk, checked against its CRC at the end. */
 export async function* entryBytes(
   archive: ZipArchive,
   entry: ZipEntry,
   budget: UnpackBudget,
-  onProgress: PackedProgress,
 ): AsyncGenerator<Buffer> {
   budget.expect(entry.unpackedBytes);
   let checksum = 0;
-  for await (const chunk of unpacked(archive, entry, onProgress)) {
+  for await (const chunk of unpacked(archive, entry, budget)) {
     budget.spend(chunk.length);
     checksum = crc32(chunk, checksum);
     yield chunk;
@@ -56,9 +63,9 @@ export async function* entryBytes(
 async function* unpacked(
   archive: ZipArchive,
   entry: ZipEntry,
-  onProgress: PackedProgress,
+  budget: UnpackBudget,
 ): AsyncGenerator<Buffer> {
-  const packed = packedBytes(archive, entry, onProgress);
+  const packed = packedBytes(archive, entry, budget);
   if (entry.method === STORED) {
     yield* packed;
     return;
@@ -81,7 +88,7 @@ async function* unpacked(
 async function* packedBytes(
   { handle }: ZipArchive,
   entry: ZipEntry,
-  onProgress: PackedProgress,
+  budget: UnpackBudget,
 ): AsyncGenerator<Buffer> {
   let position = await dataStart(handle, entry);
   const end = position + entry.compressedBytes;
@@ -90,7 +97,7 @@ async function* packedBytes(
     const { bytesRead } = await handle.read(buffer, 0, buffer.length, position);
     if (bytesRead === 0) throw damaged(`the part "${entry.name}"`);
     position += bytesRead;
-    onProgress(bytesRead);
+    budget.read(bytesRead);
     yield buffer.subarray(0, bytesRead);
   }
 }

@@ -25,10 +25,7 @@ export async function readSheet(
   context: ReadingContext,
 ): Promise<SheetReading> {
   const reader = new SheetReader(workbook, table);
-  let packed = 0;
-  const chunks = entryBytes(workbook.archive, sheet.entry, workbook.budget, (bytes) => {
-    packed += bytes;
-  });
+  const chunks = entryBytes(workbook.archive, sheet.entry, workbook.budget);
   await parseXml(sheet.entry.name, chunks, {
     open: (name, attributes) => {
       reader.open(name, attributes);
@@ -41,8 +38,7 @@ export async function readSheet(
     },
     pause: async () => {
       reader.checkSize();
-      const share = packed / Math.max(1, sheet.entry.compressedBytes);
-      await context.pause({ share: Math.min(1, share), rows: table.rows });
+      await context.pause({ share: workbook.budget.shareRead, rows: table.rows });
     },
   });
   table.flush();

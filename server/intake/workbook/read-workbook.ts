@@ -21,7 +21,10 @@ export async function readWorkbook(file: SourceFile, context: ReadingContext): R
   await file.readThrough(() => context.pause({ share: 0, rows: 0 }));
   try {
     const archive = await readZipDirectory(file.handle, file.size);
-    const workbook = await openWorkbook(archive, new UnpackBudget(file.size));
+    const budget = new UnpackBudget(file.size);
+    const workbook = await openWorkbook(archive, budget, () =>
+      context.pause({ share: budget.shareRead, rows: 0 }),
+    );
     return await readSheets(workbook, context);
   } catch (problem) {
     if (problem instanceof ReadingStopped) return failure(problem.issue);

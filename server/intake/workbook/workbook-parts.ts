@@ -30,8 +30,9 @@ export interface OpenedWorkbook {
 export async function openWorkbook(
   archive: ZipArchive,
   budget: UnpackBudget,
+  pause: () => Promise<void>,
 ): Promise<OpenedWorkbook> {
-  const place = { archive, budget };
+  const place = { archive, budget, pause };
   const [main] = (await readRelations(place, '')).filter(({ type }) => type === 'officeDocument');
   if (main === undefined) throw damaged('list of parts');
   const relations = await readRelations(place, main.target);
@@ -45,7 +46,8 @@ export async function openWorkbook(
       : [{ name, hidden, entry: partEntry(archive, relation.target) }];
   });
   return {
-    ...place,
+    archive,
+    budget,
     sheets,
     calendar,
     styles: await readStyles(place, targetOf('styles')),
@@ -56,6 +58,8 @@ export async function openWorkbook(
 interface Place {
   readonly archive: ZipArchive;
   readonly budget: UnpackBudget;
+  /** Waited for between chunks. */
+  readonly pause: () => Promise<void>;
 }
 
 function partEntry(archive: ZipArchive, name: string): ZipEntry {
@@ -65,13 +69,12 @@ function partEntry(archive: ZipArchive, name: string): ZipEntry {
 }
 
 async function parsePart(
-  { archive, budget }: Place,
+  { archive, budget, pause }: Place,
   name: string,
   events: XmlEvents,
 ): Promise<void> {
-  const entry = partEntry(archive, name);
-  const bytes = entryBytes(archive, entry, budget, () => undefined);
-  await parseXml(name, bytes, events);
+  const bytes = entryBytes(archive, partEntry(archive, name), budget);
+  await parseXml(name, bytes, { ...events, pause });
 }
 
 interface Relation {
