@@ -42,7 +42,7 @@ test('a sentence may differ from the report, and follows it again', async ({ pag
   const block = report.block('Effect sentence', 0);
   await report.takeInHand(block);
   const balance = block.getByRole('group', { name: 'This sentence says' });
-  await balance.getByRole('radio', { name: /^Relative/ }).check();
+  await balance.getByText('Relative', { exact: true }).click();
   await expect(
     block.getByText('This sentence says relative; the report says absolute.'),
   ).toBeVisible();

@@ -24,9 +24,9 @@ test('reversing turns table, figure and sentence together, and the files', async
 
   const [one, other] = [effectsOf(before), effectsOf(after)];
   expect(one.length).toBeGreaterThan(3);
-  expect(other.map(({ difference }) => difference)).toEqual(
-    one.map(({ difference: [value = '', lower = '', upper = ''] }) =>
-      [value, upper, lower].map(opposite),
+  expect(other.map(({ difference }) => difference.map(Number))).toEqual(
+    one.map(({ difference: [value, lower, upper] }) =>
+      [value, upper, lower].map((number) => 0 - Number(number)),
     ),
   );
   for (const [place, { ratio }] of other.entries()) {
@@ -72,11 +72,6 @@ function effectsOf(blocks: readonly PrintedBlock[]): readonly Effect[] {
       .map((cell) => numbersIn(cell.replace(/ to /, ' ')));
     return difference.length === 3 && ratio.length === 3 ? [{ difference, ratio }] : [];
   });
-}
-
-function opposite(number: string): string {
-  if (number.startsWith('-')) return `+${number.slice(1)}`;
-  return `-${number.replace('+', '')}`;
 }
 
 /** Rows whose effect cells say that they are what the others are held against. */

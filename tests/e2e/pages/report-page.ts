@@ -33,7 +33,8 @@ export class ReportPage {
   }
 
   async say(framing: Framing): Promise<void> {
-    await this.rail().getByRole('radio', { name: framing }).check();
+    await this.rail().getByText(framing, { exact: true }).click();
+    await expect(this.rail().getByRole('radio', { name: framing })).toBeChecked();
   }
 
   /** Takes a block in hand. */
