@@ -133,7 +133,7 @@ export class LevelList {
     if (!this.apply(mergeLevels(this.column(), ids, {}))) return;
     this.picked.set(new Set());
     this.said.set(`${ids.length} levels are one now.`);
-    this.focusLater(`#label-${CSS.escape(ids[0] ?? '')}`);
+    this.focusLater(`label-${ids[0] ?? ''}`);
   }
 
   protected split(row: LevelRow): void {
@@ -179,10 +179,10 @@ export class LevelList {
     );
   }
 
-  private focusLater(selector: string): void {
+  private focusLater(id: string): void {
     afterNextRender(
       () => {
-        this.element.querySelector<HTMLElement>(selector)?.focus();
+        this.element.ownerDocument.getElementById(id)?.focus();
       },
       { injector: this.injector },
     );

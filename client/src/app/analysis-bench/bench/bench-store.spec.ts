@@ -1,0 +1,116 @@
+import { signal } from '@angular/core';
+import { TestBed } from '@angular/core/testing';
+import type { StudyView } from '#shared/api';
+import type { Tally, TallyRequest } from '#shared/tally';
+import { type Observable, of, throwError } from 'rxjs';
+import { beforeEach, expect, it } from 'vitest';
+import { ApiProblem } from '../../server-api/api-problem';
+import { DataApi } from '../../server-api/data-api';
+import { CurrentStudy } from '../../session/current-study';
+import { withMethod, withReference, withStratumToggled } from '../draft/analysis-draft';
+import { CODE_BOOK, OUTCOME, SPECIFICATION, TALLY } from '../testing/wet-work';
+import { BenchStore } from './bench-store';
+import { CountsStore } from './counts-store';
+
+let asked: TallyRequest[];
+let answer: () => Observable<Tally>;
+let store: BenchStore;
+
+const study = {
+  id: 's',
+  design: 'cohort',
+  peopleNoun: 'workers',
+  population: '',
+  outcomes: [OUTCOME],
+} as unknown as StudyView;
+
+beforeEach(() => {
+  asked = [];
+  answer = () => of(TALLY);
+  const api: Pick<DataApi, 'count'> = {
+    count: (_studyId, _cutId, request) => {
+      asked.push(request);
+      return answer();
+    },
+  };
+  TestBed.configureTestingModule({
+    providers: [
+      BenchStore,
+      CountsStore,
+      { provide: DataApi, useValue: api },
+      { provide: CurrentStudy, useValue: { study: signal(study), may: () => true } },
+    ],
+  });
+  store = TestBed.inject(BenchStore);
+  store.codeBookView.set({ dataSetId: 'd', number: 1, content: CODE_BOOK });
+  store.cutId.set('c1');
+});
+
+function settle(): void {
+  TestBed.tick();
+}
+
+it('computes nothing before the contrast is picked', () => {
+  settle();
+  expect(store.state().kind).toBe('unpicked');
+  expect(asked).toEqual([]);
+});
+
+it('counts once, and follows reference and method without asking again', () => {
+  store.draft.set(SPECIFICATION);
+  settle();
+  expect(store.state().kind).toBe('computed');
+  expect(asked).toEqual([{ columnIds: ['eczema', 'work', 'place'], restrictions: [] }]);
+
+  store.change((draft) => withReference(draft, 'much'));
+  settle();
+  expect(store.result()?.frame.exposure.referenceLevelId).toBe('much');
+  store.change((draft) => withMethod(draft, 'riskDifference', 'wald'));
+  settle();
+  const measures = store.result()?.crude.contrasts[0]?.measures;
+  expect(measures?.riskDifference).toMatchObject({ value: { interval: { method: 'wald' } } });
+  expect(asked).toHaveLength(1);
+});
+
+it('asks again for other columns, and keeps known counts', () => {
+  store.draft.set({ ...SPECIFICATION, stratumColumnIds: [], adjustment: 'crude' });
+  settle();
+  store.change((draft) => withStratumToggled(draft, CODE_BOOK, 'place'));
+  settle();
+  store.change((draft) => withStratumToggled(draft, CODE_BOOK, 'place'));
+  settle();
+  expect(asked.map(({ columnIds }) => columnIds.length)).toEqual([2, 3]);
+});
+
+it('shows the pooled layer as soon as there are strata, then what is chosen', () => {
+  store.draft.set(SPECIFICATION);
+  settle();
+  expect(store.scope()).toEqual({ kind: 'pooled' });
+  store.scope.set({ kind: 'stratum', stratumId: 'kitchen' });
+  store.change((draft) => withReference(draft, 'some'));
+  settle();
+  expect(store.scope()).toEqual({ kind: 'stratum', stratumId: 'kitchen' });
+});
+
+it('says why counting was refused, and counts again when asked to', () => {
+  answer = () => throwError(() => new ApiProblem({ code: 'busy', title: 'The server is busy.' }));
+  store.draft.set(SPECIFICATION);
+  settle();
+  expect(store.state()).toMatchObject({
+    kind: 'refused',
+    problem: { title: 'The server is busy.' },
+  });
+  answer = () => of(TALLY);
+  store.countAgain();
+  expect(store.state().kind).toBe('computed');
+});
+
+it('says what makes an analysis impossible', () => {
+  const restrictions = [{ columnId: 'work', levelIds: ['none'] }];
+  store.draft.set({ ...SPECIFICATION, restrictions });
+  settle();
+  expect(store.state()).toMatchObject({
+    kind: 'impossible',
+    issue: { code: 'fewerThanTwoExposureLevels' },
+  });
+});
