@@ -4,7 +4,7 @@ import { readFile, type ReadingOrder } from './read-file';
 import type { Progress } from './reading';
 
 /** Pieces that may be on their way to the database; reading waits beyond that. */
-const MOST_CHUNKS_UNDER_WAY = 32;
+const MOST_CHUNKS_UNDER_WAY = 64;
 
 const MILLISECONDS_BETWEEN_REPORTS = 200;
 
@@ -20,7 +20,7 @@ port.on('message', (message: WorkerOrder) => {
     void read(message.order);
     return;
   }
-  underWay -= 1;
+  underWay -= message.chunks;
   resume?.();
 });
 

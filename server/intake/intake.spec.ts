@@ -28,13 +28,13 @@ afterAll(async () => {
 async function jobOf(
   id: string,
   text: string,
-  storeChunk: IntakeJob['storeChunk'],
+  storeChunks: IntakeJob['storeChunks'],
 ): Promise<IntakeJob> {
   const path = join(folder, id);
   await writeFile(path, text);
   return {
     id,
-    storeChunk,
+    storeChunks,
     order: { path, fileName: 'data.csv', options: FIND_OUT, previous: null },
   };
 }
@@ -45,8 +45,8 @@ describe('an intake', () => {
   it('reads files one after the other, each whole', async () => {
     for (const rows of [1, 2]) {
       const chunks: Chunk[] = [];
-      const job = await jobOf('small', `a,b\n${'1,2\n'.repeat(rows)}`, (chunk) =>
-        Promise.resolve(void chunks.push(chunk)),
+      const job = await jobOf('small', `a,b\n${'1,2\n'.repeat(rows)}`, (some) =>
+        Promise.resolve(void chunks.push(...some)),
       );
       const end = await intake.read(job);
       expect(end).toMatchObject({ ok: true, value: { rows } });
@@ -57,9 +57,10 @@ describe('an intake', () => {
   it('waits for the pieces to be stored, and tells how far it is', async () => {
     let stored = 0;
     const seen: number[] = [];
-    const job = await jobOf('slow', MANY, async () => {
+    const job = await jobOf('slow', MANY, async (some) => {
       await new Promise((resolve) => setTimeout(resolve, 20));
-      stored += 1;
+      expect(some.reduce((bytes, chunk) => bytes + chunk.bytes.length, 0)).toBeLessThan(1 << 20);
+      stored += some.length;
       seen.push(intake.progressOf('slow')?.rows ?? -1);
     });
     const end = await intake.read(job);

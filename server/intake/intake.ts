@@ -17,8 +17,7 @@ export type ReadingEnd = Result<ReadFile, IntakeIssue> | null;
 export interface IntakeJob {
   readonly id: string;
   readonly order: ReadingOrder;
-  /** Stores a piece; a failure ends the reading. */
-  readonly storeChunk: ReadingListener['storeChunk'];
+  readonly storeChunks: ReadingListener['storeChunks'];
 }
 
 /** Reads files in threads of their own, a few at a time. */
@@ -97,7 +96,7 @@ interface ReadingState {
 }
 
 async function readNow(
-  { order, storeChunk }: IntakeJob,
+  { order, storeChunks }: IntakeJob,
   state: ReadingState,
   threads: Threads,
   log: ErrorLog,
@@ -107,7 +106,7 @@ async function readNow(
   const onProgress = (progress: Progress): void => {
     state.progress = progress;
   };
-  const end = await thread.read(order, { storeChunk, onProgress });
+  const end = await thread.read(order, { storeChunks, onProgress });
   if (end.kind === 'read') {
     threads.giveBack(thread);
     return end.outcome;

@@ -15,7 +15,8 @@ export type ThreadEnd =
 
 /** Where the pieces of a file and its progress go. */
 export interface ReadingListener {
-  readonly storeChunk: (chunk: Chunk) => Promise<void>;
+  /** Stores some pieces, of at most 768 KiB together; a failure ends the reading. */
+  readonly storeChunks: (chunks: readonly Chunk[]) => Promise<void>;
   readonly onProgress: (progress: Progress) => void;
 }
 
@@ -57,13 +58,13 @@ export function startReadingThread({
 function readOne(
   worker: Worker,
   file: ReadingOrder,
-  { storeChunk, onProgress }: ReadingListener,
+  { storeChunks, onProgress }: ReadingListener,
 ): Promise<ThreadEnd> {
   const order = (message: WorkerOrder): void => {
     worker.postMessage(message);
   };
-  const storing = createStoring(storeChunk, () => {
-    order({ kind: 'chunkStored' });
+  const storing = createStoring(storeChunks, (chunks) => {
+    order({ kind: 'chunksStored', chunks });
   });
   return new Promise((resolve) => {
     const settle = (end: ThreadEnd): void => {
@@ -89,17 +90,37 @@ function readOne(
 }
 
 interface Storing {
+  /** Takes a piece; resolves when it is stored. */
   readonly add: (chunk: Chunk) => Promise<void>;
   /** Resolves when nothing is being stored any more, with what went wrong. */
   readonly idle: () => Promise<unknown>;
 }
 
-/** Stores pieces one after the other; after a failure none any more. */
-function createStoring(storeChunk: ReadingListener['storeChunk'], stored: () => void): Storing {
+/** A transaction writes less than 1 MiB, so that others need not wait long. */
+const BYTES_AT_ONCE = 786_432;
+const CHUNKS_AT_ONCE = 500;
+
+/**
+ * Stores pieces one after the other, those that came meanwhile together; after a failure none any
+ * more.
+ */
+function createStoring(
+  storeChunks: ReadingListener['storeChunks'],
+  stored: (chunks: number) => void,
+): Storing {
+  let waiting: readonly Chunk[] = [];
   let last: Promise<void> = Promise.resolve();
+  const storeSome = async (): Promise<void> => {
+    const some = firstOf(waiting);
+    if (some.length === 0) return;
+    waiting = waiting.slice(some.length);
+    await storeChunks(some);
+    stored(some.length);
+  };
   return {
     add: (chunk) => {
-      last = last.then(() => storeChunk(chunk)).then(stored);
+      waiting = [...waiting, chunk];
+      last = last.then(storeSome);
       return last;
     },
     idle: () =>
@@ -108,4 +129,14 @@ function createStoring(storeChunk: ReadingListener['storeChunk'], stored: () => 
         (problem: unknown) => problem,
       ),
   };
+}
+
+/** The first pieces that are not too many together, at least one of them. */
+function firstOf(chunks: readonly Chunk[]): readonly Chunk[] {
+  let bytes = 0;
+  const end = chunks.findIndex((chunk, at) => {
+    bytes += chunk.bytes.length;
+    return at === CHUNKS_AT_ONCE || (at > 0 && bytes > BYTES_AT_ONCE);
+  });
+  return end < 0 ? chunks : chunks.slice(0, end);
 }

@@ -24,14 +24,22 @@ export class ColumnChunkStore {
     return found.map(({ bytes }) => bytes);
   }
 
-  /** The bytes of one piece of the codes; null when there is none. */
-  async readCodes(cutId: string, position: number, chunk: number): Promise<Buffer | null> {
-    const where = { cutId, position, part: 'codes' as const, chunk };
-    return (await this.chunks.findOne({ attributes: ['bytes'], where }))?.bytes ?? null;
-  }
-
-  async insert(chunk: ColumnChunk, unit: Unit): Promise<void> {
-    await this.chunks.create(chunk, within(unit));
+  /** Adds some pieces by one statement; `bulkCreate` would write the bytes out as text. */
+  async insertAll(chunks: readonly ColumnChunk[], unit: Unit): Promise<void> {
+    if (chunks.length === 0) return;
+    const rows = chunks.map((_, row) => `(${placeholders(row)})`).join(', ');
+    const bind = chunks.flatMap(({ cutId, position, part, chunk, bytes }): unknown[] => [
+      cutId,
+      position,
+      part,
+      chunk,
+      bytes,
+    ]);
+    await this.sequelize.query(`${INSERT} ${rows}`, {
+      type: QueryTypes.INSERT,
+      bind,
+      ...within(unit),
+    });
   }
 
   /** Removes some pieces of a cut; gives how many are left, so that each removal is small. */
@@ -43,6 +51,15 @@ export class ColumnChunkStore {
     });
     return this.chunks.count({ where: { cutId }, ...within(unit) });
   }
+}
+
+const INSERT = 'INSERT INTO column_chunks (cut_id, position, part, chunk, bytes) VALUES';
+const COLUMNS = 5;
+
+function placeholders(row: number): string {
+  return Array.from({ length: COLUMNS }, (_, at) => `$${String(row * COLUMNS + at + 1)}`).join(
+    ', ',
+  );
 }
 
 const REMOVE_SOME = `DELETE FROM column_chunks WHERE cut_id = :cutId AND

@@ -49,10 +49,11 @@ async function insertTable(
     const { columnId, name } = column;
     const facts = { cutId: cut.id, position, columnId, name, width, dictionarySize };
     await cutColumns.insertAll([{ ...facts, chunkRows: ROWS_OF_A_TYPED_CHUNK }], unit);
-    for (const chunk of chunks) {
-      const bytes = Buffer.from(chunk.bytes);
-      await columnChunks.insert({ ...chunk, cutId: cut.id, bytes }, unit);
-    }
+    const stored = chunks.map((chunk) => ({ ...chunk, bytes: Buffer.from(chunk.bytes) }));
+    await columnChunks.insertAll(
+      stored.map((chunk) => ({ ...chunk, cutId: cut.id })),
+      unit,
+    );
   }
   return cut.id;
 }

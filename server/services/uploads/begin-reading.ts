@@ -26,10 +26,10 @@ async function readUpload(dependencies: Dependencies, upload: Upload): Promise<v
   const end = await intake.read({
     id: upload.id,
     order,
-    storeChunk: (chunk) =>
+    storeChunks: (chunks) =>
       database.unitOfWork(`study:${upload.studyId}`, (unit) =>
-        database.stores.columnChunks.insert(
-          { ...chunk, cutId, bytes: Buffer.from(chunk.bytes.buffer) },
+        database.stores.columnChunks.insertAll(
+          chunks.map((chunk) => ({ ...chunk, cutId, bytes: Buffer.from(chunk.bytes.buffer) })),
           unit,
         ),
       ),
