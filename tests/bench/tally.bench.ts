@@ -1,7 +1,7 @@
 import { it } from 'vitest';
 import { bandColumn, setLayout, type CodeBook, type CodeBookColumn } from '#shared/code-book';
 import { countTally, type EncodedColumn, type EncodedCut, type TallyRequest } from '#shared/tally';
-import { report, timed, type Timing } from './measure';
+import { report, type Timing } from './measure';
 
 const MILLION = 1_000_000;
 const REQUEST: TallyRequest = { columnIds: ['outcome', 'exposure', 'stratum'], restrictions: [] };
@@ -19,11 +19,14 @@ it('counts ten million records by three factors', () => {
 
 it('counts ten million in proportion to one million', () => {
   const [million, ten] = [cutOf(MILLION), cutOf(10 * MILLION)];
-  const floor = timingOf(() => countTally(million, BOOK, REQUEST));
+  const [timing, floor] = inTurn(
+    () => countTally(ten, BOOK, REQUEST),
+    () => countTally(million, BOOK, REQUEST),
+  );
   report({
     what: 'count 10,000,000 records, against 1,000,000 (at most 11 ×)',
     budgetInMilliseconds: Math.round(floor.median * 11),
-    timing: timingOf(() => countTally(ten, BOOK, REQUEST)),
+    timing,
     floor: { what: 'a million', timing: floor },
   });
 });
@@ -46,20 +49,39 @@ function tell(
   timesFloor: number,
   book: CodeBook = BOOK,
 ): void {
-  const floor = timingOf(() => plainLoop(cut));
+  const count = (): void => {
+    const tally = countTally(cut, book, request);
+    if (!tally.ok) throw new Error(tally.issue.code);
+  };
+  const [timing, floor] = inTurn(count, () => plainLoop(cut));
   report({
     what,
     budgetInMilliseconds: Math.round(floor.median * timesFloor * 10) / 10,
-    timing: timingOf(() => {
-      const tally = countTally(cut, book, request);
-      if (!tally.ok) throw new Error(tally.issue.code);
-    }),
+    timing,
     floor: { what: 'a plain loop with four accumulators', timing: floor },
   });
 }
 
-function timingOf(work: () => unknown): Timing {
-  return timed(() => undefined, work, { runs: 31, warmUps: 10 });
+/** Times two works turn by turn, so that both meet the same busy machine. */
+function inTurn(work: () => unknown, floor: () => unknown): readonly [Timing, Timing] {
+  const times: [number[], number[]] = [[], []];
+  for (let run = 0; run < WARM_UPS + RUNS; run += 1) {
+    [work, floor].forEach((one, at) => {
+      const start = performance.now();
+      one();
+      if (run >= WARM_UPS) times[at]!.push(performance.now() - start);
+    });
+  }
+  return [spread(times[0]), spread(times[1])];
+}
+
+const RUNS = 41;
+const WARM_UPS = 10;
+
+function spread(times: readonly number[]): Timing {
+  const sorted = times.toSorted((one, other) => one - other);
+  const [lowest = 0] = sorted;
+  return { median: sorted[RUNS >> 1] ?? 0, lowest, highest: sorted.at(-1) ?? 0, runs: RUNS };
 }
 
 /** Counts the codes as they are: no code book, no missing codes, nothing but the increments. */
