@@ -8,6 +8,7 @@ import { discardUpload } from './discard-upload';
 import { loadingCut } from './loading-cut';
 import { NOTHING_READ } from './receive-upload';
 import { removeLoadingCut } from './remove-loading-cut';
+import { sweepFiles } from './sweep-files';
 import { absolutePath } from './upload-files';
 
 /** Days after which an upload that nobody stored is given up. */
@@ -16,10 +17,12 @@ const DAYS_KEPT = 14;
 const DAY_IN_MILLISECONDS = 86_400_000;
 
 /**
- * Puts right what a stop left of uploads: unfinished cuts go, files that were being read are read
- * again from the start, and uploads that nobody stored for two weeks are given up.
+ * Puts right what a stop left of uploads: unfinished cuts and files without an upload go, files
+ * that were being read are read again from the start, and uploads that nobody stored for two weeks
+ * are given up.
  */
 export async function resumeUploads(dependencies: Dependencies): Promise<void> {
+  await sweepFiles(dependencies);
   const { uploads } = dependencies.database.stores;
   const waiting = await uploads.listInState(['profiled', 'failed']);
   for (const upload of waiting.filter((one) => isForgotten(dependencies, one))) {

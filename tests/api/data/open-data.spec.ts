@@ -74,7 +74,8 @@ describe('the oesophageal data', () => {
     ['esoph_wide_cases_controls.csv', COUNTED_OUTCOME_COLUMN_ID, 'Case', 'Control'],
   ])('in %s', async (file, outcome, event, nonEvent) => {
     const cut = await load(file);
-    for (const [column, expected] of Object.entries({ alcgp: ALCOHOL, tobgp: TOBACCO, agegp: AGE })) {
+    const columns = { alcgp: ALCOHOL, tobgp: TOBACCO, agegp: AGE };
+    for (const [column, expected] of Object.entries(columns)) {
       const rows = expected.flatMap(([level, cases, controls]): Table => [
         [`${level} / ${event}`, cases],
         [`${level} / ${nonEvent}`, controls],

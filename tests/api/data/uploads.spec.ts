@@ -1,9 +1,12 @@
+import { existsSync } from 'node:fs';
+import { writeFile } from 'node:fs/promises';
+import { join } from 'node:path';
 import { describe, expect, it } from 'vitest';
 import type { CutView, UploadView } from '#shared/api';
 import { replaceColumn } from '#shared/code-book';
 import { buildWorkbook } from '../../../server/intake/testing/build-workbook';
 import { resumeUploads } from '../../../server/services/uploads/resume-uploads';
-import { columnOf, ROWS, useDataStudy } from '../../builders/data-study';
+import { columnOf, NOTHING, ROWS, useDataStudy } from '../../builders/data-study';
 import { loadFile, readUpload, sendFile, storeUpload, untilRead } from '../../builders/uploads';
 
 const data = useDataStudy();
@@ -179,6 +182,16 @@ describe('after a stop', () => {
     const loading = await data.stores.cuts.listLoading();
     expect(loading).not.toContain(interrupted.cutId);
     expect(loading).toContain((await uploads.find(data.study.id, upload.id))?.cutId);
+  });
+
+  it('files that no upload will ask for are gone, and those of uploads stay', async () => {
+    const upload = await readUpload(data.browser, data.study, { bytes: ROWS });
+    const { dataDirectory } = data.application.dependencies.config;
+    const left = [join(dataDirectory, 'arriving', 'half'), join(dataDirectory, 'uploads', NOTHING)];
+    for (const path of left) await writeFile(path, 'x');
+    await resumeUploads(data.application.dependencies);
+    expect(left.map((path) => existsSync(path))).toEqual([false, false]);
+    expect(data.keepsFile(upload.id)).toBe(true);
   });
 
   it('an upload that nobody stored for two weeks is given up', async () => {
