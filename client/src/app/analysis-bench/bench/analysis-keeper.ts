@@ -9,6 +9,7 @@ import { Notices } from '../../ui/notices/notices';
 import { isSameDraft } from '../draft/analysis-draft';
 import { BenchLoader } from './bench-loader';
 import { BenchStore } from './bench-store';
+import { onTopOf } from './on-top';
 
 /** Saves, copies and deletes the analysis on the bench. */
 @Injectable()
@@ -26,6 +27,13 @@ export class AnalysisKeeper {
   /** Somebody else's newer version, when saving met one. */
   readonly theirs = signal<AnalysisView | null>(null);
 
+  /** Their version with one's own changes on top. */
+  readonly onTop = computed(() => {
+    const [theirs, saved] = [this.theirs(), this.store.saved()];
+    if (theirs === null || saved === null) return null;
+    const mine = { name: this.name(), specification: this.store.draft() };
+    return onTopOf(theirs, mine, saved);
+  });
   readonly isChanged = computed(() => {
     const saved = this.store.saved();
     if (saved === null) return this.store.specification() !== null;
@@ -86,11 +94,14 @@ export class AnalysisKeeper {
     });
   }
 
-  /** Puts the own version on top of the newer one. */
+  /** Puts the own changes on top of the newer version. */
   keepOwn(reason: string | null): void {
-    const theirs = this.theirs();
+    const [theirs, onTop] = [this.theirs(), this.onTop()];
     this.theirs.set(null);
-    if (theirs !== null) this.save(reason, theirs.version);
+    if (theirs === null || onTop === null) return;
+    this.store.name.set(onTop.name);
+    this.store.draft.set(onTop.specification);
+    this.save(reason, theirs.version);
   }
 
   /** Gives the own version up for the newer one. */

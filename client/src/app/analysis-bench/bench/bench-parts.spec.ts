@@ -1,10 +1,12 @@
-import type { CutView } from '#shared/api';
+import type { AnalysisSpecification } from '#shared/analysis';
+import type { AnalysisView, CutView } from '#shared/api';
 import { COUNTED_OUTCOME_COLUMN_ID, type CodeBook, countedOutcomeColumn } from '#shared/code-book';
 import { expect, it } from 'vitest';
 import { emptyDraft, withStratumToggled } from '../draft/analysis-draft';
 import { parsedLevel, parsedScore } from '../panels/setting-values';
 import { CODE_BOOK, SPECIFICATION, wetWorkResult } from '../testing/wet-work';
 import { newestCut } from './cut-place';
+import { onTopOf } from './on-top';
 import { repeatedIdentifiers } from './repeated-identifiers';
 import { sameScope, scopeLabel, scopesOf } from './result-scopes';
 import { specificationDifferences } from './specification-differences';
@@ -35,6 +37,30 @@ it('names what two versions differ in, in words', () => {
     { what: 'Reference', mine: 'None', theirs: 'Much' },
     { what: 'Confidence level', mine: '95%', theirs: '90%' },
   ]);
+});
+
+it('puts own changes on top and keeps what only others changed', () => {
+  const view = (name: string, specification: AnalysisSpecification) =>
+    ({ name, specification }) as AnalysisView;
+  const base = view('A', SPECIFICATION);
+  const theirs = view('A', {
+    ...SPECIFICATION,
+    methods: { ...SPECIFICATION.methods, riskRatio: 'koopman' },
+  });
+  const mine = {
+    name: 'B',
+    specification: {
+      ...SPECIFICATION,
+      level: 0.9,
+      methods: { ...SPECIFICATION.methods, riskDifference: 'wald' },
+    },
+  };
+  const merged = onTopOf(theirs, mine, base);
+  expect(merged.name).toBe('B');
+  expect(merged.specification).toMatchObject({
+    level: 0.9,
+    methods: { riskDifference: 'wald', riskRatio: 'koopman' },
+  });
 });
 
 it('keeps of a draft what another code book has', () => {

@@ -1,4 +1,6 @@
 import type { CodeBook } from '#shared/code-book';
+import { EFFECT_MEASURE_IDS, EFFECT_MEASURES } from '#shared/effects';
+import { RISK_INTERVALS } from '#shared/stats';
 import type { AnalysisDraft } from '../draft/analysis-draft';
 import { columnById, levelLabels } from '../draft/column-choices';
 
@@ -48,9 +50,21 @@ function describedParts(
         .map(({ columnId, levelIds }) => `${labelOf(columnId)}: ${levelsOf(columnId, levelIds)}`)
         .join('; ') || 'all',
     'Confidence level': `${Number((level * 100).toPrecision(12))}%`,
-    'Interval methods': Object.values(methods).join(', '),
+    'Interval methods': methodLabels(methods).join(', '),
     Adjustment: adjustment === 'crude' ? 'none' : 'Mantel–Haenszel',
     'Trend scores': trendScores === null ? '1, 2, 3 …' : Object.values(trendScores).join(', '),
-    Standing: `${standing.planned}, ${standing.importance}, ${standing.analysisSet}`,
+    Standing: [
+      standing.planned === 'postHoc' ? 'post hoc' : standing.planned,
+      standing.importance,
+      standing.analysisSet,
+    ].join(', '),
   };
+}
+
+function methodLabels(methods: AnalysisDraft['methods']): readonly string[] {
+  const risk: Readonly<Record<string, { readonly label: string }>> = RISK_INTERVALS;
+  const measures = EFFECT_MEASURE_IDS.map(
+    (id) => EFFECT_MEASURES[id].intervals[methods[id]]?.label ?? methods[id],
+  );
+  return [risk[methods.risk]?.label ?? methods.risk, ...measures];
 }

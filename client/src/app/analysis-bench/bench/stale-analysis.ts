@@ -1,14 +1,16 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
 import type { AnalysisView } from '#shared/api';
 import { BenchStore } from './bench-store';
-import { specificationDifferences } from './specification-differences';
+import { type NamedDraft, specificationDifferences } from './specification-differences';
 
 /** Somebody saved a newer version meanwhile: both are shown, and nothing is lost. */
 @Component({
   selector: 'eh-stale-analysis',
   template: `
     <h2>Somebody saved version {{ theirs().version }} while you edited</h2>
-    <p class="second">Nothing is lost: yours is still on the bench. Choose which one holds.</p>
+    <p class="second">
+      Nothing is lost. What only they changed stays as theirs; in these parts yours differs.
+    </p>
     <table class="three-rule">
       <thead>
         <tr>
@@ -57,6 +59,8 @@ import { specificationDifferences } from './specification-differences';
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class StaleAnalysis {
+  /** Their version with one's own changes on top. */
+  readonly mine = input.required<NamedDraft>();
   readonly theirs = input.required<AnalysisView>();
   readonly kept = output();
   readonly taken = output();
@@ -64,7 +68,6 @@ export class StaleAnalysis {
   private readonly store = inject(BenchStore);
   protected readonly differences = computed(() => {
     const theirs = this.theirs();
-    const mine = { name: this.store.name(), specification: this.store.draft() };
-    return specificationDifferences(mine, theirs, this.store.codeBook());
+    return specificationDifferences(this.mine(), theirs, this.store.codeBook());
   });
 }

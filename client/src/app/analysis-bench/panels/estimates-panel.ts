@@ -54,6 +54,9 @@ export class EstimatesPanel {
     if (print === null) return '';
     return intervalLabel(print.result.specification.level, print.style);
   });
+  protected readonly caption = computed(
+    () => `Every level against ${this.against()}, with ${this.level()}`,
+  );
   /** Says the layer and its first row once the result moves, for who cannot see it. */
   protected readonly said = computed(() => {
     const result = this.store.result();
