@@ -1,7 +1,7 @@
 import { signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import type { Step } from '#shared/report';
-import { beforeEach, describe, expect, it } from 'vitest';
+import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { ApiProblem } from '../../server-api/api-problem';
 import { ReportsApi } from '../../server-api/reports-api';
 import { SessionStore } from '../../session/session-store';
@@ -98,6 +98,18 @@ describe('out of reach of the server', () => {
     TestBed.tick();
     expect([there(), saved(), kept().length]).toEqual(['The risk rose again', 'saved', 0]);
     expect(server.accepted).toHaveLength(2);
+  });
+
+  it('gives up a request that is never answered, says so, and asks again', () => {
+    vi.useFakeTimers();
+    server.failures.push('never answers');
+    make(typing('p', 1, 0, 'The '));
+    expect(saved()).toBe('saving');
+    vi.advanceTimersByTime(15_000);
+    expect([saved(), there()]).toEqual(['stuck', 'risk rose']);
+    vi.advanceTimersByTime(1_000);
+    expect([saved(), there()]).toEqual(['saved', 'The risk rose']);
+    vi.useRealTimers();
   });
 
   it('leaves the work to the next visit, which sends it', () => {

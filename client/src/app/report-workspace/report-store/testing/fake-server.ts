@@ -7,7 +7,7 @@ import {
   type Report,
   type Step,
 } from '#shared/report';
-import { type Observable, of, throwError } from 'rxjs';
+import { NEVER, type Observable, of, throwError } from 'rxjs';
 import { ApiProblem } from '../../../server-api/api-problem';
 import type { ReportsApi } from '../../../server-api/reports-api';
 
@@ -19,7 +19,7 @@ const AT = '2025-12-01T10:00:00.000Z';
 export class FakeServer implements Partial<ReportsApi> {
   readonly accepted: AcceptedStep[] = [];
   /** What the next requests fail with, one after the other; null lets one pass. */
-  readonly failures: (ApiProblem | null)[] = [];
+  readonly failures: (ApiProblem | 'never answers' | null)[] = [];
   requests = 0;
 
   constructor(public report: Report) {}
@@ -42,6 +42,7 @@ export class FakeServer implements Partial<ReportsApi> {
   submitSteps(_studyId: string, _reportId: string, { steps }: StepsRequest): Observable<StepsView> {
     this.requests += 1;
     const failure = this.failures.shift();
+    if (failure === 'never answers') return NEVER;
     if (failure) return throwError(() => failure);
     const taken: AcceptedStep[] = [];
     for (const step of steps) {
