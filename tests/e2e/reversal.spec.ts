@@ -1,5 +1,5 @@
 import { demonstrator, openReport } from './demonstration';
-import type { ReportPage } from './pages/report-page';
+import type { Framing, ReportPage } from './pages/report-page';
 import { expectSameDocument, expectSameWorkbook } from './readers/agreement';
 import { readDocx } from './readers/docx';
 import { numbersIn } from './readers/numbers';
@@ -34,8 +34,25 @@ test('reversing turns table, figure and sentence together, and the files', async
     expect(1 / Number(ratio[1])).toBeCloseTo(Number(one[place]!.ratio[2]), 1);
   }
   expect(referenceRows(after)).not.toEqual(referenceRows(before));
-  expect(labelsOf(after)).not.toEqual(labelsOf(before));
+  expect(figureReference(before)).toMatch(/the usual invitation/);
+  expect(figureReference(after)).toMatch(/a reminder letter/);
+
+  const difference = other.at(-1)!.difference[0]!;
+  const [absolute, relative] = [
+    sentenceOf(await under(report, 'Absolute')),
+    sentenceOf(await under(report, 'Relative')),
+  ];
+  expect(difference).toMatch(/^-/);
+  expect(absolute).toContain(`${difference.slice(1)} percentage points lower`);
+  expect(relative).toMatch(/\d% lower \(/);
+  expect(numbersIn(relative.slice(relative.indexOf('difference was')))).toContain(difference);
 });
+
+async function under(report: ReportPage, framing: Framing): Promise<readonly PrintedBlock[]> {
+  await report.say(framing);
+  await report.untilSaved();
+  return agreed(report);
+}
 
 /** What the page prints, once both files have been held to it. */
 async function agreed(report: ReportPage): Promise<readonly PrintedBlock[]> {
@@ -77,9 +94,13 @@ function effectsOf(blocks: readonly PrintedBlock[]): readonly Effect[] {
 /** Rows whose effect cells say that they are what the others are held against. */
 function referenceRows(blocks: readonly PrintedBlock[]): readonly string[] {
   const { rows } = blockNamed(blocks, 'Table 1').tables[0]!;
-  return rows.filter((cells) => cells.some((cell) => /^ref/i.test(cell))).map(([label]) => label!);
+  return rows
+    .filter((cells) => cells.some((cell) => /\bref(?:erence)?\b/i.test(cell)))
+    .map(([label]) => label!);
 }
 
-function labelsOf(blocks: readonly PrintedBlock[]): readonly string[] {
-  return blockNamed(blocks, 'Figure 1').figures[0]!.texts;
+/** The figure's note on the group that the others are held against. */
+function figureReference(blocks: readonly PrintedBlock[]): string {
+  const { notes } = blockNamed(blocks, 'Figure 1').figures[0]!;
+  return notes.find((words) => words.includes('reference group')) ?? notes.join(' ');
 }

@@ -33,6 +33,7 @@ export const PRINT_SLOTS = {
   'title.population': ['population'],
   'title.size': ['count'],
   'note.reference': ['reference'],
+  'note.figureReference': ['reference'],
   'note.intervals': ['level', 'methods'],
   'note.method': ['measure', 'method'],
   'note.pooled': ['strata', 'methods'],

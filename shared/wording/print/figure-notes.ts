@@ -6,9 +6,9 @@ import type { Phrase } from '../phrase';
 import { shareMethod } from './method-words';
 import { missingNotes } from './missing-notes';
 import { printContext, type PrintedAnalysis } from './print-context';
-import { standingNotes } from './table-notes';
+import { referenceGroup, standingNotes } from './table-notes';
 
-/** The notes of a bar chart of the analysis: what the whiskers are, missing records, standing. */
+/** The notes of a bar chart of the analysis: reference, whiskers, missing records, standing. */
 export function figureNotes(
   analysis: PrintedAnalysis,
   style: HouseStyle,
@@ -23,5 +23,8 @@ export function figureNotes(
     result.frame.design === 'caseControl'
       ? [{ parts: fillPattern(book, 'note.sharesOfCases', {}) }]
       : [];
-  return [...shares, whiskers, ...missingNotes(context), ...standingNotes(context)];
+  const reference: Phrase = {
+    parts: fillPattern(book, 'note.figureReference', { reference: referenceGroup(context) }),
+  };
+  return [...shares, reference, whiskers, ...missingNotes(context), ...standingNotes(context)];
 }

@@ -83,10 +83,18 @@ function referenceNotes(
   if (measures.length === 0) {
     return [];
   }
+  const reference = referenceGroup(context);
+  return [{ parts: fillPattern(context.book, 'note.reference', { reference }) }];
+}
+
+/** The people that all others are compared with, as sentences name them. */
+export function referenceGroup(context: PrintContext): PhrasePart {
   const { referenceLevelId } = context.result.frame.exposure;
-  const text = groupAt(context, referenceLevelId);
-  const group: PhrasePart = { kind: 'group', text, levelId: referenceLevelId };
-  return [{ parts: fillPattern(context.book, 'note.reference', { reference: group }) }];
+  return {
+    kind: 'group',
+    text: groupAt(context, referenceLevelId),
+    levelId: referenceLevelId,
+  };
 }
 
 function intervalNotes(
