@@ -22,18 +22,31 @@ test('toggling the rail turns words, units and limits on screen and in the next 
   for (const [place, absolute] of said.Absolute.entries()) {
     const relative = said.Relative[place]!;
     const both = said.Both[place]!;
-    expect(absolute).toMatch(/percentage points (?:higher|lower)/);
-    expect(leadOf(absolute)).not.toMatch(/times|%\s(?:higher|lower)|risk ratio/);
-    expect(leadOf(relative)).toMatch(/times|% (?:higher|lower)/);
-    expect(relative).toMatch(/risk ratio/);
-    expect(numbersIn(leadOf(absolute))).not.toEqual(numbersIn(leadOf(relative)));
-    expect(both).toMatch(/percentage points/);
-    expect(both).toMatch(/risk ratio/);
+    if (absolute.includes('no clear evidence')) expectUnclear(absolute, relative);
+    else expectClear(absolute, relative, both);
     expect(risksIn(absolute)).not.toHaveLength(0);
     expect(risksIn(relative)).toEqual(risksIn(absolute));
     expect(risksIn(both)).toEqual(risksIn(absolute));
   }
 });
+
+/** Verb, unit and limits of what leads; the other framing follows where both are said. */
+function expectClear(absolute: string, relative: string, both: string): void {
+  expect(leadOf(absolute)).toMatch(/percentage points (?:higher|lower)$/);
+  expect(leadOf(relative)).toMatch(/times as high$|% (?:higher|lower)$/);
+  expect(leadOf(both)).toBe(leadOf(absolute));
+  expect(both).toMatch(/that is, .*(?:times as high|% (?:higher|lower))/);
+  expect(firstLimits(absolute)).not.toEqual(firstLimits(relative));
+  expect(firstLimits(both)).toEqual(firstLimits(absolute));
+}
+
+/** Limits on both sides of no difference, each with its own direction. */
+function expectUnclear(absolute: string, relative: string): void {
+  expect(absolute).toMatch(
+    /was \S+ percentage points higher,.* from \S+ percentage points lower to \S+ higher/,
+  );
+  expect(relative).toMatch(/was \d+% higher \(risk ratio \S+\),.* from \d+% lower to /);
+}
 
 test('a sentence may differ from the report, and follows it again', async ({ page }) => {
   const report = await openReport(page, 'wetWork');
@@ -42,7 +55,7 @@ test('a sentence may differ from the report, and follows it again', async ({ pag
   const block = report.block('Effect sentence', 0);
   await report.takeInHand(block);
   const balance = block.getByRole('group', { name: 'This sentence says' });
-  await balance.getByText('Relative', { exact: true }).click();
+  await balance.getByText('Relative').first().click();
   await expect(
     block.getByText('This sentence says relative; the report says absolute.'),
   ).toBeVisible();
@@ -73,9 +86,16 @@ async function sentencesOf(report: ReportPage): Promise<readonly string[]> {
     .map(({ paragraphs }) => paragraphs.join(' '));
 }
 
-/** The part that says the effect first: up to its first interval. */
+/** The part that says the effect first: up to its interval. */
 function leadOf(sentence: string): string {
-  return sentence.slice(0, sentence.search(/ \((?:\d|risk ratio|95)/));
+  return sentence.slice(0, sentence.search(/ \((?:risk ratio|95)/));
+}
+
+/** The limits of the effect that leads. */
+function firstLimits(sentence: string): readonly string[] {
+  const [interval = ''] = /(?<=CI\]? )\S+ to [^\s)]+/.exec(sentence) ?? [];
+  expect(interval, sentence).not.toBe('');
+  return numbersIn(interval);
 }
 
 /** What is said of each group: "84 of 620, 13.5%". */
