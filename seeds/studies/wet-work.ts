@@ -118,9 +118,9 @@ function blocks({ analysisIds, nextId }: BlockPlan): readonly DemonstrationBlock
   ];
 }
 
-const NOTE = `*Invented data, for demonstration.* Workers without hand eczema at the start were asked
-about wet work and seen again after 12 months. An association is no proof of a cause; the results
-need a statistician's and a clinician's reading.`;
+const NOTE = `*Invented data, for demonstration.* Workers without hand eczema at the start were
+asked about wet work and seen again after 12 months. An association is no proof of a cause; the
+results need a statistician's and a clinician's reading.`;
 
 function opening(
   id: string,

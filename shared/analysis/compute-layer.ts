@@ -75,7 +75,9 @@ function levelResult(
   count: GroupCount,
 ): LevelResult {
   const { events, total } = count;
-  const risk = designGivesRisk(frame.design) ? shareEstimate(specification, count) : failure(NOT_GIVEN);
+  const risk = designGivesRisk(frame.design)
+    ? shareEstimate(specification, count)
+    : failure(NOT_GIVEN);
   return { levelId, count: { events, total }, risk };
 }
 
