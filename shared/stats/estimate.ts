@@ -12,7 +12,9 @@ export type EstimationIssueCode =
   | 'notOrdered'
   | 'invalidCounts'
   | 'invalidLevel'
-  | 'tooLarge';
+  | 'tooLarge'
+  | 'noEvents'
+  | 'adjustedInCrudeFormula';
 
 /** An expected failure of an estimate or a test. */
 export type EstimationIssue = Issue<EstimationIssueCode>;

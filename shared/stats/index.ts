@@ -22,6 +22,23 @@ export type {
 } from './estimate';
 export type { FourfoldTable, GroupCount, StratifiedTable, TableStratum } from './fourfold-table';
 export {
+  E_VALUE_CITATION,
+  IMPACT_METHODS,
+  eValue,
+  fractionInExposed,
+  fractionOfExposedCases,
+  levinFraction,
+  populationFraction,
+} from './impact';
+export type {
+  EValue,
+  ImpactEstimate,
+  LevinParts,
+  RatioAdjustment,
+  RatioWithLimits,
+  Sampling,
+} from './impact';
+export {
   ODDS_RATIO_INTERVALS,
   RISK_DIFFERENCE_INTERVALS,
   RISK_INTERVALS,
@@ -63,3 +80,25 @@ export {
   pearsonOfFourfold,
   pearsonOfTable,
 } from './tests-of-association';
+export {
+  RATE_DIFFERENCE_INTERVALS,
+  RATE_INTERVALS,
+  RATE_RATIO_INTERVALS,
+  RATE_STANDARDISATION,
+  issueOfRateRatioStratum,
+  pooledRateDifference,
+  pooledRateRatio,
+  rateDifferenceOf,
+  rateOf,
+  rateRatioOf,
+  standardisedRate,
+} from './rates';
+export type {
+  RateCount,
+  RateDifferenceIntervalId,
+  RateIntervalId,
+  RateRatioIntervalId,
+  RateStratum,
+  RateTable,
+  StandardisedStratum,
+} from './rates';

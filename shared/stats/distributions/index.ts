@@ -7,6 +7,7 @@
  */
 export { betaCumulative, betaQuantile } from './beta';
 export { chiSquareUpperTail } from './chi-square';
+export { gammaQuantile, gammaUpperQuantile } from './gamma';
 export {
   hypergeometricProbability,
   hypergeometricSupport,

@@ -15,6 +15,8 @@ export const REASON_SLOTS = {
   'issue.invalidCounts': [],
   'issue.invalidLevel': [],
   'issue.tooLarge': [],
+  'issue.noEvents': [],
+  'issue.adjustedInCrudeFormula': [],
   'issue.addressNotInResult': [],
   'issue.infinite': [],
   'issue.columnMissing': ['role'],

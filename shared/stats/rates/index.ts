@@ -1,0 +1,11 @@
+export { RATE_DIFFERENCE_INTERVALS } from './difference';
+export type { RateDifferenceIntervalId } from './difference';
+export { RATE_INTERVALS } from './one-rate';
+export type { RateIntervalId } from './one-rate';
+export { issueOfRateRatioStratum, pooledRateDifference, pooledRateRatio } from './pooled-rates';
+export { rateDifferenceOf, rateOf, rateRatioOf } from './rate-count';
+export type { RateCount, RateStratum, RateTable } from './rate-count';
+export { RATE_RATIO_INTERVALS } from './ratio';
+export type { RateRatioIntervalId } from './ratio';
+export { RATE_STANDARDISATION, standardisedRate } from './standardised-rate';
+export type { StandardisedStratum } from './standardised-rate';
