@@ -140,14 +140,18 @@ function estimateAt(
   return contrast?.measures[id];
 }
 
-/** The fraction behind a contrast's estimate; null for pooled ones, which are sums of fractions. */
+/**
+ * The fraction behind a contrast's estimate; null for pooled ones, which are sums of fractions, and
+ * for a method with its own point estimate.
+ */
 function exactOf(
   id: EffectMeasureId,
   result: AnalysisResult,
   address: ValueAddress,
 ): Quantity | null {
   const table = contrastTable(layerAt(result, address.scope), address.levelId);
-  const fraction = table ? EFFECT_MEASURES[id].fraction(table) : null;
+  const methodId = result.specification.methods[id];
+  const fraction = table ? EFFECT_MEASURES[id].fraction(table, methodId) : null;
   return fraction && { kind: 'fraction', ...fraction };
 }
 

@@ -45,8 +45,11 @@ export interface EffectMeasure {
     intervalId: string,
     level: number,
   ): Result<Estimate, EstimationIssue>;
-  /** The estimate as a fraction of whole numbers; null where their products pass 2^53. */
-  fraction(table: FourfoldTable): ExactFraction | null;
+  /**
+   * The sample's value as a fraction of whole numbers; null where their products pass 2^53, and
+   * where the interval method of that id has its own point estimate, which is no fraction.
+   */
+  fraction(table: FourfoldTable, intervalId?: string): ExactFraction | null;
   /** Mantel–Haenszel estimate over strata. */
   pooled(strata: StratifiedTable, level: number): Result<Estimate, EstimationIssue>;
   /** The strata that tell nothing about the pooled estimate, and why. */

@@ -23,7 +23,8 @@ export function makeMeasure(parts: MeasureParts): EffectMeasure {
     nullValue: NULL_VALUES[parts.scale],
     estimate: (table, intervalId, level) =>
       estimateBy(methodOf(parts, intervalId), valueOf, table, level),
-    fraction: (table) => safeFraction(fractionOf(table)),
+    fraction: (table, intervalId) =>
+      parts.intervals[intervalId ?? '']?.pointOf ? null : safeFraction(fractionOf(table)),
     uninformative: (strata) => partStrata(strata, issueOfStratum).leftOut,
     reverse: REVERSES[parts.scale],
   };
@@ -46,7 +47,8 @@ function estimateBy(
   level: number,
 ): Result<Estimate, EstimationIssue> {
   const interval = method.interval(table, level);
-  return interval.ok ? success({ value: valueOf(table), interval: interval.value }) : interval;
+  const pointOf = method.pointOf ?? valueOf;
+  return interval.ok ? success({ value: pointOf(table), interval: interval.value }) : interval;
 }
 
 function safeFraction({ numerator, denominator }: ExactFraction): ExactFraction | null {

@@ -120,15 +120,20 @@ function evidence(layer: LayerResult, contrast: AnyContrast): Evidence {
   const testQuantity = table && isSparse(table) ? 'fisher' : 'pearson';
   return {
     measures: contrast.measures,
-    exact: exactValues(table),
+    exact: exactValues(table, contrast),
     test: contrast[testQuantity],
     testQuantity,
   };
 }
 
-function exactValues(table: FourfoldTable | undefined): Claim['exact'] {
+function exactValues(
+  table: FourfoldTable | undefined,
+  { measures }: ContrastResult,
+): Claim['exact'] {
   const exact = (id: EffectMeasureId): Claim['exact'][EffectMeasureId] => {
-    const fraction = table ? EFFECT_MEASURES[id].fraction(table) : null;
+    const estimate = measures[id];
+    const intervalId = estimate.ok ? estimate.value.interval.method : undefined;
+    const fraction = table ? EFFECT_MEASURES[id].fraction(table, intervalId) : null;
     return fraction && { kind: 'fraction', ...fraction };
   };
   return {

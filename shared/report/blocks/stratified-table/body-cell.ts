@@ -12,7 +12,7 @@ import {
 } from '#shared/format';
 import type { EstimateText, NumberText } from '#shared/format';
 import type { TableBodyCell } from '#shared/layout';
-import type { GroupCount } from '#shared/stats';
+import type { Estimate, GroupCount } from '#shared/stats';
 import { cellNumber, numbersRun, wordsCell, wordsRun } from '../table-cells';
 import type { CountedLayer } from './counted-layer';
 import type { TableColumnId } from './table-plan';
@@ -109,7 +109,7 @@ function effectCell(
   const contrast = layer.contrasts.find(({ indexLevelId }) => indexLevelId === levelId);
   const estimate = contrast?.measures[measure];
   if (estimate?.ok !== true) return missingCell(3, setting);
-  const exact = exactOf(measure, layer, levelId);
+  const exact = exactOf(measure, layer, levelId, estimate.value);
   const { decimals, houseStyle } = setting;
   const printed = formatEstimate(
     measure,
@@ -163,10 +163,16 @@ function numbersCell(
 }
 
 /** Pooled estimates are sums over strata: no single fraction stands behind them. */
-function exactOf(measure: EffectMeasureId, layer: CountedLayer, levelId: string): Quantity | null {
+function exactOf(
+  measure: EffectMeasureId,
+  layer: CountedLayer,
+  levelId: string,
+  { interval }: Estimate,
+): Quantity | null {
   if (layer.scope.kind === 'pooled') return null;
   const table = contrastTable(layer.counts, levelId);
-  const fraction = table === undefined ? null : EFFECT_MEASURES[measure].fraction(table);
+  const fraction =
+    table === undefined ? null : EFFECT_MEASURES[measure].fraction(table, interval.method);
   return fraction && { kind: 'fraction', ...fraction };
 }
 

@@ -8,8 +8,8 @@ import { oddsRatioMethod } from './odds-ratio-method';
  * correction.
  *
  * Takes events and totals of two independent groups; gives ratios, with lower limit 0 when the
- * estimate is 0. A zero cell that makes the estimate infinite gives `zeroCell`, an empty group
- * `emptyGroup`.
+ * estimate is 0. A zero cell that makes the estimate infinite gives `zeroCell` with the lower limit
+ * as `atLeast`, an empty group `emptyGroup`.
  *
  * Source: Cornfield (1956) Proceedings of the Third Berkeley Symposium 4:135-148.
  * Example: 28/51 against 71/230 at level 0.95 gives 1.476 to 5.035.

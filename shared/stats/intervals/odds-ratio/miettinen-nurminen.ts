@@ -9,8 +9,8 @@ import { oddsRatioMethod } from './odds-ratio-method';
  * N / (N - 1) in the variance.
  *
  * Takes events and totals of two independent groups; gives ratios, with lower limit 0 when the
- * estimate is 0. A zero cell that makes the estimate infinite gives `zeroCell`, an empty group
- * `emptyGroup`.
+ * estimate is 0. A zero cell that makes the estimate infinite gives `zeroCell` with the lower limit
+ * as `atLeast`, an empty group `emptyGroup`.
  *
  * Source: Miettinen and Nurminen (1985) Statistics in Medicine 4:213-226.
  * Example: 9/13 against 4/14 at level 0.95 gives 1.0934 to 28.9419.

@@ -1,4 +1,4 @@
-import { cellsOf, issueOfTable } from '../../check-counts';
+import { cellsOf, issueOfTable, marginsOf } from '../../check-counts';
 import type { EstimationIssue } from '../../estimate';
 import type { FourfoldTable } from '../../fourfold-table';
 import { intervalMethod } from '../interval-method';
@@ -12,14 +12,13 @@ export function oddsRatioMethod<Id extends string>(
   return intervalMethod(issueOf, parts);
 }
 
-/** Why a table gives no finite odds ratio: an empty group, or a zero cell below the line. */
+/** Why a table tells nothing of an odds ratio: an empty group, or events in nobody or in all. */
 export function issueOfOddsRatio(table: FourfoldTable): EstimationIssue | null {
-  const cells = cellsOf(table);
-  const infinite = cells.indexOthers === 0 || cells.referenceEvents === 0;
-  return issueOfTable(table) ?? (infinite ? { code: 'zeroCell' } : null);
+  const { events, others } = marginsOf(table);
+  return issueOfTable(table) ?? (events === 0 || others === 0 ? { code: 'zeroCell' } : null);
 }
 
-/** The odds ratio's issue, or that of any other zero cell. */
+/** The odds ratio's issue, or that of any zero cell. */
 export function issueOfLogOddsRatio(table: FourfoldTable): EstimationIssue | null {
   const anyZero = Object.values(cellsOf(table)).includes(0);
   return issueOfTable(table) ?? (anyZero ? { code: 'zeroCell' } : null);

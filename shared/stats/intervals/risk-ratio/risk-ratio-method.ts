@@ -12,15 +12,19 @@ export function riskRatioMethod<Id extends string>(
   return intervalMethod(issueOf, parts);
 }
 
-/** Why a table gives no finite risk ratio: an empty group, or a reference without events. */
+/** Why a table tells nothing of a risk ratio: an empty group, or no events at all. */
 export function issueOfRiskRatio(table: FourfoldTable): EstimationIssue | null {
-  const withoutEvents = table.reference.events === 0;
-  return issueOfTable(table) ?? (withoutEvents ? zeroCell('reference') : null);
+  const noEvents = table.index.events + table.reference.events === 0;
+  return issueOfTable(table) ?? (noEvents ? zeroCell('reference') : null);
 }
 
-/** The risk ratio's issue, or that of an index group without events. */
+/** The risk ratio's issue, or that of either group without events. */
 export function issueOfLogRiskRatio(table: FourfoldTable): EstimationIssue | null {
-  return issueOfRiskRatio(table) ?? (table.index.events === 0 ? zeroCell('index') : null);
+  return (
+    issueOfTable(table) ??
+    (table.reference.events === 0 ? zeroCell('reference') : null) ??
+    (table.index.events === 0 ? zeroCell('index') : null)
+  );
 }
 
 function zeroCell(group: string): EstimationIssue {

@@ -21,15 +21,16 @@ const FARTHEST = 60;
 
 /**
  * Every ratio that the score statistic does not refuse, sought on the log scale. The score takes
- * the logarithm of the tested ratio and is decreasing in it; a ratio of 0 has the lower limit 0.
+ * the logarithm of the tested ratio and is decreasing in it; a ratio of 0 has the lower limit 0, an
+ * infinite one the upper limit infinity.
  */
 export function limitsOfRatio(
   ratio: number,
   score: (logRatio: number) => number,
   z: number,
 ): Limits {
-  const start = ratio === 0 ? -FARTHEST : Math.log(ratio);
-  const lower = zeroOfDecreasing((tested) => score(tested) - z, -FARTHEST, start);
-  const upper = zeroOfDecreasing((tested) => score(tested) + z, start, FARTHEST);
-  return [ratio === 0 ? 0 : Math.exp(lower), Math.exp(upper)];
+  const start = Math.max(-FARTHEST, Math.min(FARTHEST, Math.log(ratio)));
+  const lower = (): number => zeroOfDecreasing((tested) => score(tested) - z, -FARTHEST, start);
+  const upper = (): number => zeroOfDecreasing((tested) => score(tested) + z, start, FARTHEST);
+  return [ratio === 0 ? 0 : Math.exp(lower()), ratio === Infinity ? ratio : Math.exp(upper())];
 }
