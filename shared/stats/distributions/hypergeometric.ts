@@ -72,7 +72,7 @@ const STIRLING_ERRORS: readonly number[] = Array.from({ length: 32 }, (_, n) =>
 );
 
 /** x log(x / mean) + mean - x, without cancellation where x is near the mean. */
-function deviance(x: number, mean: number): number {
+export function deviance(x: number, mean: number): number {
   const difference = x - mean;
   if (Math.abs(difference) >= 0.1 * (x + mean)) {
     return x * Math.log(x / mean) + mean - x;

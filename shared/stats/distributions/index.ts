@@ -6,6 +6,8 @@
  * probability after Loader, because differences of log-gammas lose digits in large tables.
  */
 export { betaCumulative, betaQuantile } from './beta';
+export { binomialTerms } from './binomial-terms';
+export type { BinomialTerms, CountRange } from './binomial-terms';
 export { chiSquareUpperTail } from './chi-square';
 export { gammaQuantile, gammaUpperQuantile } from './gamma';
 export {

@@ -1,28 +1,84 @@
 const MOST_STEPS = 200;
 
+/** Two places around a zero: the function is above zero at one and not at the other. */
+interface Bracket {
+  readonly newest: number;
+  readonly newestValue: number;
+  readonly opposite: number;
+  readonly oppositeValue: number;
+}
+
 /**
- * Where a decreasing function passes zero, between two ends, to the last bit of a double.
+ * Where a decreasing function passes zero, between two ends, to the last bits of a double.
  *
  * Gives the end when the function does not change sign inside: the function's zero then lies on or
- * beyond that end.
+ * beyond that end. Steps are bisections, or inverse quadratic interpolations where those are safe,
+ * so that about ten evaluations do; jumps and infinite values are borne.
+ * Source: Chandrupatla (1997) Advances in Engineering Software 28:145-149.
  */
 export function zeroOfDecreasing(
   valueAt: (x: number) => number,
   lower: number,
   upper: number,
 ): number {
-  let below = lower;
-  let above = upper;
+  const ends = endsOf(valueAt, lower, upper);
+  if (typeof ends === 'number') {
+    return ends;
+  }
+  let bracket = ends;
+  let part = 0.5;
   for (let step = 0; step < MOST_STEPS; step += 1) {
-    const middle = below + (above - below) / 2;
-    if (middle === below || middle === above) {
+    const { newest, newestValue, opposite, oppositeValue } = bracket;
+    const width = opposite - newest;
+    const x = newest + part * width;
+    if (x === newest || x === opposite) {
       break;
     }
-    if (valueAt(middle) > 0) {
-      below = middle;
-    } else {
-      above = middle;
-    }
+    const value = valueAt(x);
+    const staysOnSide = value > 0 === newestValue > 0;
+    const [left, leftValue] = staysOnSide ? [newest, newestValue] : [opposite, oppositeValue];
+    bracket = staysOnSide
+      ? { newest: x, newestValue: value, opposite, oppositeValue }
+      : { newest: x, newestValue: value, opposite: newest, oppositeValue: newestValue };
+    part = nextPart(bracket, left, leftValue);
   }
-  return below === lower ? lower : above;
+  return nearest(bracket);
+}
+
+function endsOf(
+  valueAt: (x: number) => number,
+  lower: number,
+  upper: number,
+): Bracket | number {
+  const atLower = valueAt(lower);
+  if (!(atLower > 0) || lower === upper) {
+    return lower;
+  }
+  const atUpper = valueAt(upper);
+  return atUpper > 0
+    ? upper
+    : { newest: upper, newestValue: atUpper, opposite: lower, oppositeValue: atLower };
+}
+
+/** How far to go from the newest place towards the opposite one. */
+function nextPart(
+  { newest, newestValue, opposite, oppositeValue }: Bracket,
+  left: number,
+  leftValue: number,
+): number {
+  const places = (newest - opposite) / (left - opposite);
+  const values = (newestValue - oppositeValue) / (leftValue - oppositeValue);
+  const least = Math.min(0.5, (4e-16 * Math.abs(newest)) / Math.abs(opposite - newest));
+  const safe = values * values < places && (1 - values) * (1 - values) < 1 - places;
+  const part = safe
+    ? (newestValue / (oppositeValue - newestValue)) * (leftValue / (oppositeValue - leftValue)) +
+      ((left - newest) / (opposite - newest)) *
+        (newestValue / (leftValue - newestValue)) *
+        (oppositeValue / (leftValue - oppositeValue))
+    : 0.5;
+  return Number.isFinite(part) ? Math.max(least, Math.min(1 - least, part)) : 0.5;
+}
+
+function nearest({ newest, newestValue, opposite, oppositeValue }: Bracket): number {
+  return Math.abs(newestValue) < Math.abs(oppositeValue) ? newest : opposite;
 }
