@@ -1,12 +1,13 @@
 import {
+  ODDS_RATIO_HOMOGENEITIES,
   ODDS_RATIO_INTERVALS,
   RISK_DIFFERENCE_INTERVALS,
   RISK_INTERVALS,
   RISK_RATIO_INTERVALS,
   cochranArmitage,
   cochranMantelHaenszel,
+  eValue,
   fisherOfFourfold,
-  oddsRatioHomogeneity,
   oddsRatioOf,
   pearsonOfTable,
   pooledOddsRatio,
@@ -19,8 +20,10 @@ import type {
   Estimate,
   FourfoldTable,
   GroupCount,
+  HomogeneityMethod,
   Interval,
   IntervalMethod,
+  RatioWithLimits,
   StratifiedTable,
   TestOutcome,
 } from '#shared/stats';
@@ -66,9 +69,11 @@ const READERS: Readonly<Record<string, Read>> = {
   ),
   ...testOf('cochranMantelHaenszel', (one) => cochranMantelHaenszel(strataOf(one))),
   ...correctedTest((one) => cochranMantelHaenszel(strataOf(one), 'half')),
-  ...testOf('breslowDayTarone', (one) => oddsRatioHomogeneity(strataOf(one)).outcome),
+  ...homogeneityOf(ODDS_RATIO_HOMOGENEITIES),
   ...estimateOf('pooledOddsRatio', (one) => pooledOddsRatio(strataOf(one), 0.95)),
   ...estimateOf('pooledRiskRatio', (one) => pooledRiskRatio(strataOf(one), 0.95)),
+  'eValue.ofValue': (one) => [valueOf(eValue(ratioOf(one))).ofValue],
+  'eValue.ofLimit': (one) => [valueOf(eValue(ratioOf(one))).ofLimit],
   'pooledRiskDifference.value': (one) =>
     estimate(pooledRiskDifference(strataOf(one), 0.95)).slice(0, 1),
   'pooledRiskDifference.satoLimits': (one) =>
@@ -100,6 +105,13 @@ function testOf(
     [`${name}.pValue`]: (one) => [valueOf(test(one)).pValue],
     [`${name}.statisticAndP`]: (one) => outcome(test(one)),
   };
+}
+
+function homogeneityOf(methods: Readonly<Record<string, HomogeneityMethod>>): Record<string, Read> {
+  const readers = Object.entries(methods).map(([id, method]) =>
+    testOf(id, (one) => method.test(strataOf(one)).outcome),
+  );
+  return Object.assign({}, ...readers) as Record<string, Read>;
 }
 
 function correctedTest(
@@ -149,6 +161,12 @@ export function valueOf<Value>(result: Result<Value, unknown>): Value {
 function groupOf({ counts }: ReferenceCase): GroupCount {
   const [events = 0, total = 0] = (counts ?? []) as readonly number[];
   return { events, total };
+}
+
+/** A ratio with its limits stands where counts stand elsewhere. */
+function ratioOf({ counts }: ReferenceCase): RatioWithLimits {
+  const [value = 0, lower = 0, upper = 0] = (counts ?? []) as readonly number[];
+  return { value, lower, upper };
 }
 
 function rowsOf({ counts }: ReferenceCase): readonly (readonly number[])[] {

@@ -74,13 +74,10 @@ function usedStrata(
 
 function ratioPoint(used: readonly RateTable[]): PooledPoint {
   const numerator = sumOver(used, (table) => table.index.events * referenceShare(table));
-  const denominator = sumOver(
-    used,
-    (table) => table.reference.events * (1 - referenceShare(table)),
-  );
+  const denominator = sumOver(used, (table) => table.reference.events * indexShare(table));
   const spread = sumOver(used, (table) => {
-    const share = referenceShare(table);
-    return (table.index.events + table.reference.events) * share * (1 - share);
+    const events = table.index.events + table.reference.events;
+    return events * indexShare(table) * referenceShare(table);
   });
   return { value: numerator / denominator, variance: spread / numerator / denominator };
 }
@@ -94,6 +91,10 @@ function differencePoint(used: readonly RateTable[]): PooledPoint {
     return (weightOf(table) / weights) ** 2 * part;
   });
   return { value, variance };
+}
+
+function indexShare({ index, reference }: RateTable): number {
+  return index.time / (index.time + reference.time);
 }
 
 function referenceShare({ index, reference }: RateTable): number {

@@ -33,7 +33,7 @@ export const RATE_STANDARDISATION = {
  *
  * Takes events, person-time and standard weight by stratum; gives events per unit of that time.
  * A weighted stratum without person-time gives `emptyGroup` with its id (the standard would not be
- * kept), weights that sum to nothing `noInformativeStratum`. Without events: 0, with an upper limit.
+ * kept), weights that sum to nothing `noInformativeStratum`. Without events: 0 and an upper limit.
  *
  * Source: Fay and Feuer (1997) Statistics in Medicine 16:791-801.
  */
