@@ -3,8 +3,10 @@ import type {
   Estimate,
   EstimationIssue,
   FourfoldTable,
+  HomogeneityMethod,
   HomogeneityTest,
   IntervalMethod,
+  PoolingMethod,
   StratifiedTable,
   UnusedStratum,
 } from '#shared/stats';
@@ -50,12 +52,28 @@ export interface EffectMeasure {
    * where the interval method of that id has its own point estimate, which is no fraction.
    */
   fraction(table: FourfoldTable, intervalId?: string): ExactFraction | null;
-  /** Mantel–Haenszel estimate over strata. */
-  pooled(strata: StratifiedTable, level: number): Result<Estimate, EstimationIssue>;
+  /** Ways to pool the measure over strata by id, in the order in which they are offered. */
+  readonly poolings: Readonly<Record<string, PoolingMethod>>;
+  readonly defaultPoolingId: string;
+  /**
+   * The pooled estimate over strata, by the default way unless another of `poolings` is named. One
+   * that is not there is a bug; whether one is, `hasPooling` says.
+   */
+  pooled(
+    strata: StratifiedTable,
+    level: number,
+    poolingId?: string,
+  ): Result<Estimate, EstimationIssue>;
   /** The strata that tell nothing about the pooled estimate, and why. */
-  uninformative(strata: StratifiedTable): readonly UnusedStratum[];
-  /** Whether the measure is the same in all strata. */
-  homogeneity(strata: StratifiedTable): HomogeneityTest;
+  uninformative(strata: StratifiedTable, poolingId?: string): readonly UnusedStratum[];
+  /** Tests of homogeneity over strata by id, in the order in which they are offered. */
+  readonly homogeneities: Readonly<Record<string, HomogeneityMethod>>;
+  readonly defaultHomogeneityId: string;
+  /**
+   * Whether the measure is the same in all strata, by the default test unless another of
+   * `homogeneities` is named. One that is not there is a bug; `hasHomogeneity` says.
+   */
+  homogeneity(strata: StratifiedTable, homogeneityId?: string): HomogeneityTest;
   /** The estimate with index and reference exchanged; a ratio of 0 has none: `zeroCell`. */
   reverse(estimate: Estimate): Result<Estimate, EstimationIssue>;
 }

@@ -15,3 +15,13 @@ export const EFFECT_MEASURES: Readonly<Record<EffectMeasureId, EffectMeasure>> =
 export function hasInterval(measureId: EffectMeasureId, intervalId: string): boolean {
   return Object.hasOwn(EFFECT_MEASURES[measureId].intervals, intervalId);
 }
+
+/** Whether a measure can be pooled over strata in this way. */
+export function hasPooling(measureId: EffectMeasureId, poolingId: string): boolean {
+  return Object.hasOwn(EFFECT_MEASURES[measureId].poolings, poolingId);
+}
+
+/** Whether a measure has a test of homogeneity of this id. */
+export function hasHomogeneity(measureId: EffectMeasureId, homogeneityId: string): boolean {
+  return Object.hasOwn(EFFECT_MEASURES[measureId].homogeneities, homogeneityId);
+}

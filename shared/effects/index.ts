@@ -1,5 +1,5 @@
 export type { EffectMeasure, EffectScale, ExactFraction } from './effect-measure';
-export { EFFECT_MEASURES, hasInterval } from './effect-measures';
+export { EFFECT_MEASURES, hasHomogeneity, hasInterval, hasPooling } from './effect-measures';
 export { EFFECT_MEASURE_IDS } from './measure-ids';
 export type { EffectMeasureId } from './measure-ids';
 export { numberNeeded } from './number-needed';

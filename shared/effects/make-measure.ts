@@ -4,38 +4,47 @@ import { partStrata } from '#shared/stats';
 import type { Estimate, EstimationIssue, FourfoldTable, IntervalMethod } from '#shared/stats';
 import type { EffectMeasure, EffectScale, ExactFraction } from './effect-measure';
 
-/** What a measure's file states; the rest follows from its scale. */
+/** What a measure's file states; the rest follows from its scale and its registers. */
 export interface MeasureParts extends Omit<
   EffectMeasure,
-  'nullValue' | 'estimate' | 'fraction' | 'reverse' | 'uninformative'
+  'nullValue' | 'estimate' | 'fraction' | 'reverse' | 'pooled' | 'uninformative' | 'homogeneity'
 > {
   readonly valueOf: (table: FourfoldTable) => number;
   readonly fractionOf: (table: FourfoldTable) => ExactFraction;
-  /** Why a stratum tells nothing about the pooled estimate, or null. */
-  readonly issueOfStratum: (table: FourfoldTable) => EstimationIssue | null;
 }
 
 /** Makes a measure of its parts. */
 export function makeMeasure(parts: MeasureParts): EffectMeasure {
-  const { valueOf, fractionOf, issueOfStratum, ...stated } = parts;
+  const { valueOf, fractionOf, ...stated } = parts;
+  const { intervals, poolings, homogeneities, id } = parts;
   return {
     ...stated,
     nullValue: NULL_VALUES[parts.scale],
     estimate: (table, intervalId, level) =>
-      estimateBy(methodOf(parts, intervalId), valueOf, table, level),
-    fraction: (table, intervalId) =>
-      parts.intervals[intervalId ?? '']?.pointOf ? null : safeFraction(fractionOf(table)),
-    uninformative: (strata) => partStrata(strata, issueOfStratum).leftOut,
+      estimateBy(memberOf(intervals, intervalId, id), valueOf, table, level),
+    fraction: (table) => safeFraction(fractionOf(table)),
+    pooled: (strata, level, poolingId = parts.defaultPoolingId) =>
+      memberOf(poolings, poolingId, id).pooled(strata, level),
+    uninformative: (strata, poolingId = parts.defaultPoolingId) => {
+      const pooling = memberOf(poolings, poolingId, id);
+      return partStrata(strata, (table) => pooling.issueOfStratum(table)).leftOut;
+    },
+    homogeneity: (strata, homogeneityId = parts.defaultHomogeneityId) =>
+      memberOf(homogeneities, homogeneityId, id).test(strata),
     reverse: REVERSES[parts.scale],
   };
 }
 
 const NULL_VALUES: Readonly<Record<EffectScale, number>> = { difference: 0, ratio: 1 };
 
-function methodOf(parts: MeasureParts, intervalId: string): IntervalMethod<FourfoldTable> {
-  const method = Object.hasOwn(parts.intervals, intervalId) ? parts.intervals[intervalId] : null;
-  if (!method) {
-    throw new Error(`No interval method ${intervalId} for ${parts.id}`);
+function memberOf<Method>(
+  register: Readonly<Record<string, Method>>,
+  methodId: string,
+  measureId: string,
+): Method {
+  const method = Object.hasOwn(register, methodId) ? register[methodId] : undefined;
+  if (method === undefined) {
+    throw new Error(`No method ${methodId} for ${measureId}`);
   }
   return method;
 }

@@ -56,21 +56,29 @@ export { oddsRatioOf, riskDifferenceOf, riskRatioOf } from './point-estimates';
 export { POOLING_METHODS, TEST_METHODS } from './method-words';
 export type { PoolingMethodId, TestMethodId } from './method-words';
 export {
+  ODDS_RATIO_HOMOGENEITIES,
+  POOLED_ODDS_RATIOS,
+  POOLED_RISK_DIFFERENCES,
+  POOLED_RISK_RATIOS,
+  RISK_DIFFERENCE_HOMOGENEITIES,
+  RISK_RATIO_HOMOGENEITIES,
   cochranMantelHaenszel,
   issueOfOddsRatioStratum,
   issueOfRiskRatioStratum,
-  oddsRatioHomogeneity,
   partStrata,
   pooledOddsRatio,
   pooledRiskDifference,
   pooledRiskRatio,
-  riskDifferenceHomogeneity,
-  riskRatioHomogeneity,
 } from './stratified';
 export type {
   ContinuityCorrection,
+  HomogeneityMethod,
   HomogeneityTest,
   PooledDifferenceVariance,
+  PooledOddsRatioId,
+  PooledRiskDifferenceId,
+  PooledRiskRatioId,
+  PoolingMethod,
   StrataUsed,
   UnusedStratum,
 } from './stratified';

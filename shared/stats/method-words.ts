@@ -1,4 +1,11 @@
 import type { MethodWords } from './intervals';
+import {
+  ODDS_RATIO_HOMOGENEITIES,
+  POOLED_ODDS_RATIOS,
+  POOLED_RISK_DIFFERENCES,
+  POOLED_RISK_RATIOS,
+  RISK_DIFFERENCE_HOMOGENEITIES,
+} from './stratified';
 
 /** Names and sources of the tests, by the method that a `TestOutcome` names. */
 export const TEST_METHODS = {
@@ -35,21 +42,8 @@ export const TEST_METHODS = {
       'Mantel N, Haenszel W. Statistical aspects of the analysis of data from retrospective ' +
       'studies of disease. Journal of the National Cancer Institute 1959;22:719-748.',
   },
-  breslowDayTarone: {
-    id: 'breslowDayTarone',
-    label: "Breslow–Day test of homogeneity with Tarone's correction",
-    shortLabel: 'Breslow–Day–Tarone',
-    citation:
-      'Tarone RE. On heterogeneity tests based on efficient scores. Biometrika 1985;72:91-95.',
-  },
-  inverseVariance: {
-    id: 'inverseVariance',
-    label: 'Inverse-variance test of homogeneity',
-    shortLabel: 'inverse-variance Q',
-    citation:
-      'Cochran WG. The combination of estimates from different experiments. ' +
-      'Biometrics 1954;10:101-129.',
-  },
+  ...ODDS_RATIO_HOMOGENEITIES,
+  ...RISK_DIFFERENCE_HOMOGENEITIES,
 } as const satisfies Readonly<Record<string, MethodWords>>;
 
 /** Id of a test. */
@@ -57,30 +51,9 @@ export type TestMethodId = keyof typeof TEST_METHODS;
 
 /** Names and sources of the pooled estimates' variances, by the method that an interval names. */
 export const POOLING_METHODS = {
-  sato: {
-    id: 'sato',
-    label: "Mantel–Haenszel risk difference with Sato's variance",
-    shortLabel: 'Mantel–Haenszel (Sato)',
-    citation:
-      'Sato T. On the variance estimator for the Mantel–Haenszel risk difference. ' +
-      'Biometrics 1989;45:1323-1324.',
-  },
-  greenlandRobins: {
-    id: 'greenlandRobins',
-    label: 'Mantel–Haenszel with the variance of Greenland and Robins',
-    shortLabel: 'Mantel–Haenszel (Greenland–Robins)',
-    citation:
-      'Greenland S, Robins JM. Estimation of a common effect parameter from sparse follow-up ' +
-      'data. Biometrics 1985;41:55-68.',
-  },
-  robinsBreslowGreenland: {
-    id: 'robinsBreslowGreenland',
-    label: 'Mantel–Haenszel odds ratio with the variance of Robins, Breslow and Greenland',
-    shortLabel: 'Mantel–Haenszel (Robins–Breslow–Greenland)',
-    citation:
-      'Robins J, Breslow N, Greenland S. Estimators of the Mantel–Haenszel variance consistent ' +
-      'in both sparse data and large-strata limiting models. Biometrics 1986;42:311-323.',
-  },
+  ...POOLED_RISK_DIFFERENCES,
+  ...POOLED_RISK_RATIOS,
+  ...POOLED_ODDS_RATIOS,
 } as const satisfies Readonly<Record<string, MethodWords>>;
 
 /** Id of a pooled estimate's variance. */

@@ -3,13 +3,13 @@ import { productDifference } from './exact';
 import { RISK_DIFFERENCE_INTERVALS, RISK_INTERVALS, RISK_RATIO_INTERVALS } from './intervals';
 import { zeroOfDecreasing } from './intervals/score/bisection';
 import {
+  ODDS_RATIO_HOMOGENEITIES,
+  RISK_DIFFERENCE_HOMOGENEITIES,
+  RISK_RATIO_HOMOGENEITIES,
   cochranMantelHaenszel,
-  oddsRatioHomogeneity,
   pooledOddsRatio,
   pooledRiskDifference,
   pooledRiskRatio,
-  riskDifferenceHomogeneity,
-  riskRatioHomogeneity,
 } from './stratified';
 import { cochranArmitage, pearsonOfTable } from './tests-of-association';
 
@@ -76,7 +76,9 @@ describe('pooling at the ends', () => {
       expect(pooledRiskRatio(strata, 0.95)).toMatchObject({ issue: { code: 'zeroCell' } });
       expect(pooledOddsRatio(strata, 0.95)).toMatchObject({ issue: { code: 'zeroCell' } });
       expect(pooledRiskDifference(strata, 0.95).ok).toBe(true);
-      expect(oddsRatioHomogeneity(strata).outcome).toMatchObject({ issue: { code: 'zeroCell' } });
+      expect(ODDS_RATIO_HOMOGENEITIES.breslowDayTarone.test(strata).outcome).toMatchObject({
+        issue: { code: 'zeroCell' },
+      });
     }
   });
 
@@ -87,20 +89,19 @@ describe('pooling at the ends', () => {
       stratum('apart', 6, 6, 0, 9),
       stratum('without', 0, 8, 0, 9),
     ];
-    const difference = riskDifferenceHomogeneity(strata);
+    const difference = RISK_DIFFERENCE_HOMOGENEITIES.inverseVariance.test(strata);
     expect(difference.leftOut.map(({ stratumId, issue }) => [stratumId, issue.code])).toEqual([
       ['empty', 'emptyGroup'],
       ['apart', 'zeroCell'],
       ['without', 'zeroCell'],
     ]);
     expect(difference.outcome).toMatchObject({ issue: { code: 'fewerThanTwoStrata' } });
-    expect(riskRatioHomogeneity(strata).outcome).toMatchObject({
+    expect(RISK_RATIO_HOMOGENEITIES.inverseVariance.test(strata).outcome).toMatchObject({
       issue: { code: 'fewerThanTwoStrata' },
     });
-    expect(oddsRatioHomogeneity(strata).leftOut.map(({ issue }) => issue.code)).toEqual([
-      'emptyGroup',
-      'emptyMargin',
-    ]);
+    expect(
+      ODDS_RATIO_HOMOGENEITIES.breslowDayTarone.test(strata).leftOut.map(({ issue }) => issue.code),
+    ).toEqual(['emptyGroup', 'emptyMargin']);
   });
 
   it('takes impossible counts for an error, not for a stratum to leave out', () => {
@@ -109,7 +110,9 @@ describe('pooling at the ends', () => {
     expect(pooledRiskDifference(strata, 0.95)).toMatchObject(invalid);
     expect(pooledOddsRatio(strata, 0.95)).toMatchObject(invalid);
     expect(cochranMantelHaenszel(strata)).toMatchObject(invalid);
-    expect(riskDifferenceHomogeneity(strata).outcome).toMatchObject(invalid);
+    expect(RISK_DIFFERENCE_HOMOGENEITIES.inverseVariance.test(strata).outcome).toMatchObject(
+      invalid,
+    );
     expect(pooledRiskDifference(strata.slice(0, 1), 1)).toMatchObject({
       issue: { code: 'invalidLevel' },
     });

@@ -18,5 +18,5 @@ export function issueWords(issue: Issue<WordedIssueCode>, book: Phrasebook): str
   const facts = issue.facts ?? {};
   const slots: readonly string[] = PATTERN_SLOTS[key];
   const fillings = Object.fromEntries(slots.map((slot) => [slot, String(facts[slot] ?? '')]));
-  return fillWords(book, key, fillings as Record<'role', string>);
+  return fillWords(book, key, fillings as Record<'role' | 'stratum', string>);
 }

@@ -2,7 +2,8 @@ import type { Result } from '#shared/core';
 import { issueOfTable } from '../check-counts';
 import type { Estimate, EstimationIssue } from '../estimate';
 import { productDifference } from '../exact';
-import type { FourfoldTable, GroupCount, StratifiedTable } from '../fourfold-table';
+import type { FourfoldTable, StratifiedTable } from '../fourfold-table';
+import { varianceOfDifference } from '../variances';
 import { pooledDifference, pooledPoint } from './pooled-estimate';
 import { sizeOf, sumOver } from './strata-used';
 
@@ -74,10 +75,5 @@ function satoEventPart(table: FourfoldTable): number {
 
 function greenlandRobinsPart(table: FourfoldTable): number {
   const squaredWeight = weight(table) ** 2;
-  const { index, reference } = table;
-  return squaredWeight * (varianceOfRisk(index) + varianceOfRisk(reference));
-}
-
-function varianceOfRisk({ events, total }: GroupCount): number {
-  return ((events / total) * ((total - events) / total)) / total;
+  return squaredWeight * varianceOfDifference(table);
 }

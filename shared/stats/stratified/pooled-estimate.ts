@@ -24,6 +24,16 @@ export function pooledPoint(
   issueOf: (table: FourfoldTable) => EstimationIssue | null,
   point: (used: StratifiedTable) => PooledPoint,
 ): Result<PooledPoint, EstimationIssue> {
+  const informative = informativeStrata(strata, level, issueOf);
+  return informative.ok ? success(point(informative.value)) : informative;
+}
+
+/** The strata without an issue; or that of the level, of invalid counts, or of having none. */
+export function informativeStrata(
+  strata: StratifiedTable,
+  level: number,
+  issueOf: (table: FourfoldTable) => EstimationIssue | null,
+): Result<StratifiedTable, EstimationIssue> {
   const parted = partStrata(strata, issueOf);
   const issue = issueOfLevel(level) ?? invalidStratum(parted);
   if (issue) {
@@ -31,7 +41,7 @@ export function pooledPoint(
   }
   return parted.used.length === 0
     ? failure({ code: 'noInformativeStratum', facts: { strata: strata.length } })
-    : success(point(parted.used));
+    : success(parted.used);
 }
 
 /** A pooled difference with limits symmetric around it, cut to [-1, 1]. */

@@ -1,9 +1,8 @@
 import {
+  ODDS_RATIO_HOMOGENEITIES,
   ODDS_RATIO_INTERVALS,
-  issueOfOddsRatioStratum,
-  oddsRatioHomogeneity,
+  POOLED_ODDS_RATIOS,
   oddsRatioOf,
-  pooledOddsRatio,
 } from '#shared/stats';
 import { makeMeasure } from '../../make-measure';
 
@@ -21,7 +20,8 @@ export const oddsRatio = makeMeasure({
     numerator: index.events * (reference.total - reference.events),
     denominator: reference.events * (index.total - index.events),
   }),
-  issueOfStratum: issueOfOddsRatioStratum,
-  pooled: pooledOddsRatio,
-  homogeneity: oddsRatioHomogeneity,
+  poolings: POOLED_ODDS_RATIOS,
+  defaultPoolingId: 'robinsBreslowGreenland',
+  homogeneities: ODDS_RATIO_HOMOGENEITIES,
+  defaultHomogeneityId: 'breslowDayTarone',
 });

@@ -1,8 +1,7 @@
 import {
+  POOLED_RISK_DIFFERENCES,
+  RISK_DIFFERENCE_HOMOGENEITIES,
   RISK_DIFFERENCE_INTERVALS,
-  issueOfTable,
-  pooledRiskDifference,
-  riskDifferenceHomogeneity,
   riskDifferenceOf,
 } from '#shared/stats';
 import type { FourfoldTable } from '#shared/stats';
@@ -21,9 +20,10 @@ export const riskDifference = makeMeasure({
   givenBy: designGivesRisk,
   valueOf: riskDifferenceOf,
   fractionOf,
-  issueOfStratum: issueOfTable,
-  pooled: pooledRiskDifference,
-  homogeneity: riskDifferenceHomogeneity,
+  poolings: POOLED_RISK_DIFFERENCES,
+  defaultPoolingId: 'sato',
+  homogeneities: RISK_DIFFERENCE_HOMOGENEITIES,
+  defaultHomogeneityId: 'inverseVariance',
 });
 
 function fractionOf({ index, reference }: FourfoldTable): ExactFraction {

@@ -1,8 +1,7 @@
 import {
+  POOLED_RISK_RATIOS,
+  RISK_RATIO_HOMOGENEITIES,
   RISK_RATIO_INTERVALS,
-  issueOfRiskRatioStratum,
-  pooledRiskRatio,
-  riskRatioHomogeneity,
   riskRatioOf,
 } from '#shared/stats';
 import { makeMeasure } from '../../make-measure';
@@ -22,7 +21,8 @@ export const riskRatio = makeMeasure({
     numerator: index.events * reference.total,
     denominator: reference.events * index.total,
   }),
-  issueOfStratum: issueOfRiskRatioStratum,
-  pooled: pooledRiskRatio,
-  homogeneity: riskRatioHomogeneity,
+  poolings: POOLED_RISK_RATIOS,
+  defaultPoolingId: 'greenlandRobins',
+  homogeneities: RISK_RATIO_HOMOGENEITIES,
+  defaultHomogeneityId: 'inverseVariance',
 });
