@@ -174,6 +174,26 @@ const EXAMPLES: Readonly<Record<GuardId, Example>> = {
       },
     ],
   },
+  intervalAgainstTest: {
+    result: resultOf({
+      levels: ['no', 'yes'],
+      counts: [
+        [6, 40],
+        [14, 40],
+      ],
+    }),
+    found: [
+      {
+        place: { scope: crude, levelId: 'yes' },
+        facts: {
+          measureIds: ['riskRatio'],
+          method: 'pearsonChiSquare',
+          pValue: expect.closeTo(0.0388671, 6) as number,
+          largest: expect.closeTo(0.05, 12) as number,
+        },
+      },
+    ],
+  },
   levelsOutOfOrder: {
     result: resultOf({
       levels: ['0-39', '120+', '40-79', '80-119'],

@@ -3,6 +3,7 @@ import { allOrNoEvents } from './all-or-no-events';
 import { commonOutcome } from './common-outcome';
 import { emptyGroup } from './empty-group';
 import type { Guard, GuardContext, GuardPoint, GuardSeverity } from './guard';
+import { intervalAgainstTest } from './interval-against-test';
 import { levelsOutOfOrder } from './levels-out-of-order';
 import { noRiskByDesign } from './no-risk-by-design';
 import { oneLevelExposure } from './one-level-exposure';
@@ -25,6 +26,7 @@ export const GUARDS = {
   zeroCell,
   sparseCells,
   commonOutcome,
+  intervalAgainstTest,
   levelsOutOfOrder,
   orderedAsUnordered,
   stratumLeftOut,

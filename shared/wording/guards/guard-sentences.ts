@@ -2,6 +2,7 @@ import type { GuardId } from '#shared/analysis';
 import { fillWords } from '../phrasebook/fill-pattern';
 import { verbWords } from '../sentence/outcome';
 import { leftOutSentences } from '../print/left-out-notes';
+import { testMethod } from '../print/method-words';
 import { strataWords, termsOf } from '../print/print-context';
 import { countWords, type GuardFactsReader } from './guard-facts';
 
@@ -33,6 +34,7 @@ export const GUARD_SENTENCES: Readonly<Record<GuardId, GuardSentence>> = {
       smallest: reader.decimal('smallestExpected'),
     }),
   commonOutcome,
+  intervalAgainstTest,
   levelsOutOfOrder: (reader) =>
     fillWords(reader.context.book, 'guard.levelsOutOfOrder.sentence', {
       levels: reader.levels('levelIds'),
@@ -114,6 +116,21 @@ function commonOutcome(reader: GuardFactsReader): string {
     riskRatio: reader.measureValue('riskRatio', 'riskRatio'),
     ratio: reader.measureName('riskRatio'),
     excess: reader.wholePercent('excess'),
+  });
+}
+
+function intervalAgainstTest(reader: GuardFactsReader): string {
+  const { context, finding } = reader;
+  const { pValue, largest } = finding.facts;
+  const rejected = Number(pValue) < Number(largest);
+  const measures = reader.measures('measureIds').map((id) => reader.measureName(id));
+  const key = `guard.intervalAgainstTest.${rejected ? 'rejected' : 'kept'}` as const;
+  return fillWords(context.book, key, {
+    place: reader.place(),
+    level: reader.levelLabel(finding.place.levelId ?? ''),
+    test: reader.pValue('pValue'),
+    method: testMethod(reader.text('method')),
+    measures: measures.join(fillWords(context.book, 'list.andThe', {})),
   });
 }
 
