@@ -73,9 +73,7 @@ export function intervalMethod<Counts, Id extends string>(
       }
       const [lower, upper] = parts.limits(counts, criticalValue(level), level);
       const finite = Number.isFinite(lower) && Number.isFinite(upper);
-      return finite
-        ? success({ lower, upper, level, method: id })
-        : failure(unboundedIssue(lower));
+      return finite ? success({ lower, upper, level, method: id }) : failure(unboundedIssue(lower));
     },
   };
 }

@@ -1,4 +1,6 @@
 import { agrestiCaffo } from './agresti-caffo';
+import { agrestiMin } from './agresti-min';
+import { chanZhang } from './chan-zhang';
 import { miettinenNurminen } from './miettinen-nurminen';
 import { newcombe } from './newcombe';
 import { wald } from './wald';
@@ -9,6 +11,8 @@ export const RISK_DIFFERENCE_INTERVALS = {
   wald,
   agrestiCaffo,
   miettinenNurminen,
+  chanZhang,
+  agrestiMin,
 } as const;
 
 /** Id of an interval method for a risk difference. */

@@ -45,11 +45,7 @@ export function zeroOfDecreasing(
   return nearest(bracket);
 }
 
-function endsOf(
-  valueAt: (x: number) => number,
-  lower: number,
-  upper: number,
-): Bracket | number {
+function endsOf(valueAt: (x: number) => number, lower: number, upper: number): Bracket | number {
   const atLower = valueAt(lower);
   if (!(atLower > 0) || lower === upper) {
     return lower;

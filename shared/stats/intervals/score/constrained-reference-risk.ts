@@ -5,6 +5,9 @@ import type { FourfoldTable } from '../../fourfold-table';
 /** More steps than Newton's method, bisecting where it leaves the bracket, ever took. */
 const MOST_STEPS = 120;
 
+/** A Newton step this small, relative to the risk, leaves an error of about its square. */
+const SETTLED = 1e-8;
+
 /**
  * The maximum likelihood risk of the reference group when the index group's is larger by a given
  * difference within [-1, 1].
@@ -17,10 +20,10 @@ export function constrainedReferenceRisk(table: FourfoldTable, difference: numbe
   const cells = cellsOf(table);
   let lower = Math.max(0, -difference);
   let upper = Math.min(1, 1 - difference);
-  if (slopeAt(cells, lower, difference) <= 0) {
+  if (!risesAtLower(cells, lower, difference)) {
     return lower;
   }
-  if (slopeAt(cells, upper, difference) >= 0) {
+  if (!fallsAtUpper(cells, upper, difference)) {
     return upper;
   }
   let risk = inside(closedRoot(table, difference), lower, upper);
@@ -32,12 +35,24 @@ export function constrainedReferenceRisk(table: FourfoldTable, difference: numbe
       upper = risk;
     }
     const next = inside(risk + slope / steepnessAt(cells, risk, difference), lower, upper);
-    if (Math.abs(next - risk) <= 1e-16 * risk) {
+    const settled = Math.abs(next - risk) <= SETTLED * Math.min(next, 1 - next);
+    risk = next;
+    if (settled) {
       break;
     }
-    risk = next;
   }
   return risk;
+}
+
+/** Without a cell whose share is infinite there, the likelihood may be highest at the end. */
+function risesAtLower(cells: FourfoldCells, risk: number, difference: number): boolean {
+  const held = difference < 0 ? cells.indexEvents : cells.referenceEvents;
+  return held > 0 || slopeAt(cells, risk, difference) > 0;
+}
+
+function fallsAtUpper(cells: FourfoldCells, risk: number, difference: number): boolean {
+  const held = difference > 0 ? cells.indexOthers : cells.referenceOthers;
+  return held > 0 || slopeAt(cells, risk, difference) < 0;
 }
 
 /** A risk strictly between two, or else their middle. */

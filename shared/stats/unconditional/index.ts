@@ -1,0 +1,10 @@
+export { differences, logRatios } from './null-family';
+export type { NullFamily } from './null-family';
+export {
+  UNCONDITIONAL_CAP,
+  issueOfUnconditional,
+  unconditionalDifferenceLimits,
+  unconditionalRatioLimits,
+} from './unconditional-intervals';
+export { unconditionalLowerLimit, unconditionalPValue } from './unconditional-limit';
+export type { UnconditionalTest } from './unconditional-limit';

@@ -1,0 +1,153 @@
+import type { FourfoldTable } from '../fourfold-table';
+import { eitherExtreme, extremeTables, isSame } from './extreme-tables';
+import type { ExtremeSides, ExtremeTables } from './extreme-tables';
+import type { NullFamily } from './null-family';
+import { exceeds, gridSize, supremumOf } from './supremum';
+import type { NuisanceCurve } from './supremum';
+import { tailProbability } from './tail-probability';
+import type { TailProbability } from './tail-probability';
+
+/** How a tested value is judged: which tables are extreme, and how probable they may be. */
+export interface UnconditionalTest {
+  readonly family: NullFamily;
+  readonly sides: ExtremeSides;
+}
+
+/** Limits are found to this width of the tested value. */
+const NARROWEST = 1e-10;
+
+/** No stretch wider than this part of the range is left out unseen. */
+const FIRST_PARTS = 16;
+
+/** Binomial terms this far below the largest play no part in an interval. */
+const NEGLIGIBLE = 1e-25;
+
+/**
+ * The smallest tested value between two that is not refused: the first whose extreme tables have,
+ * at some reference risk, a probability above `tail`. With the largest value where all are refused.
+ *
+ * The p-value need not be monotone, so stretches are left out only when even the tables that are
+ * extreme at either end, at the most favourable risks of the whole stretch, stay below `tail`; or
+ * when the same tables are extreme throughout a short stretch, over which the p-value is smooth,
+ * and the parabola through three of its values stays below.
+ */
+export function unconditionalLowerLimit(
+  table: FourfoldTable,
+  test: UnconditionalTest,
+  [least, most]: readonly [number, number],
+  tail: number,
+): number {
+  const search = searchOf(table, test, tail);
+  const ends = Array.from({ length: FIRST_PARTS + 1 }, (_, part) =>
+    part === FIRST_PARTS ? most : least + ((most - least) * part) / FIRST_PARTS,
+  );
+  let from = search.placeAt(least);
+  for (const end of ends.slice(1)) {
+    const to = search.placeAt(end);
+    const found = firstAccepted(search, from, to);
+    if (found !== null) {
+      return found;
+    }
+    from = to;
+  }
+  return most;
+}
+
+/** The exact p-value of one tested value: the largest probability of its extreme tables. */
+export function unconditionalPValue(
+  table: FourfoldTable,
+  test: UnconditionalTest,
+  tested: number,
+): number {
+  const { placeAt, curveBetween, size } = searchOf(table, test, 1);
+  const place = placeAt(tested);
+  return Math.min(1, supremumOf(curveBetween(place, place), size));
+}
+
+/** A tested value and its extreme tables. */
+interface Place {
+  readonly tested: number;
+  readonly extreme: ExtremeTables;
+}
+
+interface Search {
+  readonly tail: number;
+  readonly size: number;
+  readonly placeAt: (tested: number) => Place;
+  /** An upper bound of the probability for every tested value between two places. */
+  readonly curveBetween: (from: Place, to: Place) => NuisanceCurve;
+}
+
+function searchOf(
+  { index, reference }: FourfoldTable,
+  test: UnconditionalTest,
+  tail: number,
+): Search {
+  const { family, sides } = test;
+  const probability = tailProbability(index.total, reference.total, NEGLIGIBLE);
+  return {
+    tail,
+    size: gridSize(Math.max(index.total, reference.total)),
+    placeAt(tested) {
+      const scoreOf = family.scoreAt(tested);
+      const observed = scoreOf(index.events, reference.events);
+      const bound = sides === 'both' ? Math.abs(observed) : observed;
+      const extreme = extremeTables(index.total, reference.total, scoreOf, bound, sides);
+      return { tested, extreme };
+    },
+    curveBetween: (from, to) => curveBetween(family, probability, from, to),
+  };
+}
+
+function curveBetween(
+  family: NullFamily,
+  probability: TailProbability,
+  from: Place,
+  to: Place,
+): NuisanceCurve {
+  const extreme = from === to ? from.extreme : eitherExtreme(from.extreme, to.extreme);
+  const [least, most] = family.referenceRisks(from.tested, to.tested);
+  return (place) => {
+    const reference = least + (most - least) * Math.sin((Math.PI / 2) * place) ** 2;
+    return probability(extreme, {
+      reference,
+      indexBelow: family.indexRisk(reference, to.tested),
+      indexAbove: family.indexRisk(reference, from.tested),
+    });
+  };
+}
+
+function firstAccepted(search: Search, from: Place, to: Place): number | null {
+  const { curveBetween: curve, size, tail } = search;
+  if (!exceeds(curve(from, to), size, tail)) {
+    return null;
+  }
+  if (to.tested - from.tested <= NARROWEST) {
+    const accepted = [from, to].some((place) => exceeds(curve(place, place), size, tail));
+    return accepted ? from.tested : null;
+  }
+  const middle = search.placeAt((from.tested + to.tested) / 2);
+  if (staysBelow(search, [from, middle, to])) {
+    return null;
+  }
+  return firstAccepted(search, from, middle) ?? firstAccepted(search, middle, to);
+}
+
+/** Whether a short stretch with the same extreme tables throughout has no accepted value. */
+function staysBelow(
+  { curveBetween: curve, size, tail }: Search,
+  places: readonly Place[],
+): boolean {
+  const [from, middle, to] = places as [Place, Place, Place];
+  const short = to.tested - from.tested <= 1 / (4 * size);
+  if (!short || ![middle, to].every((place) => isSame(from.extreme, place.extreme))) {
+    return false;
+  }
+  const [first, second, third] = places.map((place) => supremumOf(curve(place, place), size)) as [
+    number,
+    number,
+    number,
+  ];
+  const bend = Math.max(0, second - (first + third) / 2);
+  return Math.max(first, second, third) + bend <= tail;
+}
