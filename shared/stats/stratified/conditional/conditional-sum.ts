@@ -55,9 +55,7 @@ export function conditionalSum(
   support: ConditionalSupport,
 ): (logRatio: number) => ConditionalTails {
   const start = startingRatio(strata, support);
-  const run = strata
-    .map(({ table }) => noncentralRun(urnOf(table), Math.exp(start)))
-    .reduce(sumOfRuns);
+  const run = sumOfRuns(strata.map(({ table }) => noncentralRun(urnOf(table), Math.exp(start))));
   const logWeights = run.weights.map((weight) => Math.log(weight));
   return (logRatio) => tailsOf(run.first, logWeights, logRatio - start, support.observed);
 }

@@ -5,7 +5,7 @@ export interface WeightRun {
 }
 
 /** Weights below this share of the largest are cut off; tails that matter are far above. */
-const SMALLEST = 1e-150;
+const SMALLEST = 1e-75;
 
 /**
  * The weights of counts whose neighbours stand in a falling ratio, walked outwards from the mode.
@@ -54,28 +54,53 @@ function walk(steps: number, ratioOf: (step: number) => number): number[] {
   return weights;
 }
 
-/** The run of the sum of two independent counts, scaled and cut as every run. */
-export function sumOfRuns(one: WeightRun, other: WeightRun): WeightRun {
-  const sums = new Float64Array(one.weights.length + other.weights.length - 1);
-  one.weights.forEach((weight, place) => {
-    addMultiple(sums, place, other.weights, weight);
-  });
+/**
+ * The run of the sum of independent counts, scaled and cut as every run. Halves are summed apart,
+ * which multiplies runs of like length: half the work of adding one after another.
+ */
+export function sumOfRuns(runs: readonly WeightRun[]): WeightRun {
+  const [first] = runs;
+  if (first === undefined || runs.length === 1) {
+    return first ?? { first: 0, weights: Float64Array.of(1) };
+  }
+  const half = runs.length >> 1;
+  return sumOfTwo(sumOfRuns(runs.slice(0, half)), sumOfRuns(runs.slice(half)));
+}
+
+function sumOfTwo(one: WeightRun, other: WeightRun): WeightRun {
+  const isShorter = one.weights.length < other.weights.length;
+  const [shorter, longer] = isShorter ? [one, other] : [other, one];
+  const sums = new Float64Array(shorter.weights.length + longer.weights.length - 1);
+  for (let place = 0; place < shorter.weights.length; place += 1) {
+    addMultiple(sums.subarray(place), longer.weights, shorter.weights[place] as number);
+  }
   return cutEnds({ first: one.first + other.first, weights: sums });
 }
 
-function addMultiple(sums: Float64Array, at: number, weights: Float64Array, times: number): void {
+function addMultiple(sums: Float64Array, weights: Float64Array, times: number): void {
   for (let place = 0; place < weights.length; place += 1) {
-    sums[at + place] = (sums[at + place] as number) + times * (weights[place] as number);
+    sums[place] = (sums[place] as number) + times * (weights[place] as number);
   }
 }
 
 function cutEnds({ first, weights }: WeightRun): WeightRun {
-  const largest = weights.reduce((most, weight) => Math.max(most, weight), 0);
-  const kept = (weight: number): boolean => weight >= SMALLEST * largest;
-  const start = weights.findIndex(kept);
-  const end = weights.findLastIndex(kept);
-  return {
-    first: first + start,
-    weights: weights.slice(start, end + 1).map((weight) => weight / largest),
-  };
+  const largest = largestOf(weights);
+  const least = SMALLEST * largest;
+  let start = 0;
+  while ((weights[start] as number) < least) start += 1;
+  let end = weights.length;
+  while ((weights[end - 1] as number) < least) end -= 1;
+  const kept = weights.slice(start, end);
+  for (let place = 0; place < kept.length; place += 1) {
+    kept[place] = (kept[place] as number) / largest;
+  }
+  return { first: first + start, weights: kept };
+}
+
+function largestOf(weights: Float64Array): number {
+  let largest = 0;
+  for (const weight of weights) {
+    largest = weight > largest ? weight : largest;
+  }
+  return largest;
 }

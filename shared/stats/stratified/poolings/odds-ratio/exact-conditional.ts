@@ -13,7 +13,7 @@ import type { PoolingMethod } from '../pooling-method';
  *
  * Source: Gart (1970) Biometrika 57:471-475; Mehta, Patel and Gray (1985) Journal of the American
  * Statistical Association 80:969-973.
- * Example: 0/6 v 0/5, 3/6 v 0/6, 6/6 v 2/6, 5/6 v 6/6, 2/2 v 5/5 give 10.36 (1.0266 to 529.8).
+ * Example: 0/6 v 0/5, 3/6 v 0/6, 6/6 v 2/6, 5/6 v 6/6, 2/2 v 5/5 give 10.361 (1.077 to 531.5).
  */
 export const exactConditional = {
   id: 'exactConditional',
