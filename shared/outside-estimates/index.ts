@@ -1,0 +1,11 @@
+export { checkOutsideEstimate, crudeBeside, isRefused } from './check-beside';
+export { checkNumbers, readOutsideNumbers } from './check-numbers';
+export type { OutsideNumbers } from './check-numbers';
+export { OUTSIDE_FINDINGS } from './finding';
+export type { OutsideFinding, OutsideFindingId, OutsideFindingSeverity } from './finding';
+export { IMPORT_COLUMNS, isDay, readImportedRows } from './import-rows';
+export type { ImportedRow, ImportProblem, ImportProblemCode } from './import-rows';
+export { OUTSIDE_MEASURES, isSameModel, outsideNullValue } from './outside-estimate';
+export type { OutsideEstimate, OutsideEstimateEntry, OutsideMeasureId } from './outside-estimate';
+export { readPrintedNumber, readPrintedPValue } from './printed-number';
+export type { PrintedNumber, PrintedPValue } from './printed-number';
