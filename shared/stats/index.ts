@@ -110,3 +110,19 @@ export type {
   RateTable,
   StandardisedStratum,
 } from './rates';
+export {
+  MATCHED_ODDS_RATIO_INTERVALS,
+  PAIRED_DIFFERENCE_INTERVALS,
+  PAIRED_TESTS,
+  issueOfPairs,
+  matchedOddsRatioOf,
+  pairedDifferenceOf,
+  pairsOf,
+} from './pairs';
+export type {
+  MatchedOddsRatioIntervalId,
+  PairedDifferenceIntervalId,
+  PairedTable,
+  PairedTest,
+  PairedTestId,
+} from './pairs';

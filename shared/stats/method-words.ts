@@ -1,4 +1,5 @@
 import type { MethodWords } from './intervals';
+import { PAIRED_TESTS } from './pairs';
 import {
   ODDS_RATIO_HOMOGENEITIES,
   POOLED_ODDS_RATIOS,
@@ -44,6 +45,7 @@ export const TEST_METHODS = {
   },
   ...ODDS_RATIO_HOMOGENEITIES,
   ...RISK_DIFFERENCE_HOMOGENEITIES,
+  ...PAIRED_TESTS,
 } as const satisfies Readonly<Record<string, MethodWords>>;
 
 /** Id of a test. */

@@ -39,7 +39,8 @@ export function hypergeometricSupport(urn: Urn): { smallest: number; largest: nu
   };
 }
 
-function logBinomial(count: number, trials: number, share: number): number {
+/** Logarithm of the binomial probability, for a share strictly between 0 and 1. */
+export function logBinomial(count: number, trials: number, share: number): number {
   if (count === 0) {
     return trials === 0 ? 0 : trials * Math.log1p(-share);
   }

@@ -6,6 +6,7 @@
  * probability after Loader, because differences of log-gammas lose digits in large tables.
  */
 export { betaCumulative, betaQuantile } from './beta';
+export { binomialCumulative, binomialProbability } from './binomial';
 export { binomialTerms } from './binomial-terms';
 export type { BinomialTerms, CountRange } from './binomial-terms';
 export { chiSquareUpperTail } from './chi-square';

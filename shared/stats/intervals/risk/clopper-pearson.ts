@@ -1,4 +1,6 @@
 import { betaQuantile } from '../../distributions';
+import type { GroupCount } from '../../fourfold-table';
+import type { Limits } from '../interval-method';
 import { riskMethod } from './risk-method';
 
 /**
@@ -17,12 +19,15 @@ export const clopperPearson = riskMethod({
   citation:
     'Clopper CJ, Pearson ES. The use of confidence or fiducial limits illustrated in the case ' +
     'of the binomial. Biometrika 1934;26:404-413.',
-  limits({ events, total }, _z, level) {
-    const others = total - events;
-    const tail = (1 - level) / 2;
-    return [
-      events === 0 ? 0 : betaQuantile(tail, events, others + 1),
-      others === 0 ? 1 : betaQuantile(1 - tail, events + 1, others),
-    ];
-  },
+  limits: (count, _z, level) => clopperPearsonLimits(count, level),
 });
+
+/** Clopper and Pearson's limits of a non-empty group; other intervals build on them. */
+export function clopperPearsonLimits({ events, total }: GroupCount, level: number): Limits {
+  const others = total - events;
+  const tail = (1 - level) / 2;
+  return [
+    events === 0 ? 0 : betaQuantile(tail, events, others + 1),
+    others === 0 ? 1 : betaQuantile(1 - tail, events + 1, others),
+  ];
+}
