@@ -1,3 +1,5 @@
+export { ADJUSTMENTS, adjustPValues } from './adjustments';
+export type { Adjustment, AdjustmentId } from './adjustments';
 export { cellsOf, issueOfGroup, issueOfTable, marginsOf } from './check-counts';
 export type { FourfoldCells, FourfoldMargins } from './check-counts';
 export type { ContingencyTable, ScoredGroup } from './contingency-table';
@@ -52,6 +54,8 @@ export type {
   RiskIntervalId,
   RiskRatioIntervalId,
 } from './intervals';
+export { conditionalOddsRatioOf } from './conditional';
+export type { MethodEffort } from './method-effort';
 export { oddsRatioOf, riskDifferenceOf, riskRatioOf } from './point-estimates';
 export { POOLING_METHODS, TEST_METHODS } from './method-words';
 export type { PoolingMethodId, TestMethodId } from './method-words';
@@ -83,11 +87,14 @@ export type {
   UnusedStratum,
 } from './stratified';
 export {
+  FOURFOLD_TESTS,
   cochranArmitage,
   fisherOfFourfold,
   pearsonOfFourfold,
   pearsonOfTable,
 } from './tests-of-association';
+export type { FourfoldTest, FourfoldTestId } from './tests-of-association';
+export { allEventsLowerLimit, zeroEventsUpperLimit } from './zero-events-limit';
 export {
   RATE_DIFFERENCE_INTERVALS,
   RATE_INTERVALS,

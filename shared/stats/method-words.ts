@@ -7,26 +7,11 @@ import {
   POOLED_RISK_RATIOS,
   RISK_DIFFERENCE_HOMOGENEITIES,
 } from './stratified';
+import { FOURFOLD_TESTS } from './tests-of-association';
 
 /** Names and sources of the tests, by the method that a `TestOutcome` names. */
 export const TEST_METHODS = {
-  pearsonChiSquare: {
-    id: 'pearsonChiSquare',
-    label: 'Pearson chi-square test',
-    shortLabel: 'chi-square',
-    citation:
-      'Pearson K. On the criterion that a given system of deviations from the probable in the ' +
-      'case of a correlated system of variables is such that it can be reasonably supposed to ' +
-      'have arisen from random sampling. Philosophical Magazine 1900;50:157-175.',
-  },
-  fisherExact: {
-    id: 'fisherExact',
-    label: "Fisher's exact test, two-sided by the probability of tables",
-    shortLabel: "Fisher's exact",
-    citation:
-      'Fisher RA. The logic of inductive inference. ' +
-      'Journal of the Royal Statistical Society 1935;98:39-82.',
-  },
+  ...FOURFOLD_TESTS,
   cochranArmitage: {
     id: 'cochranArmitage',
     label: 'Cochran–Armitage test for trend',

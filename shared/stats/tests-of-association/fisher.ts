@@ -30,7 +30,8 @@ export function fisherOfFourfold(table: FourfoldTable): Result<TestOutcome, Esti
       });
 }
 
-function urnOf(table: FourfoldTable): Urn {
+/** The urn of a table's index group, all margins fixed. */
+export function urnOf(table: FourfoldTable): Urn {
   return {
     marked: table.index.total,
     unmarked: table.reference.total,

@@ -1,5 +1,6 @@
 export { differences, logRatios } from './null-family';
 export type { NullFamily } from './null-family';
+export { largestProbability, tableMask } from './table-mask';
 export {
   UNCONDITIONAL_CAP,
   issueOfUnconditional,
