@@ -15,11 +15,15 @@ const ALL_LEVELS = '@all';
 export function addressKey(address: ValueAddress): string {
   return [
     encodeURIComponent(address.analysisId),
-    address.quantity,
+    quantityKey(address),
     address.levelId === null ? ALL_LEVELS : encodeURIComponent(address.levelId),
     scopeKey(address.scope),
     address.facet,
   ].join('/');
+}
+
+function quantityKey({ quantity, estimateId }: ValueAddress): string {
+  return estimateId === undefined ? quantity : `${quantity}:${encodeURIComponent(estimateId)}`;
 }
 
 function scopeKey(scope: ResultScope): string {
@@ -29,17 +33,31 @@ function scopeKey(scope: ResultScope): string {
 /** Reads the text that `addressKey` wrote; anything else gives `malformedAddress`. */
 export function parseAddress(key: string): Result<ValueAddress, Issue<'malformedAddress'>> {
   const malformed = failure({ code: 'malformedAddress' as const, facts: { key } });
-  const [analysis, quantity, level, scopeText, facet, ...rest] = key.split('/');
+  const [analysis, quantityText, level, scopeText, facet, ...rest] = key.split('/');
   const analysisId = decoded(analysis);
   const scope = scopeOf(scopeText);
   const levelId = level === ALL_LEVELS ? null : decoded(level);
+  const quantity = quantityOf(quantityText);
   if (rest.length > 0 || analysisId === undefined || levelId === undefined || !scope) {
     return malformed;
   }
-  return isAddressedQuantity(quantity) && isAddressFacet(facet)
-    ? success({ analysisId, quantity, levelId, scope, facet })
+  return quantity && isAddressFacet(facet)
+    ? success({ analysisId, levelId, scope, facet, ...quantity })
     : malformed;
 }
+
+/** An estimate from elsewhere carries its id behind the quantity; no other quantity has one. */
+function quantityOf(
+  text: string | undefined,
+): Pick<ValueAddress, 'quantity' | 'estimateId'> | undefined {
+  if (text?.startsWith(OUTSIDE)) {
+    const estimateId = decoded(text.slice(OUTSIDE.length));
+    return estimateId ? { quantity: 'outsideEstimate', estimateId } : undefined;
+  }
+  return isAddressedQuantity(text) && text !== 'outsideEstimate' ? { quantity: text } : undefined;
+}
+
+const OUTSIDE = 'outsideEstimate:';
 
 function scopeOf(text: string | undefined): ResultScope | undefined {
   if (text === 'crude' || text === 'pooled') {

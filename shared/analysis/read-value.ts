@@ -73,6 +73,8 @@ const READERS: Readonly<
   comparedControls: caseControl('comparedControls'),
   shareOfComparedCases: caseControl('shareOfComparedCases'),
   shareOfComparedControls: caseControl('shareOfComparedControls'),
+  // It stands beside results, in the report's sources.
+  outsideEstimate: () => failure(NOT_THERE),
 };
 
 function caseControl(

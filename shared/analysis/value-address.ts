@@ -29,6 +29,7 @@ const PLAIN_QUANTITIES = [
   'counted',
   'leftOut',
   ...CASE_CONTROL_QUANTITIES,
+  'outsideEstimate',
 ] as const;
 
 /** Which number family of a result an address points into. */
@@ -60,6 +61,8 @@ export interface ValueAddress {
   readonly levelId: string | null;
   readonly scope: ResultScope;
   readonly facet: AddressFacet;
+  /** Which estimate from elsewhere; given for `outsideEstimate` only, whose scope is `crude`. */
+  readonly estimateId?: string;
 }
 
 const QUANTITIES: ReadonlySet<string> = new Set([

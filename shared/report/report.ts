@@ -1,4 +1,5 @@
 import type { AnalysisResult } from '#shared/analysis';
+import type { OutsideEstimate } from '#shared/outside-estimates';
 import type { Framing } from '#shared/wording';
 
 /** Where a report stands on its way. */
@@ -38,6 +39,8 @@ export interface PinnedAnalysis {
   readonly resultId: string;
   readonly cut: { readonly id: string; readonly number: number; readonly dataDate: string };
   readonly result: AnalysisResult;
+  /** Adjusted estimates that models outside computed, beside the analysis as they are now. */
+  readonly outside?: readonly OutsideEstimate[];
 }
 
 /**

@@ -1,6 +1,7 @@
 import type { AddressedQuantity, AddressFacet, ResultScope, ValueAddress } from '#shared/analysis';
 import type { EffectMeasureId } from '#shared/effects';
 import type { PinnedAnalysis } from './report';
+import { outsideMeasureName } from '#shared/wording';
 import type { DesignTerms, Phrasebook } from '#shared/wording';
 
 /** A value in words, for lists: what it is, of whom, and where. */
@@ -21,7 +22,7 @@ export function valueWords(
 ): ValueWords {
   const terms = phrasebook.terms[pin.result.frame.design];
   return {
-    what: quantityWords(address, pin, terms) + FACETS[address.facet],
+    what: QUANTITIES[address.quantity](terms, pin, { address, phrasebook }) + FACETS[address.facet],
     whom: groupWords(address, pin),
     where: scopeWords(address.scope, pin),
   };
@@ -35,7 +36,12 @@ const FACETS: Readonly<Record<AddressFacet, string>> = {
   statistic: ', statistic',
 };
 
-type QuantityWords = (terms: DesignTerms, pin: PinnedAnalysis) => string;
+type QuantityWords = (terms: DesignTerms, pin: PinnedAnalysis, place: QuantityPlace) => string;
+
+interface QuantityPlace {
+  readonly address: ValueAddress;
+  readonly phrasebook: Phrasebook;
+}
 
 const QUANTITIES: Readonly<Record<AddressedQuantity, QuantityWords>> = {
   events: (_terms, { result }) =>
@@ -63,6 +69,7 @@ const QUANTITIES: Readonly<Record<AddressedQuantity, QuantityWords>> = {
   comparedControls: () => 'Controls compared',
   shareOfComparedCases: () => 'Share of cases compared',
   shareOfComparedControls: () => 'Share of controls compared',
+  outsideEstimate: outside,
 };
 
 function measure(id: EffectMeasureId): QuantityWords {
@@ -73,8 +80,16 @@ function homogeneity(id: EffectMeasureId): QuantityWords {
   return (terms) => `Difference between strata, ${terms.measures[id].name}`;
 }
 
-function quantityWords(address: ValueAddress, pin: PinnedAnalysis, terms: DesignTerms): string {
-  return QUANTITIES[address.quantity](terms, pin);
+/** "Adjusted odds ratio, computed elsewhere (logistic regression)". */
+function outside(
+  _terms: DesignTerms,
+  pin: PinnedAnalysis,
+  { address, phrasebook }: QuantityPlace,
+): string {
+  const estimate = pin.outside?.find(({ id }) => id === address.estimateId);
+  if (estimate === undefined) return 'Estimate from elsewhere, removed';
+  const name = outsideMeasureName(estimate.measure, pin, phrasebook);
+  return `Adjusted ${name}, computed elsewhere (${estimate.method})`;
 }
 
 function groupWords({ levelId, quantity }: ValueAddress, { result }: PinnedAnalysis): string {
@@ -112,4 +127,5 @@ const COMPARES: readonly AddressedQuantity[] = [
   'homogeneity:riskDifference',
   'homogeneity:riskRatio',
   'homogeneity:oddsRatio',
+  'outsideEstimate',
 ];

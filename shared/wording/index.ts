@@ -7,6 +7,15 @@ export { guardWords } from './guards/guard-words';
 export type { GuardWords } from './guards/guard-words';
 export { issueWords } from './issue-words';
 export type { WordedIssueCode } from './issue-words';
+export { outsideFindingWords } from './outside/outside-finding-words';
+export { outsideAddress, outsidePValue, outsideText } from './outside/outside-numbers';
+export {
+  outsideHead,
+  outsideMeasureName,
+  outsideNote,
+  outsideSentence,
+} from './outside/outside-words';
+export type { OutsideColumn } from './outside/outside-words';
 export { addressesOfPart, FRAMINGS, phraseText } from './phrase';
 export type { Direction, Framing, Phrase, PhrasePart } from './phrase';
 export { availableFramings, phraseOfClaim } from './phrase-of-claim';

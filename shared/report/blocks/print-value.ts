@@ -34,18 +34,25 @@ export function printValue(
 ): Result<PrintedValue, string> {
   const read = readValue(result, address);
   const { houseStyle, phrasebook } = under;
+  const kind = address.quantity;
+  if (kind === 'outsideEstimate') {
+    return failure(issueWords({ code: 'addressNotInResult' }, phrasebook));
+  }
   if (read.ok) {
     const value = { result, address, quantity: read.value, houseStyle, phrasebook };
-    return success(PRINTERS[address.quantity](value, format));
+    return success(PRINTERS[kind](value, format));
   }
   if (read.issue.code === 'addressNotInResult') return failure(issueWords(read.issue, phrasebook));
   const text = read.issue.code === 'infinite' ? '∞' : houseStyle.table.missingCell.meaning;
   return success([{ text, addresses: [address] }]);
 }
 
+/** What a result holds; estimates from elsewhere stand beside it. */
+type ResultQuantity = Exclude<AddressedQuantity, 'outsideEstimate'>;
+
 type Printer = (value: ReadValue, format: BoundValueFormat) => PrintedValue;
 
-const PRINTERS: Readonly<Record<AddressedQuantity, Printer>> = {
+const PRINTERS: Readonly<Record<ResultQuantity, Printer>> = {
   events: printCount,
   total: printCount,
   risk: printShare,

@@ -38,4 +38,5 @@ const FORMATS: Readonly<Record<AddressedQuantity, readonly BoundValueFormat[]>> 
   comparedControls: FIGURE,
   shareOfComparedCases: SHARE,
   shareOfComparedControls: SHARE,
+  outsideEstimate: RATIO,
 };

@@ -72,6 +72,14 @@ function sameSetting(
 /** A result never changes, so that a pin read again from the server is the same by its ids. */
 function samePin(one: PinnedAnalysis | undefined, other: PinnedAnalysis | undefined): boolean {
   return (
-    one?.resultId === other?.resultId && one?.name === other?.name && one?.number === other?.number
+    one?.resultId === other?.resultId &&
+    one?.name === other?.name &&
+    one?.number === other?.number &&
+    outsideKey(one) === outsideKey(other)
   );
+}
+
+/** Estimates from elsewhere change beside a result; each change has a version. */
+function outsideKey(pin: PinnedAnalysis | undefined): string {
+  return (pin?.outside ?? []).map(({ id, version }) => `${id}@${String(version)}`).join();
 }

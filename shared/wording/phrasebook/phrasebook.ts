@@ -1,6 +1,7 @@
 import type { EffectMeasureId, StudyDesign } from '#shared/effects';
 import { BALANCE_SLOTS } from './balance-slots';
 import { GUARD_SLOTS } from './guard-slots';
+import { OUTSIDE_SLOTS } from './outside-slots';
 import { PRINT_SLOTS } from './print-slots';
 import { REASON_SLOTS } from './reason-slots';
 import { SENTENCE_SLOTS } from './sentence-slots';
@@ -12,6 +13,7 @@ export const PATTERN_SLOTS = {
   ...BALANCE_SLOTS,
   ...PRINT_SLOTS,
   ...GUARD_SLOTS,
+  ...OUTSIDE_SLOTS,
 } as const;
 
 /** Key of a pattern. */

@@ -1,10 +1,12 @@
 import type { LayoutElement, Run } from '#shared/layout';
-import { claimOf, issueWords, phraseOfClaim } from '#shared/wording';
+import { claimOf, issueWords, outsideSentence, phraseOfClaim } from '#shared/wording';
 import type { Phrase } from '#shared/wording';
 import { markAbbreviations } from '../../compose/abbreviations';
 import { documentToRuns } from '../../text/text-runs';
 import type { TextDocument } from '../../text/text-document';
 import type { BlockContext } from '../block-context';
+import type { PinnedAnalysis } from '../../report';
+import { fittingEstimates } from '../fitting-estimates';
 import { inlineContext } from '../inline-context';
 import { phraseRuns } from '../phrase-runs';
 import { pinnedAnalysis, problemElement } from '../pinned-result';
@@ -33,20 +35,36 @@ export function composeEffectSentence(
   }
   const framing = content.framing ?? context.framing;
   const phrase = phraseOfClaim(claim.value, framing, context.houseStyle, context.phrasebook);
-  return [{ kind: 'paragraph', blockId: context.blockId, runs: runs(content, phrase, context) }];
+  const phrases = [phrase, ...outsidePhrases(content, pinned.value, context)];
+  return [{ kind: 'paragraph', blockId: context.blockId, runs: runs(content, phrases, context) }];
+}
+
+/** The adjusted estimates of the level; they are about all records, so not within a stratum. */
+function outsidePhrases(
+  { outside: isSaid, indexLevelId, scope }: EffectSentenceContent,
+  pinned: PinnedAnalysis,
+  { houseStyle, phrasebook }: BlockContext,
+): readonly Phrase[] {
+  if (isSaid !== true || scope.kind === 'stratum') return [];
+  return fittingEstimates(pinned.outside ?? [], pinned.result.frame)
+    .filter(({ levelId }) => levelId === indexLevelId)
+    .map((estimate) => outsideSentence(estimate, pinned, houseStyle, phrasebook));
 }
 
 function runs(
   { lead, tail }: EffectSentenceContent,
-  phrase: Phrase,
+  phrases: readonly Phrase[],
   context: BlockContext,
 ): readonly Run[] {
   const before = ownWords(lead, context);
   const after = ownWords(tail, context);
   const blank = wordsRun(' ', context.blockId);
-  const said = phraseRuns(phrase, context.blockId).flatMap((run) =>
-    markAbbreviations(run, context.phrasebook),
-  );
+  const said = phrases.flatMap((phrase, place) => [
+    ...(place === 0 ? [] : [blank]),
+    ...phraseRuns(phrase, context.blockId).flatMap((run) =>
+      markAbbreviations(run, context.phrasebook),
+    ),
+  ]);
   return [
     ...before,
     ...(before.length === 0 ? [] : [blank]),

@@ -15,4 +15,6 @@ export interface EffectSentenceContent {
   readonly framing: Framing | null;
   readonly lead: TextDocument | null;
   readonly tail: TextDocument | null;
+  /** Whether the adjusted estimates of the level, computed elsewhere, follow the sentence. */
+  readonly outside?: boolean;
 }

@@ -27,6 +27,7 @@ export const EFFECT_SENTENCE: BlockKind<EffectSentenceContent> = {
       framing: z.nullable(z.enum(FRAMINGS)),
       lead: z.nullable(lineSchema),
       tail: z.nullable(lineSchema),
+      outside: z.optional(z.boolean()),
     }),
   ),
   emptyContent,
@@ -48,6 +49,7 @@ function emptyContent({ analysis }: EmptyContentContext): EffectSentenceContent 
     framing: null,
     lead: null,
     tail: null,
+    outside: false,
   };
 }
 
@@ -77,6 +79,7 @@ function fields(): readonly BlockField[] {
         { value: 'relative', label: 'Relative' },
       ],
     },
+    { kind: 'toggle', path: 'outside', label: 'Adjusted estimate, computed elsewhere' },
     ownWords('lead', 'Words before', 'Nothing before the sentence'),
     ownWords('tail', 'Words after', 'Nothing after the sentence'),
   ];

@@ -12,6 +12,7 @@ import {
 } from '#shared/format';
 import type { EstimateText, NumberText } from '#shared/format';
 import type { TableBodyCell } from '#shared/layout';
+import type { OutsideMeasureId } from '#shared/outside-estimates';
 import type { Estimate, GroupCount } from '#shared/stats';
 import { cellNumber, numbersRun, wordsCell, wordsRun } from '../table-cells';
 import type { CountedLayer } from './counted-layer';
@@ -122,7 +123,8 @@ function effectCell(
   return estimateCell(printed, address, setting);
 }
 
-function estimateCell(
+/** An estimate with its limits, each number bound to its place. */
+export function estimateCell(
   printed: EstimateText,
   address: (facet: AddressFacet) => ValueAddress,
   setting: TableSetting,
@@ -143,13 +145,18 @@ function estimateCell(
   };
 }
 
-function referenceCell(measure: EffectMeasureId, setting: TableSetting): TableBodyCell {
+/** What a cell of the reference level prints: 0 for a difference, 1 for a ratio. */
+export function referenceCell(
+  measure: EffectMeasureId | OutsideMeasureId,
+  setting: TableSetting,
+): TableBodyCell {
   const { referenceDifference, referenceRatio } = setting.houseStyle.table;
   const text = measure === 'riskDifference' ? referenceDifference : referenceRatio;
   return wordsCell(text, setting.blockId, { parts: 3, marks: ['secondary'] });
 }
 
-function missingCell(parts: number, { houseStyle, blockId }: TableSetting): TableBodyCell {
+/** A cell that has no value. */
+export function missingCell(parts: number, { houseStyle, blockId }: TableSetting): TableBodyCell {
   return wordsCell(houseStyle.table.missingCell.mark, blockId, { parts });
 }
 

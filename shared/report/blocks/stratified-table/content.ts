@@ -9,6 +9,8 @@ export interface TableChoice {
   readonly crude: boolean;
   readonly pooled: boolean;
   readonly trend: boolean;
+  /** Adjusted estimates that models outside computed, in columns of their own. */
+  readonly outside?: boolean;
 }
 
 /**

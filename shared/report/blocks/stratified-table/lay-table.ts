@@ -4,7 +4,9 @@ import { wordsCell } from '../table-cells';
 import { bodyCell } from './body-cell';
 import { countedLayer } from './counted-layer';
 import { columnShape, LEVEL_COLUMN_WEIGHT } from './column-shapes';
+import { outsideCell, outsideShape } from './outside-columns';
 import { groupHead, headRows } from './table-heads';
+import { isOfAll } from './table-plan';
 import type { TableColumnId, TableLayer, TablePlan } from './table-plan';
 import type { TableSetting } from './table-setting';
 
@@ -29,27 +31,38 @@ function columnsOf(plan: TablePlan, setting: TableSetting): readonly TableColumn
   const across = layersAcross(plan).flatMap((layer, index) =>
     layer.columns.map((id) => ({ id: `${String(index)}.${id}`, ...columnShape(id, setting) })),
   );
+  const outside = setting.outside.map((column, index) => ({
+    id: `outside.${String(index)}`,
+    ...outsideShape(column, setting),
+  }));
   const level = { id: 'level', weight: LEVEL_COLUMN_WEIGHT, align: 'start' as const, parts: [] };
-  const columns = [level, ...across];
+  const columns = [level, ...across, ...outside];
   const total = columns.reduce((sum, { weight }) => sum + weight, 0);
   return columns.map(({ weight, ...column }) => ({ ...column, width: weight / total }));
 }
 
 function levelRows(plan: TablePlan, setting: TableSetting): readonly TableRow[] {
   return setting.result.frame.exposure.levels.map((level) =>
-    levelRow(level, plan.layers, 0, setting),
+    withOutside(levelRow(level, plan.layers, 0, setting), level.id, setting),
   );
 }
 
 function stackedRows(plan: TablePlan, setting: TableSetting): readonly TableRow[] {
   const { levels } = setting.result.frame.exposure;
+  const beside = plan.layers.findLast(({ scope }) => isOfAll(scope));
   return plan.layers.flatMap((layer): readonly TableRow[] => [
     {
       kind: 'group',
       indent: 0,
       cells: [{ runs: groupHead(layer.scope, setting), numbers: [] }],
     },
-    ...levels.map((level) => levelRow(level, [layer], 1, setting)),
+    ...levels.map((level) =>
+      withOutside(
+        levelRow(level, [layer], 1, setting),
+        layer === beside ? level.id : null,
+        setting,
+      ),
+    ),
   ]);
 }
 
@@ -65,4 +78,10 @@ function levelRow(
     return columns.map((id: TableColumnId) => bodyCell(id, layer, level.id, setting));
   });
   return { kind: 'level', indent, cells: [head, ...cells] };
+}
+
+/** A row with its estimates from elsewhere; empty cells where the row is not about all records. */
+function withOutside(row: TableRow, levelId: string | null, setting: TableSetting): TableRow {
+  const cells = setting.outside.map((column) => outsideCell(column, levelId, setting));
+  return cells.length === 0 ? row : { ...row, cells: [...row.cells, ...cells] };
 }

@@ -28,6 +28,7 @@ export const STRATIFIED_TABLE: BlockKind<StratifiedTableContent> = {
         crude: z.boolean(),
         pooled: z.boolean(),
         trend: z.boolean(),
+        outside: z.optional(z.boolean()),
       }),
       layout: z.enum(['auto', 'sideBySide', 'stacked']),
     }),
@@ -49,6 +50,7 @@ function emptyContent({ analysis }: EmptyContentContext): StratifiedTableContent
       oddsRatio: analysis?.result.frame.design === 'caseControl',
       crude: false,
       pooled: analysis?.result.specification.adjustment === 'mantelHaenszel',
+      outside: false,
       trend: analysis?.result.frame.exposure.ordered ?? false,
     },
     layout: 'auto',
@@ -72,6 +74,7 @@ function fields(): readonly BlockField[] {
     { kind: 'toggle', path: 'show.oddsRatio', label: 'Odds ratios' },
     { kind: 'toggle', path: 'show.crude', label: 'All strata together, crude' },
     { kind: 'toggle', path: 'show.pooled', label: 'Adjusted for the strata' },
+    { kind: 'toggle', path: 'show.outside', label: 'Adjusted, computed elsewhere' },
     { kind: 'toggle', path: 'show.trend', label: 'Trend in the notes' },
     {
       kind: 'choice',

@@ -2,32 +2,70 @@ import type { ResultScope, ValueAddress } from '#shared/analysis';
 import { EFFECT_MEASURES } from '#shared/effects';
 import { formatCount } from '#shared/format';
 import type { Run, TableHeadCell } from '#shared/layout';
-import { fillPattern, fillWords, headWithInterval, strataWords } from '#shared/wording';
+import {
+  fillPattern,
+  fillWords,
+  headWithInterval,
+  outsideHead,
+  strataWords,
+} from '#shared/wording';
 import { phraseRuns } from '../phrase-runs';
 import { wordsRun } from '../table-cells';
 import { countedLayer } from './counted-layer';
 import type { TableColumnId, TablePlan } from './table-plan';
 import type { TableSetting } from './table-setting';
 
-/** One row of heads, or a row of spanners over it where layers stand side by side. */
+/**
+ * One row of heads, or two where a row of spanners stands over it: over layers side by side, and
+ * over estimates from elsewhere, which are always named as such.
+ */
 export function headRows(
   plan: TablePlan,
   setting: TableSetting,
 ): readonly (readonly TableHeadCell[])[] {
-  const heads = (columns: readonly TableColumnId[]): readonly TableHeadCell[] =>
-    columns.map((id) => headCell([wordsRun(headText(id, setting), setting.blockId)], 'end'));
-  const levelRuns = [wordsRun(setting.heads.level, setting.blockId)];
-  if (plan.arrangement !== 'sideBySide') {
-    return [[headCell(levelRuns, 'start'), ...heads(plan.layers[0]?.columns ?? [])]];
-  }
-  const spanners = plan.layers.map(({ scope, columns }) => ({
+  const level = headCell([wordsRun(setting.heads.level, setting.blockId)], 'start');
+  const outside = outsideHeads(setting);
+  const beside = plan.arrangement === 'sideBySide';
+  const columns = beside
+    ? plan.layers.flatMap((layer) => heads(layer.columns, setting))
+    : heads(plan.layers[0]?.columns ?? [], setting);
+  if (!beside && outside.spanners.length === 0) return [[level, ...columns]];
+  const spanners = beside ? layerSpanners(plan, setting) : columns.map(overTwoRows);
+  return [
+    [overTwoRows(level), ...spanners, ...outside.spanners],
+    [...(beside ? columns : []), ...outside.heads],
+  ];
+}
+
+function heads(columns: readonly TableColumnId[], setting: TableSetting): readonly TableHeadCell[] {
+  return columns.map((id) => headCell([wordsRun(headText(id, setting), setting.blockId)], 'end'));
+}
+
+function layerSpanners(plan: TablePlan, setting: TableSetting): readonly TableHeadCell[] {
+  return plan.layers.map(({ scope, columns }) => ({
     ...headCell(groupHead(scope, setting), 'center'),
     columnSpan: columns.length,
   }));
-  return [
-    [{ ...headCell(levelRuns, 'start'), rowSpan: 2 }, ...spanners],
-    plan.layers.flatMap(({ columns }) => heads(columns)),
-  ];
+}
+
+function outsideHeads({ outside, ...setting }: TableSetting): {
+  readonly spanners: readonly TableHeadCell[];
+  readonly heads: readonly TableHeadCell[];
+} {
+  const { houseStyle, phrasebook, blockId } = setting;
+  if (outside.length === 0) return { spanners: [], heads: [] };
+  const words = (text: string): readonly Run[] => [wordsRun(text, blockId)];
+  const spanner = headCell(words(fillWords(phrasebook, 'outside.head', {})), 'center');
+  return {
+    spanners: [{ ...spanner, columnSpan: outside.length }],
+    heads: outside.map((column) =>
+      headCell(words(outsideHead(column, setting, houseStyle, phrasebook)), 'end'),
+    ),
+  };
+}
+
+function overTwoRows(cell: TableHeadCell): TableHeadCell {
+  return { ...cell, rowSpan: 2 };
 }
 
 /** The head of a layer: a stratum with its N, all strata together, or the adjusted estimates. */

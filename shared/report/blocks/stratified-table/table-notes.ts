@@ -1,5 +1,5 @@
 import type { Run, TableElement } from '#shared/layout';
-import { fillPattern, tableNotes } from '#shared/wording';
+import { fillPattern, outsideNote, tableNotes } from '#shared/wording';
 import type { Phrase, TableContents } from '#shared/wording';
 import { abbreviationNote } from '../abbreviation-note';
 import { phraseRuns } from '../phrase-runs';
@@ -18,6 +18,7 @@ export function notesOfTable(
   const notes = [
     ...tableNotes(setting, contentsOf(show, plan), houseStyle, phrasebook),
     ...countsNote(plan, setting),
+    ...outsideNotes(setting),
   ].map((phrase) => phraseRuns(phrase, blockId));
   const heads = head.flat().map(({ runs }) => runs);
   const texts = [...heads, ...notes].flat().map(({ text }) => text);
@@ -40,6 +41,12 @@ function contentsOf(show: TableChoice, plan: TablePlan): TableContents {
     pooled: scopes.includes('pooled'),
     trend: show.trend,
   };
+}
+
+/** What stands behind each column of estimates from elsewhere, and who computed it. */
+function outsideNotes({ outside, ...setting }: TableSetting): readonly Phrase[] {
+  const { houseStyle, phrasebook } = setting;
+  return outside.map((column) => outsideNote(column, setting, houseStyle, phrasebook));
 }
 
 /** Counts are never adjusted; beside adjusted estimates that has to be said. */

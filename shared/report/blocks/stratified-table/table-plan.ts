@@ -29,16 +29,20 @@ const MOST_STRATA_BESIDE = 2;
 /**
  * Plans a table. The framing chooses among the effect columns: differences, ratios, or both with
  * the differences first; counts and risks stay in every framing. The arrangement never depends on
- * the framing, so that toggling it moves no rows.
+ * the framing, so that toggling it moves no rows. Estimates from elsewhere are about all strata:
+ * below each other, they stand in the rows of all records, which they bring along.
  */
 export function planTable(
   content: Pick<StratifiedTableContent, 'show' | 'layout'>,
   result: AnalysisResult,
   framing: Framing,
+  outsideColumns = 0,
 ): TablePlan {
-  const arrangement = arrangementOf(content, result);
+  const arrangement = arrangementOf(content, result, outsideColumns);
   const columns = columnsOf(content.show, result, framing);
-  const scopes = scopesOf(content.show, result);
+  const chosen = scopesOf(content.show, result);
+  const needsAll = outsideColumns > 0 && arrangement === 'stacked' && !chosen.some(isOfAll);
+  const scopes = needsAll ? [...chosen, { kind: 'crude' } as const] : chosen;
   return { arrangement, layers: scopes.map((scope) => layerOf(scope, columns, arrangement)) };
 }
 
@@ -101,6 +105,7 @@ function scopesOf(show: TableChoice, result: AnalysisResult): readonly ResultSco
 function arrangementOf(
   { show, layout }: Pick<StratifiedTableContent, 'show' | 'layout'>,
   result: AnalysisResult,
+  outsideColumns: number,
 ): TablePlan['arrangement'] {
   if (result.strata.length === 0) return 'plain';
   if (layout !== 'auto') return layout;
@@ -108,9 +113,14 @@ function arrangementOf(
   const widths = scopesOf(show, result).map(
     (scope) => layerOf(scope, columns, 'sideBySide').columns.length,
   );
-  const total = widths.reduce((sum, width) => sum + width, 0);
+  const total = widths.reduce((sum, width) => sum + width, outsideColumns);
   const fits = result.strata.length <= MOST_STRATA_BESIDE && total <= MOST_COLUMNS;
   return fits ? 'sideBySide' : 'stacked';
+}
+
+/** Whether a layer is about all records. */
+export function isOfAll({ kind }: ResultScope): boolean {
+  return kind !== 'stratum';
 }
 
 /** Beside the strata, pooled estimates have columns of their own, and no counts to repeat. */

@@ -1,7 +1,7 @@
 import type { AnalysisResult } from '#shared/analysis';
 import type { PrintedDecimals } from '#shared/format';
 import type { HouseStyle } from '#shared/house-style';
-import type { ColumnHeads, Phrasebook } from '#shared/wording';
+import type { ColumnHeads, OutsideColumn, Phrasebook } from '#shared/wording';
 
 /** What every cell of a table is printed under. */
 export interface TableSetting {
@@ -10,6 +10,8 @@ export interface TableSetting {
   readonly result: AnalysisResult;
   readonly decimals: PrintedDecimals;
   readonly heads: ColumnHeads;
+  /** Estimates from elsewhere, a column for each measure of each model. */
+  readonly outside: readonly OutsideColumn[];
   readonly houseStyle: HouseStyle;
   readonly phrasebook: Phrasebook;
 }
