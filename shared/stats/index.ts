@@ -133,3 +133,9 @@ export type {
   PairedTest,
   PairedTestId,
 } from './pairs';
+export {
+  adjustedResiduals,
+  cramersV,
+  fisherOfTable,
+  likelihoodRatioOfTable,
+} from './tables-of-any-size';

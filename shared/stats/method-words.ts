@@ -12,6 +12,22 @@ import { FOURFOLD_TESTS } from './tests-of-association';
 /** Names and sources of the tests, by the method that a `TestOutcome` names. */
 export const TEST_METHODS = {
   ...FOURFOLD_TESTS,
+  fisherFreemanHalton: {
+    id: 'fisherFreemanHalton',
+    label: "Fisher's exact test of a table of any size (Freeman and Halton)",
+    shortLabel: "Fisher's exact (Freeman–Halton)",
+    citation:
+      'Freeman GH, Halton JH. Note on an exact treatment of contingency, goodness of fit and ' +
+      'other problems of significance. Biometrika 1951;38:141-149.',
+  },
+  likelihoodRatio: {
+    id: 'likelihoodRatio',
+    label: 'Likelihood-ratio chi-square test',
+    shortLabel: 'likelihood ratio',
+    citation:
+      'Wilks SS. The likelihood test of independence in contingency tables. ' +
+      'Annals of Mathematical Statistics 1935;6:190-196.',
+  },
   cochranArmitage: {
     id: 'cochranArmitage',
     label: 'Cochran–Armitage test for trend',

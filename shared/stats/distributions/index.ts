@@ -12,6 +12,7 @@ export type { BinomialTerms, CountRange } from './binomial-terms';
 export { chiSquareUpperTail } from './chi-square';
 export { gammaQuantile, gammaUpperQuantile } from './gamma';
 export {
+  deviance,
   hypergeometricProbability,
   hypergeometricSupport,
   logHypergeometric,
