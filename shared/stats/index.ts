@@ -88,7 +88,6 @@ export type {
 } from './stratified';
 export {
   FOURFOLD_TESTS,
-  cochranArmitage,
   fisherOfFourfold,
   pearsonOfFourfold,
   pearsonOfTable,
@@ -139,3 +138,5 @@ export {
   fisherOfTable,
   likelihoodRatioOfTable,
 } from './tables-of-any-size';
+export { TREND_TESTS, cochranArmitage, linearByLinear } from './trend';
+export type { ScoredTable, TrendTest, TrendTestId } from './trend';

@@ -7,6 +7,7 @@ import {
   POOLED_RISK_RATIOS,
   RISK_DIFFERENCE_HOMOGENEITIES,
 } from './stratified';
+import { TREND_TESTS } from './trend';
 import { FOURFOLD_TESTS } from './tests-of-association';
 
 /** Names and sources of the tests, by the method that a `TestOutcome` names. */
@@ -28,14 +29,7 @@ export const TEST_METHODS = {
       'Wilks SS. The likelihood test of independence in contingency tables. ' +
       'Annals of Mathematical Statistics 1935;6:190-196.',
   },
-  cochranArmitage: {
-    id: 'cochranArmitage',
-    label: 'Cochran–Armitage test for trend',
-    shortLabel: 'Cochran–Armitage',
-    citation:
-      'Armitage P. Tests for linear trends in proportions and frequencies. ' +
-      'Biometrics 1955;11:375-386.',
-  },
+  ...TREND_TESTS,
   cochranMantelHaenszel: {
     id: 'cochranMantelHaenszel',
     label: 'Cochran–Mantel–Haenszel test without continuity correction',

@@ -11,7 +11,8 @@ import {
   pooledRiskDifference,
   pooledRiskRatio,
 } from './stratified';
-import { cochranArmitage, pearsonOfTable } from './tests-of-association';
+import { pearsonOfTable } from './tests-of-association';
+import { cochranArmitage } from './trend';
 
 const stratum = (id: string, a: number, m: number, c: number, n: number) => ({
   id,

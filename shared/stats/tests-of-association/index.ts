@@ -1,4 +1,3 @@
-export { cochranArmitage } from './cochran-armitage';
 export { fisherOfFourfold } from './fisher';
 export { FOURFOLD_TESTS } from './fourfold-tests';
 export type { FourfoldTest, FourfoldTestId } from './fourfold-tests';

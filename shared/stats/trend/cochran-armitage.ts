@@ -1,9 +1,10 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
-import { issueOfGroup } from '../check-counts';
 import type { ScoredGroup } from '../contingency-table';
 import { chiSquareUpperTail } from '../distributions';
 import type { EstimationIssue, TestOutcome } from '../estimate';
+import { issueOfTrend, sumOf } from './trend-issue';
+import type { TrendTest } from './trend-test';
 
 /**
  * Cochran and Armitage's test for a linear trend of risks over scored groups.
@@ -32,27 +33,17 @@ export function cochranArmitage(
   );
   const spread = sumOf(used, (group) => group.total * (group.score - centre) ** 2);
   const statistic = (trend * trend) / (share * (1 - share) * spread);
-  return success({
-    method: 'cochranArmitage',
-    statistic,
-    degreesOfFreedom: 1,
-    pValue: chiSquareUpperTail(statistic, 1),
-  });
+  const pValue = chiSquareUpperTail(statistic, 1);
+  return success({ method: 'cochranArmitage', statistic, degreesOfFreedom: 1, pValue });
 }
 
-function issueOfTrend(groups: readonly ScoredGroup[]): EstimationIssue | null {
-  const invalid = groups.map((group) => issueOfGroup(group, 'level')).find((issue) => issue);
-  if (invalid || !groups.every((group) => Number.isFinite(group.score))) {
-    return { code: 'invalidCounts' };
-  }
-  if (new Set(groups.map((group) => group.score)).size < 2) {
-    return { code: 'fewerThanTwoLevels', facts: { levels: groups.length } };
-  }
-  const events = sumOf(groups, (group) => group.events);
-  const others = sumOf(groups, (group) => group.total) - events;
-  return events === 0 || others === 0 ? { code: 'emptyMargin', facts: { events, others } } : null;
-}
-
-function sumOf(groups: readonly ScoredGroup[], part: (group: ScoredGroup) => number): number {
-  return groups.reduce((sum, group) => sum + part(group), 0);
-}
+/** The test as a member of TREND_TESTS. */
+export const cochranArmitageTest = {
+  id: 'cochranArmitage',
+  label: 'Cochran–Armitage test for trend',
+  shortLabel: 'Cochran–Armitage',
+  citation:
+    'Armitage P. Tests for linear trends in proportions and frequencies. ' +
+    'Biometrics 1955;11:375-386.',
+  test: cochranArmitage,
+} as const satisfies TrendTest;
