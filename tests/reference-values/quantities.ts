@@ -1,4 +1,5 @@
 import {
+  FOURFOLD_TESTS,
   ODDS_RATIO_HOMOGENEITIES,
   ODDS_RATIO_INTERVALS,
   RISK_DIFFERENCE_INTERVALS,
@@ -6,6 +7,7 @@ import {
   RISK_RATIO_INTERVALS,
   cochranArmitage,
   cochranMantelHaenszel,
+  conditionalOddsRatioOf,
   eValue,
   fisherOfFourfold,
   oddsRatioOf,
@@ -56,6 +58,12 @@ const READERS: Readonly<Record<string, Read>> = {
   'riskDifference.value': (one) => [riskDifferenceOf(fourfoldOf(one))],
   'riskRatio.value': (one) => [riskRatioOf(fourfoldOf(one))],
   'oddsRatio.value': (one) => [oddsRatioOf(fourfoldOf(one))],
+  'oddsRatio.conditionalEstimate': (one) => [conditionalOddsRatioOf(fourfoldOf(one))],
+  'oddsRatio.conditionalEstimateAndLimits': (one) => [
+    conditionalOddsRatioOf(fourfoldOf(one)),
+    ...limits(ODDS_RATIO_INTERVALS.conditionalExact.interval(fourfoldOf(one), 0.95)),
+  ],
+  ...fourfoldTests(),
   ...testOf('pearson', (one) => pearsonOfTable({ counts: rowsOf(one) })),
   ...testOf('fisher', (one) => fisherOfFourfold(fourfoldOf(one))),
   ...testOf('trend', (one) =>
@@ -94,6 +102,13 @@ function limitsOf<Counts>(
     (one) => limits(method.interval(countsOf(one), one.level ?? 0.95)),
   ]);
   return Object.fromEntries(entries);
+}
+
+function fourfoldTests(): Record<string, Read> {
+  const readers = Object.values(FOURFOLD_TESTS).map((member) =>
+    testOf(member.id, (one) => member.test(fourfoldOf(one))),
+  );
+  return Object.assign({}, ...readers) as Record<string, Read>;
 }
 
 function testOf(

@@ -19,6 +19,12 @@ const NARROWEST = 1e-10;
 /** No stretch wider than this part of the range is left out unseen. */
 const FIRST_PARTS = 16;
 
+/**
+ * At no effect many tables tie exactly, and the p-value jumps there; the tolerance of ties makes a
+ * limit that lies at 0 come out this near it.
+ */
+const NULL_TIES = 1e-8;
+
 /** Binomial terms this far below the largest play no part in an interval. */
 const NEGLIGIBLE = 1e-25;
 
@@ -46,7 +52,7 @@ export function unconditionalLowerLimit(
     const to = search.placeAt(end);
     const found = firstAccepted(search, from, to);
     if (found !== null) {
-      return found;
+      return Math.abs(found) < NULL_TIES ? 0 : found;
     }
     from = to;
   }

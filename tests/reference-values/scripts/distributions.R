@@ -1,6 +1,8 @@
 # Values of distribution functions, far tails included, by R's stats package.
 # Run from the repository's root: Rscript tests/reference-values/scripts/distributions.R
 source("tests/reference-values/scripts/json.R")
+arguments <- commandArgs(trailingOnly = TRUE)
+folder <- if (length(arguments) > 0) arguments[1] else "tests/reference-values"
 
 case_of <- function(name, arguments, expected) {
   object(field("function", text(name)), field("arguments", array_of(number(arguments))),
@@ -46,6 +48,6 @@ cases <- c(
     case_of("logGamma", x, lgamma(x)))
 )
 
-write_lines("tests/reference-values/distributions.json",
+write_lines(file.path(folder, "distributions.json"),
   c(field("source", text(paste(R.version.string, "stats package"))),
     field("script", text("tests/reference-values/scripts/distributions.R"))), cases)

@@ -2,6 +2,8 @@
 # generalised linear models for differences and ratios, chisq.test and fisher.test.
 # Run from the repository's root: Rscript tests/reference-values/scripts/fourfold.R
 source("tests/reference-values/scripts/json.R")
+arguments <- commandArgs(trailingOnly = TRUE)
+folder <- if (length(arguments) > 0) arguments[1] else "tests/reference-values"
 RNGkind("Mersenne-Twister", "Inversion", "Rejection")
 set.seed(20250611)
 
@@ -50,7 +52,7 @@ case_of <- function(t, i) {
     if (tested) field("fisher", number(fisher.test(m)$p.value)))
 }
 
-write_lines("tests/reference-values/fourfold.json",
+write_lines(file.path(folder, "fourfold.json"),
   c(field("source", text(paste(R.version.string, "stats package"))),
     field("script", text("tests/reference-values/scripts/fourfold.R"))),
   mapply(case_of, tables, seq_along(tables)))

@@ -3,6 +3,8 @@
 # package.
 # Run from the repository's root: Rscript tests/reference-values/scripts/strata-and-trends.R
 source("tests/reference-values/scripts/json.R")
+arguments <- commandArgs(trailingOnly = TRUE)
+folder <- if (length(arguments) > 0) arguments[1] else "tests/reference-values"
 RNGkind("Mersenne-Twister", "Inversion", "Rejection")
 set.seed(20250612)
 
@@ -57,6 +59,6 @@ cases <- c(lapply(c(2, 2, 3, 4, 6, 10, 20), function(k) stratified_case(random_s
   list(trend_case(5, c(0, 0.5, 1.5, 4, 7)), trend_case(4, c(-1, 0, 3, 10))),
   list(table_case(3, 2), table_case(6, 2), table_case(4, 4), table_case(20, 2)))
 
-write_lines("tests/reference-values/strata-and-trends.json",
+write_lines(file.path(folder, "strata-and-trends.json"),
   c(field("source", text(paste(R.version.string, "stats package"))),
     field("script", text("tests/reference-values/scripts/strata-and-trends.R"))), unlist(cases))
