@@ -164,6 +164,21 @@ export const ISSUES = {
     title: 'Somebody saved version {version} of this analysis while you edited.',
     wayOut: 'Look at the newer version, then save yours on top of it or give it up.',
   },
+  staleOutsideEstimate: {
+    status: 409,
+    title: 'Somebody saved version {version} of this estimate while you edited.',
+    wayOut: 'Look at the newer version, then enter yours again or give it up.',
+  },
+  estimatesNotReadable: {
+    status: 422,
+    title: 'No estimate was taken over, because the file cannot be used as it is.',
+    wayOut: 'Correct what is named and load the file again.',
+  },
+  estimatesFileTooLarge: {
+    status: 413,
+    title: 'The file is larger than {limit}, the most that a file of estimates may have.',
+    wayOut: 'Check that it is the right file.',
+  },
   analysisInUse: {
     status: 409,
     title: 'A report shows this analysis: {reports}.',

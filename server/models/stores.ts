@@ -9,6 +9,7 @@ import { CutStore } from './cut/cut-store';
 import { DataSetStore } from './data-set/data-set-store';
 import { DraftStore } from './draft/draft-store';
 import { MailStore } from './mail/mail-store';
+import { OutsideEstimateStore } from './outside-estimate/outside-estimate-store';
 import { ReportPinStore } from './report/report-pin-store';
 import { ReportStore } from './report/report-store';
 import { ResultStore } from './result/result-store';
@@ -47,6 +48,7 @@ const STORES = {
   uploads: UploadStore,
   tallies: TallyStore,
   analyses: AnalysisStore,
+  outsideEstimates: OutsideEstimateStore,
   results: ResultStore,
   reports: ReportStore,
   reportPins: ReportPinStore,

@@ -3,6 +3,7 @@ import { dataRoutes } from './data/data-routes';
 import { uploadRoutes } from './data/upload-routes';
 import { analysisRoutes } from './analyses/analysis-routes';
 import { houseStyleRoutes } from './house-styles/house-style-routes';
+import { outsideEstimateRoutes } from './outside-estimates/outside-estimate-routes';
 import { exportRoutes } from './reports/export-routes';
 import { draftRoutes } from './reports/draft-routes';
 import { reportRoutes } from './reports/report-routes';
@@ -43,6 +44,7 @@ export const ROUTES: readonly Route[] = [
   ...uploadRoutes,
   ...dataRoutes,
   ...analysisRoutes,
+  ...outsideEstimateRoutes,
   ...reportRoutes,
   ...stepRoutes,
   ...draftRoutes,

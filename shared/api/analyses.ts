@@ -1,7 +1,12 @@
 import * as z from 'zod';
+import { EFFECT_MEASURE_IDS } from '#shared/effects/measure-ids';
 import type { AnalysisResult, AnalysisSpecification } from '#shared/analysis';
 
+import { outsideEstimateSchema } from './outside-estimates';
+
 const idSchema = z.string().min(1).max(100);
+
+const methodsByMeasureSchema = z.partialRecord(z.enum(EFFECT_MEASURE_IDS), idSchema);
 
 /** Shape of a specification; whether it fits its code book is `frameOf`'s to say. */
 export const analysisSpecificationSchema: z.ZodType<AnalysisSpecification> = z.object({
@@ -23,6 +28,13 @@ export const analysisSpecificationSchema: z.ZodType<AnalysisSpecification> = z.o
     riskRatio: idSchema,
     oddsRatio: idSchema,
   }),
+  otherMethods: z
+    .object({
+      contrastTest: idSchema.optional(),
+      poolings: methodsByMeasureSchema.optional(),
+      homogeneities: methodsByMeasureSchema.optional(),
+    })
+    .optional(),
   adjustment: z.enum(['crude', 'mantelHaenszel']),
   trendScores: z.record(z.string(), z.number()).nullable(),
   standing: z.object({
@@ -67,6 +79,8 @@ export const analysisViewSchema = analysisSummarySchema.extend({
   cutDataDate: z.string(),
   resultId: z.string(),
   result: z.custom<AnalysisResult>((value) => typeof value === 'object' && value !== null),
+  /** Adjusted estimates that models outside computed, in the order of entry. */
+  outside: z.array(outsideEstimateSchema).optional(),
   /** Why it can't be computed under the present code book, in words; null when it can. */
   problem: z.string().nullable().optional(),
   changes: z.array(

@@ -56,6 +56,12 @@ export type {
   CodeBookChangeRequest,
   RecordsPage,
 } from './data';
+export {
+  outsideEstimateChangeRequestSchema,
+  outsideEstimateEntrySchema,
+  outsideEstimateSchema,
+} from './outside-estimates';
+export type { OutsideEstimateChangeRequest } from './outside-estimates';
 export { fieldProblemSchema, problemSchema } from './problem';
 export type { Problem } from './problem';
 export {

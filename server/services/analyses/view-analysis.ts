@@ -32,6 +32,7 @@ export async function viewAnalysis(
     cutDataDate: cut.dataDate,
     resultId: result.id,
     result: result.content,
+    outside: [...(await dependencies.database.stores.outsideEstimates.ofAnalyses([analysisId]))],
     problem: await problemNow(dependencies, study, cut, version),
     changes: await changesOf(dependencies, analysisId),
   };

@@ -9,16 +9,18 @@ export async function pinnedAnalyses(
   report: Pick<Report, 'pins'>,
   unit?: Unit,
 ): Promise<readonly PinnedAnalysis[]> {
-  const { results, cutFacts } = dependencies.database.stores;
+  const { results, cutFacts, outsideEstimates } = dependencies.database.stores;
   const found = await results.findMany(Object.values(report.pins), unit);
   const cuts = await cutFacts.of([...new Set(found.map(({ cutId }) => cutId))], unit);
+  const estimates = await outsideEstimates.ofAnalyses(Object.keys(report.pins), unit);
   return Promise.all(
     found.map(async (result) => {
       const cut = cuts.get(result.cutId);
       if (cut === undefined) throw new Error(`The cut of result ${result.id} is gone.`);
       const { id, number, dataDate } = cut;
       const words = await wordsOf(dependencies, result, unit);
-      return { ...words, cut: { id, number, dataDate }, result: result.content };
+      const outside = estimates.filter(({ analysisId }) => analysisId === result.analysisId);
+      return { ...words, cut: { id, number, dataDate }, result: result.content, outside };
     }),
   );
 }

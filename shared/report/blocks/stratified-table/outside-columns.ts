@@ -15,9 +15,8 @@ const COLUMN_WEIGHT = 17;
 const PARTS = 3;
 
 /**
- * The columns of estimates from elsewhere, one for each measure of each model, in the order in which
- * they were entered. Those against another reference than the result's, or with a level that is
- * gone, compare something else than the rows do and are left out.
+ * The columns of estimates from elsewhere, one for each measure of each model, in the order of
+ * entry; only those that compare what the rows compare.
  */
 export function outsideColumns(
   { outside: isShown }: Pick<TableChoice, 'outside'>,
