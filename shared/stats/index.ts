@@ -67,14 +67,18 @@ export {
   RISK_DIFFERENCE_HOMOGENEITIES,
   RISK_RATIO_HOMOGENEITIES,
   cochranMantelHaenszel,
+  generalAssociation,
   issueOfOddsRatioStratum,
   issueOfRiskRatioStratum,
   partStrata,
   pooledOddsRatio,
   pooledRiskDifference,
   pooledRiskRatio,
+  rowMeanScores,
+  scoreCorrelation,
 } from './stratified';
 export type {
+  ContingencyStratum,
   ContinuityCorrection,
   HomogeneityMethod,
   HomogeneityTest,
@@ -84,6 +88,8 @@ export type {
   PooledRiskRatioId,
   PoolingMethod,
   StrataUsed,
+  StratifiedContingency,
+  TableScores,
   UnusedStratum,
 } from './stratified';
 export {

@@ -1,6 +1,7 @@
 import type { MethodWords } from './intervals';
 import { PAIRED_TESTS } from './pairs';
 import {
+  GENERALISED_TESTS,
   ODDS_RATIO_HOMOGENEITIES,
   POOLED_ODDS_RATIOS,
   POOLED_RISK_DIFFERENCES,
@@ -38,6 +39,7 @@ export const TEST_METHODS = {
       'Mantel N, Haenszel W. Statistical aspects of the analysis of data from retrospective ' +
       'studies of disease. Journal of the National Cancer Institute 1959;22:719-748.',
   },
+  ...GENERALISED_TESTS,
   ...ODDS_RATIO_HOMOGENEITIES,
   ...RISK_DIFFERENCE_HOMOGENEITIES,
   ...PAIRED_TESTS,

@@ -23,3 +23,10 @@ export type {
   PooledRiskRatioId,
   PoolingMethod,
 } from './poolings';
+export {
+  GENERALISED_TESTS,
+  generalAssociation,
+  rowMeanScores,
+  scoreCorrelation,
+} from './generalised';
+export type { ContingencyStratum, StratifiedContingency, TableScores } from './generalised';
