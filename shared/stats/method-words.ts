@@ -1,4 +1,5 @@
 import type { MethodWords } from './intervals';
+import { DIFFERENCES_OF_DIFFERENCES, EXCESS_RISK, RATIO_OF_RATIOS } from './interaction';
 import { PAIRED_TESTS } from './pairs';
 import {
   GENERALISED_TESTS,
@@ -22,14 +23,6 @@ export const TEST_METHODS = {
       'Freeman GH, Halton JH. Note on an exact treatment of contingency, goodness of fit and ' +
       'other problems of significance. Biometrika 1951;38:141-149.',
   },
-  likelihoodRatio: {
-    id: 'likelihoodRatio',
-    label: 'Likelihood-ratio chi-square test',
-    shortLabel: 'likelihood ratio',
-    citation:
-      'Wilks SS. The likelihood test of independence in contingency tables. ' +
-      'Annals of Mathematical Statistics 1935;6:190-196.',
-  },
   ...TREND_TESTS,
   cochranMantelHaenszel: {
     id: 'cochranMantelHaenszel',
@@ -43,6 +36,9 @@ export const TEST_METHODS = {
   ...ODDS_RATIO_HOMOGENEITIES,
   ...RISK_DIFFERENCE_HOMOGENEITIES,
   ...PAIRED_TESTS,
+  ...DIFFERENCES_OF_DIFFERENCES,
+  ratioOfRatios: RATIO_OF_RATIOS,
+  excessRisk: EXCESS_RISK,
 } as const satisfies Readonly<Record<string, MethodWords>>;
 
 /** Id of a test. */

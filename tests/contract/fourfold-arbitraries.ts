@@ -31,6 +31,12 @@ export const group: fc.Arbitrary<GroupCount> = fc.oneof(
 /** Tables with zero cells as often as they come. */
 export const fourfold: fc.Arbitrary<FourfoldTable> = fc.record({ index: group, reference: group });
 
+/** Tables of at most 12 and 12, zero cells as often as they come. */
+export const smallFourfold: fc.Arbitrary<FourfoldTable> = fc.record({
+  index: groups(12),
+  reference: groups(12),
+});
+
 const filledGroup = fc
   .integer({ min: 2, max: 3000 })
   .chain((total) =>
