@@ -146,3 +146,19 @@ export {
 } from './tables-of-any-size';
 export { TREND_TESTS, cochranArmitage, linearByLinear } from './trend';
 export type { ScoredTable, TrendTest, TrendTestId } from './trend';
+export {
+  DIFFERENCES_OF_DIFFERENCES,
+  EXCESS_RISK,
+  RATIO_OF_RATIOS,
+  excessRisk,
+  ratioOfRatios,
+} from './interaction';
+export type {
+  DifferenceOfDifferences,
+  ExcessFrom,
+  Interaction,
+  RatioCompared,
+  TwoFactorCounts,
+} from './interaction';
+export { STANDARDISATION, standardisedRisks, weightedStrata } from './standardised';
+export type { StandardPopulation, StandardisedRisks, WeightedStratum } from './standardised';

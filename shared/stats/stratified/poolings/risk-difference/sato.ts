@@ -9,7 +9,7 @@ import type { PoolingMethod } from '../pooling-method';
  * in which both groups hold someone: `noInformativeStratum`.
  *
  * Source: Sato (1989) Biometrics 45:1323-1324.
- * Example: 8/106 v 5/120 and 22/98 v 16/85 at level 0.95 give 0.0349 (-0.0315 to 0.1013).
+ * Example: 8/106 v 5/120 and 22/98 v 16/85 at level 0.95 give 0.0349 (-0.0276 to 0.0974).
  */
 export const sato = {
   id: 'sato',
