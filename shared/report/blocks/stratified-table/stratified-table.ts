@@ -50,7 +50,7 @@ function emptyContent({ analysis }: EmptyContentContext): StratifiedTableContent
       oddsRatio: analysis?.result.frame.design === 'caseControl',
       crude: false,
       pooled: analysis?.result.specification.adjustment === 'mantelHaenszel',
-      outside: false,
+      outside: (analysis?.outside?.length ?? 0) > 0,
       trend: analysis?.result.frame.exposure.ordered ?? false,
     },
     layout: 'auto',

@@ -18,6 +18,7 @@ import { EmptyState } from '../../ui/status/empty-state';
 import { ProblemPanel } from '../../ui/status/problem-panel';
 import { counted } from '../../ui/words';
 import { ContrastPanel } from '../contrast/contrast-panel';
+import { OutsidePanel } from '../outside/outside-panel';
 import { CountsPanel } from '../panels/counts-panel';
 import { EstimatesPanel } from '../panels/estimates-panel';
 import { GuardsPanel } from '../panels/guards-panel';
@@ -25,6 +26,9 @@ import { MethodsPanel } from '../panels/methods-panel';
 import { PooledPanel } from '../panels/pooled-panel';
 import { SayPanel } from '../panels/say-panel';
 import { SettingPanel } from '../panels/setting-panel';
+import { Computing } from '../computing/computing';
+import { SlowResults } from '../computing/slow-results';
+import { MethodAnswers } from '../methods/method-answers';
 import { AnalysisKeeper } from './analysis-keeper';
 import { BenchLoader } from './bench-loader';
 import { BenchStore } from './bench-store';
@@ -45,6 +49,7 @@ import { StaleAnalysis } from './stale-analysis';
     EstimatesPanel,
     GuardsPanel,
     MethodsPanel,
+    OutsidePanel,
     PooledPanel,
     ProblemPanel,
     RouterLink,
@@ -52,7 +57,15 @@ import { StaleAnalysis } from './stale-analysis';
     SettingPanel,
     StaleAnalysis,
   ],
-  providers: [AnalysisKeeper, BenchLoader, BenchStore, CountsStore],
+  providers: [
+    AnalysisKeeper,
+    BenchLoader,
+    BenchStore,
+    Computing,
+    CountsStore,
+    MethodAnswers,
+    SlowResults,
+  ],
   templateUrl: './bench-page.html',
   styleUrl: './bench-page.scss',
   host: { '(window:beforeunload)': 'warn($event)' },

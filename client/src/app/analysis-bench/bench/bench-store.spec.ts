@@ -7,7 +7,10 @@ import { beforeEach, expect, it } from 'vitest';
 import { ApiProblem } from '../../server-api/api-problem';
 import { DataApi } from '../../server-api/data-api';
 import { CurrentStudy } from '../../session/current-study';
+import { Computing, COMPUTING_WORKER } from '../computing/computing';
+import { SlowResults } from '../computing/slow-results';
 import { withMethod, withReference, withStratumToggled } from '../draft/analysis-draft';
+import { OwnWorker } from '../testing/own-worker';
 import { CODE_BOOK, OUTCOME, SPECIFICATION, TALLY } from '../testing/wet-work';
 import { BenchStore } from './bench-store';
 import { CountsStore } from './counts-store';
@@ -15,6 +18,7 @@ import { CountsStore } from './counts-store';
 let asked: TallyRequest[];
 let answer: () => Observable<Tally>;
 let store: BenchStore;
+let worker: OwnWorker;
 
 const study = {
   id: 's',
@@ -26,6 +30,7 @@ const study = {
 
 beforeEach(() => {
   asked = [];
+  worker = new OwnWorker();
   answer = () => of(TALLY);
   const api: Pick<DataApi, 'count'> = {
     count: (_studyId, _cutId, request) => {
@@ -36,7 +41,10 @@ beforeEach(() => {
   TestBed.configureTestingModule({
     providers: [
       BenchStore,
+      Computing,
       CountsStore,
+      SlowResults,
+      { provide: COMPUTING_WORKER, useValue: () => worker },
       { provide: DataApi, useValue: api },
       { provide: CurrentStudy, useValue: { study: signal(study), may: () => true } },
     ],
@@ -102,6 +110,30 @@ it('says why counting was refused, and counts again when asked to', () => {
   });
   answer = () => of(TALLY);
   store.countAgain();
+  expect(store.state().kind).toBe('computed');
+});
+
+it('leaves methods that take their time to the worker, and keeps the last result in view', () => {
+  store.draft.set(SPECIFICATION);
+  settle();
+  store.change((draft) => withMethod(draft, 'riskDifference', 'chanZhang'));
+  settle();
+  expect(store.state().kind).toBe('counting');
+  const before = store.result()?.crude.contrasts[0]?.measures.riskDifference;
+  expect(before).toMatchObject({ value: { interval: { method: 'newcombe' } } });
+  worker.answer();
+  expect(store.state().kind).toBe('computed');
+  const after = store.result()?.crude.contrasts[0]?.measures.riskDifference;
+  expect(after).toMatchObject({ value: { interval: { method: 'chanZhang' } } });
+});
+
+it('says that a computation broke off, and computes again when asked to', () => {
+  store.draft.set(withMethod(SPECIFICATION, 'riskDifference', 'chanZhang'));
+  settle();
+  worker.break();
+  expect(store.state().kind).toBe('broken');
+  store.computeAgain();
+  worker.answer();
   expect(store.state().kind).toBe('computed');
 });
 

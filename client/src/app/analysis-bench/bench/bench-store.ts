@@ -14,6 +14,7 @@ import {
   frameOf,
   type ResultFrame,
   type ResultScope,
+  takesTime,
   tallyRequestOf,
 } from '#shared/analysis';
 import type { AnalysisView, CodeBookView, CutView, DataSetView } from '#shared/api';
@@ -25,23 +26,26 @@ import { PHRASEBOOK } from '../../ui/phrasebook';
 import { type AnalysisDraft, emptyDraft, specificationOf } from '../draft/analysis-draft';
 import { benchPrint } from '../print/bench-print';
 import { columnById } from '../draft/column-choices';
+import { SlowResults, type WantedResult } from '../computing/slow-results';
 import { CountsStore, wantedCounts, type WantedCounts } from './counts-store';
 import { type CutPlace, cutPlaceOf } from './cut-place';
 import { repeatedIdentifiers } from './repeated-identifiers';
 import { sameScope, scopesOf } from './result-scopes';
 
-/** Where the bench stands: nothing to compute yet, counting, computed, or why it cannot. */
+/** Where the bench stands: nothing to compute yet, at work, computed, or why it cannot. */
 export type BenchState =
   | { readonly kind: 'unpicked' }
   | { readonly kind: 'counting' }
   | { readonly kind: 'refused'; readonly problem: ApiProblem }
   | { readonly kind: 'impossible'; readonly issue: AnalysisIssue }
+  | { readonly kind: 'broken' }
   | { readonly kind: 'computed'; readonly result: AnalysisResult };
 
 /** The analysis on the bench. Everything follows `draft`; only counts come from the server. */
 @Injectable()
 export class BenchStore {
   private readonly counts = inject(CountsStore);
+  private readonly slow = inject(SlowResults);
   private readonly current = inject(CurrentStudy);
   private readonly book = inject(PHRASEBOOK);
 
@@ -79,6 +83,7 @@ export class BenchStore {
   readonly wanted = computed<WantedCounts | null>(() => this.findWanted(), {
     equal: (one, other) => one?.key === other?.key,
   });
+  private readonly wantedResult = computed<WantedResult | null>(() => this.findWantedResult());
   readonly state = computed<BenchState>(() => this.findState());
 
   /** The last result, kept in view while the next is counted. */
@@ -86,7 +91,7 @@ export class BenchStore {
     source: this.state,
     computation: (state, before) => {
       if (state.kind === 'computed') return state.result;
-      return state.kind === 'counting' ? (before?.value ?? null) : null;
+      return state.kind === 'counting' || state.kind === 'broken' ? (before?.value ?? null) : null;
     },
   });
 
@@ -135,6 +140,14 @@ export class BenchStore {
         });
       }
     });
+    effect(() => {
+      const wanted = this.wantedResult();
+      if (wanted !== null && takesTime(wanted.specification)) {
+        untracked(() => {
+          this.slow.want(wanted);
+        });
+      }
+    });
   }
 
   change(change: (draft: AnalysisDraft) => AnalysisDraft): void {
@@ -144,6 +157,11 @@ export class BenchStore {
   countAgain(): void {
     const wanted = this.wanted();
     if (wanted !== null) this.counts.again(wanted);
+  }
+
+  computeAgain(): void {
+    const wanted = this.wantedResult();
+    if (wanted !== null) this.slow.want(wanted);
   }
 
   private indexLevelIds(): readonly string[] {
@@ -169,9 +187,37 @@ export class BenchStore {
     if (wanted === null) return { kind: 'unpicked' };
     const counts = this.counts.known().get(wanted.key) ?? { kind: 'counting' };
     if (counts.kind !== 'counted') return counts;
-    const computed = computeAnalysis(specification, frame.value, counts.tally);
-    return computed.ok
-      ? { kind: 'computed', result: computed.value }
-      : { kind: 'impossible', issue: computed.issue };
+    const computing = this.wantedResult();
+    return computing === null ? { kind: 'counting' } : this.computedState(computing);
   }
+
+  /** Light methods at once; what takes its time comes from the worker. */
+  private computedState(wanted: WantedResult): BenchState {
+    const { specification, frame, tally } = wanted;
+    if (!takesTime(specification)) return stateOf(computeAnalysis(specification, frame, tally));
+    const state = this.slow.stateOf(wanted);
+    switch (state.kind) {
+      case 'computing':
+        return { kind: 'counting' };
+      case 'broken':
+        return { kind: 'broken' };
+      case 'computed':
+        return stateOf(state.result);
+    }
+  }
+
+  private findWantedResult(): WantedResult | null {
+    const [frame, specification, wanted] = [this.frame(), this.specification(), this.wanted()];
+    if (frame?.ok !== true || specification === null || wanted === null) return null;
+    const counts = this.counts.known().get(wanted.key);
+    if (counts?.kind !== 'counted') return null;
+    const key = JSON.stringify([wanted.key, specification, frame.value]);
+    return { key, specification, frame: frame.value, tally: counts.tally };
+  }
+}
+
+function stateOf(computed: Result<AnalysisResult, AnalysisIssue>): BenchState {
+  return computed.ok
+    ? { kind: 'computed', result: computed.value }
+    : { kind: 'impossible', issue: computed.issue };
 }

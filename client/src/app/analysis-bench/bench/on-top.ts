@@ -19,8 +19,11 @@ export function onTopOf(theirs: AnalysisView, mine: NamedDraft, base: AnalysisVi
   return { name: mine.name === base.name ? theirs.name : mine.name, specification };
 }
 
+/** A part that is left out here and was there before was taken away here. */
 function changedParts<Whole extends object>(theirs: Whole, mine: Whole, base: Whole): Whole {
-  const keys = Object.keys(mine) as (keyof Whole)[];
+  const keys = [...new Set([...Object.keys(mine), ...Object.keys(base)])] as (keyof Whole)[];
   const changed = keys.filter((key) => JSON.stringify(mine[key]) !== JSON.stringify(base[key]));
-  return { ...theirs, ...Object.fromEntries(changed.map((key) => [key, mine[key]])) };
+  const merged = { ...theirs, ...Object.fromEntries(changed.map((key) => [key, mine[key]])) };
+  const entries = Object.entries(merged).filter(([, value]) => value !== undefined);
+  return Object.fromEntries(entries) as Whole;
 }

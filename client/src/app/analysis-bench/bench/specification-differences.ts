@@ -51,6 +51,7 @@ function describedParts(
         .join('; ') || 'all',
     'Confidence level': `${Number((level * 100).toPrecision(12))}%`,
     'Interval methods': methodLabels(methods).join(', '),
+    'Over the strata': overStrata(specification).join(', ') || 'the usual methods',
     Adjustment: adjustment === 'crude' ? 'none' : 'Mantel–Haenszel',
     'Trend scores': trendScores === null ? '1, 2, 3 …' : Object.values(trendScores).join(', '),
     Standing: [
@@ -59,6 +60,16 @@ function describedParts(
       standing.analysisSet,
     ].join(', '),
   };
+}
+
+/** How each measure is pooled, and how the strata are compared on it. */
+function overStrata({ otherMethods }: AnalysisDraft): readonly string[] {
+  return EFFECT_MEASURE_IDS.flatMap((id) => {
+    const { poolings, homogeneities } = EFFECT_MEASURES[id];
+    const pooling = poolings[otherMethods?.poolings?.[id] ?? ''];
+    const test = homogeneities[otherMethods?.homogeneities?.[id] ?? ''];
+    return [pooling, test].flatMap((method) => (method === undefined ? [] : [method.label]));
+  });
 }
 
 function methodLabels(methods: AnalysisDraft['methods']): readonly string[] {

@@ -6,9 +6,11 @@ import {
   specificationOf,
   withEventLevelToggled,
   withExposure,
+  withHomogeneity,
   withMethod,
   withOutcomeColumn,
   withOutcomeWords,
+  withPooling,
   withReference,
   withRestriction,
   withStratumToggled,
@@ -106,6 +108,22 @@ it('replaces and removes a restriction', () => {
 it('tells whether anything was changed', () => {
   expect(isSameDraft(contrast, withReference(contrast, 'none'))).toBe(true);
   expect(isSameDraft(contrast, withMethod(contrast, 'riskDifference', 'wald'))).toBe(false);
+});
+
+it('writes other methods down only where they are not the usual ones', () => {
+  const pooled = withPooling(contrast, 'oddsRatio', 'exactConditional');
+  const both = withHomogeneity(pooled, 'oddsRatio', 'woolf');
+  expect(both.otherMethods).toEqual({
+    poolings: { oddsRatio: 'exactConditional' },
+    homogeneities: { oddsRatio: 'woolf' },
+  });
+  const back = withHomogeneity(
+    withPooling(both, 'oddsRatio', 'robinsBreslowGreenland'),
+    'oddsRatio',
+    'breslowDayTarone',
+  );
+  expect(isSameDraft(back, contrast)).toBe(true);
+  expect(back).not.toHaveProperty('otherMethods');
 });
 
 it('offers columns that have levels', () => {

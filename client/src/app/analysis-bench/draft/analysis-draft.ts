@@ -2,9 +2,11 @@ import {
   type AnalysisSpecification,
   defaultSpecification,
   keptLevels,
+  type OtherMethodChoice,
   reverseContrast,
 } from '#shared/analysis';
 import type { CodeBook, CodeBookColumn } from '#shared/code-book';
+import { EFFECT_MEASURES, type EffectMeasureId } from '#shared/effects';
 import { likelyEventLevels } from './likely-event-levels';
 
 /** A specification of which parts may not be picked yet; those are null. */
@@ -116,6 +118,55 @@ export function withMethod(
   methodId: string,
 ): AnalysisDraft {
   return { ...draft, methods: { ...draft.methods, [estimand]: methodId } };
+}
+
+/** The draft with a measure pooled in another way; the usual way is not written down. */
+export function withPooling(
+  draft: AnalysisDraft,
+  measure: EffectMeasureId,
+  poolingId: string,
+): AnalysisDraft {
+  const usual = EFFECT_MEASURES[measure].defaultPoolingId;
+  return withOther(draft, {
+    poolings: chosenBut(draft.otherMethods?.poolings, measure, poolingId, usual),
+  });
+}
+
+/** The draft with another test of whether a measure is the same in all strata. */
+export function withHomogeneity(
+  draft: AnalysisDraft,
+  measure: EffectMeasureId,
+  homogeneityId: string,
+): AnalysisDraft {
+  const usual = EFFECT_MEASURES[measure].defaultHomogeneityId;
+  return withOther(draft, {
+    homogeneities: chosenBut(draft.otherMethods?.homogeneities, measure, homogeneityId, usual),
+  });
+}
+
+type ByMeasure = Readonly<Partial<Record<EffectMeasureId, string>>>;
+
+function chosenBut(
+  chosen: ByMeasure | undefined,
+  measure: EffectMeasureId,
+  id: string,
+  usual: string,
+): ByMeasure {
+  const { [measure]: _before, ...others } = chosen ?? {};
+  return id === usual ? others : { ...others, [measure]: id };
+}
+
+/** Only what is not usual is kept, so that going back gives the same draft as before. */
+function withOther(draft: AnalysisDraft, change: OtherMethodChoice): AnalysisDraft {
+  const { otherMethods, ...rest } = draft;
+  const kept = Object.entries({ ...otherMethods, ...change }).filter(
+    ([, value]) => value !== undefined && !(typeof value === 'object' && isEmpty(value)),
+  );
+  return kept.length === 0 ? rest : { ...rest, otherMethods: Object.fromEntries(kept) };
+}
+
+function isEmpty(value: object): boolean {
+  return Object.keys(value).length === 0;
 }
 
 /** Whether two drafts say the same analysis. */

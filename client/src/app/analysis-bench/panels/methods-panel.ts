@@ -6,9 +6,11 @@ import { columnHeads } from '#shared/wording';
 import { FramingGlyph } from '../../ui/framing/framing-glyph';
 import { BenchStore } from '../bench/bench-store';
 import { levelLabel, scopeLabel } from '../bench/result-scopes';
-import { withMethod } from '../draft/analysis-draft';
+import { withMethod, withPooling } from '../draft/analysis-draft';
 import { shownMeasures } from '../print/bench-print';
-import { measureGroups, type MethodGroup, riskGroup } from '../print/method-rows';
+import type { MethodGroup, MethodRow } from '../methods/method-group';
+import { measureGroups, poolingGroups, riskGroup } from '../methods/method-groups';
+import { type AnswerState, MethodAnswers } from '../methods/method-answers';
 
 /** The interval methods side by side, drawn on one axis; the chosen one holds for all strata. */
 @Component({
@@ -20,19 +22,22 @@ import { measureGroups, type MethodGroup, riskGroup } from '../print/method-rows
 })
 export class MethodsPanel {
   protected readonly store = inject(BenchStore);
+  private readonly answers = inject(MethodAnswers);
 
-  /** A pooled estimate has an interval of its own; the methods are for one table of counts. */
-  protected readonly scope = computed<ResultScope>(() =>
-    this.store.scope().kind === 'pooled' ? { kind: 'crude' } : this.store.scope(),
-  );
+  protected readonly scope = computed<ResultScope>(() => this.store.scope());
+  protected readonly isPooled = computed(() => this.scope().kind === 'pooled');
   protected readonly groups = computed<readonly MethodGroup[]>(() => {
     const print = this.store.print();
     if (print === null) return [];
     const [scope, levelId] = [this.scope(), this.store.levelId()];
     const measures = shownMeasures(print.result);
+    if (this.isPooled()) return poolingGroups(print, measures, levelId);
     const risk =
       print.result.frame.design === 'caseControl' ? null : riskGroup(print, scope, levelId);
-    return [...measureGroups(print, measures, scope, levelId), ...(risk === null ? [] : [risk])];
+    const groups = measureGroups(print, measures, { scope, levelId }, (question) =>
+      this.answers.known(question),
+    );
+    return [...groups, ...(risk === null ? [] : [risk])];
   });
   protected readonly about = computed(() => {
     const print = this.store.print();
@@ -67,6 +72,19 @@ export class MethodsPanel {
   }
 
   protected choose(group: MethodGroup, methodId: string): void {
-    this.store.change((draft) => withMethod(draft, group.estimand, methodId));
+    const { estimand } = group;
+    this.store.change((draft) =>
+      this.isPooled() && estimand !== 'risk'
+        ? withPooling(draft, estimand, methodId)
+        : withMethod(draft, estimand, methodId),
+    );
+  }
+
+  protected progressOf({ question }: MethodRow): AnswerState['kind'] | 'open' {
+    return (question && this.answers.stateOf(question)?.kind) ?? 'open';
+  }
+
+  protected compute({ question }: MethodRow): void {
+    if (question !== null) this.answers.ask(question);
   }
 }

@@ -1,9 +1,11 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import { findGuards } from '#shared/analysis';
+import { findGuards, homogeneityId, poolingId } from '#shared/analysis';
+import { EFFECT_MEASURES, type EffectMeasureId } from '#shared/effects';
 import { columnHeads, guardWords, homogeneityWords } from '#shared/wording';
 import { ScrollSideways } from '../../ui/scroll-sideways';
 import { BenchStore } from '../bench/bench-store';
 import { levelLabel } from '../bench/result-scopes';
+import { withHomogeneity } from '../draft/analysis-draft';
 import { shownMeasures } from '../print/bench-print';
 import { pooledRows, untestedWords } from '../print/pooled-rows';
 
@@ -41,6 +43,29 @@ export class PooledPanel {
     const print = this.store.print();
     return print === null ? '' : homogeneityWords(print.result, this.measures(), print.book);
   });
+  /** The pooling methods in use, each once. */
+  protected readonly poolings = computed(() => {
+    const specification = this.store.result()?.specification;
+    if (specification === undefined) return '';
+    const names = this.measures().map(
+      (id) => EFFECT_MEASURES[id].poolings[poolingId(specification, id)]?.shortLabel ?? '',
+    );
+    return [...new Set(names)].join('; ');
+  });
+  /** Tests of whether the strata differ, for measures that have several. */
+  protected readonly homogeneities = computed(() => {
+    const specification = this.store.result()?.specification;
+    const heads = this.heads();
+    if (specification === undefined || heads === null) return [];
+    return this.measures()
+      .map((measure) => ({
+        measure,
+        label: `Strata compared by, ${heads[measure]}`,
+        methods: Object.values(EFFECT_MEASURES[measure].homogeneities),
+        chosenId: homogeneityId(specification, measure),
+      }))
+      .filter(({ methods }) => methods.length > 1);
+  });
   protected readonly caption = computed(
     () => `Every level against ${this.against()}, pooled over ${this.over()}`,
   );
@@ -58,4 +83,9 @@ export class PooledPanel {
       .filter(({ guardId }) => guardId === 'stratumLeftOut')
       .map((finding) => guardWords(finding, analysis, print.style, print.book).sentence);
   });
+
+  protected chooseTest(measure: EffectMeasureId, event: Event): void {
+    const { value } = event.target as HTMLSelectElement;
+    this.store.change((draft) => withHomogeneity(draft, measure, value));
+  }
 }

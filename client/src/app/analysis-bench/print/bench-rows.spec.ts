@@ -3,7 +3,8 @@ import { CODE_BOOK, wetWorkPrint, wetWorkResult } from '../testing/wet-work';
 import { type PrintedEstimate, shownMeasures } from './bench-print';
 import { countsTable } from './counts-rows';
 import { estimateRows } from './estimate-rows';
-import { measureGroups, riskGroup } from './method-rows';
+import { measureGroups, poolingGroups, riskGroup } from '../methods/method-groups';
+import { answerTo } from '../methods/method-question';
 import { pooledRows } from './pooled-rows';
 import { isSparse } from './sparse-places';
 
@@ -69,19 +70,37 @@ it('lays every method of a measure on one axis, the chosen one marked', () => {
   const [difference, ratio] = measureGroups(
     print,
     ['riskDifference', 'riskRatio'],
-    KITCHEN,
-    'some',
+    { scope: KITCHEN, levelId: 'some' },
+    () => null,
   );
   expect(difference?.rows.map(({ methodId }) => methodId)).toContain('wald');
   expect(difference?.rows.filter(({ isChosen }) => isChosen)).toHaveLength(1);
   for (const group of [difference, ratio]) {
-    for (const { drawn } of group?.rows ?? []) {
+    for (const { drawn, question } of group?.rows ?? []) {
+      if (question !== null) continue;
       expect(drawn!.from).toBeGreaterThanOrEqual(0);
       expect(drawn!.from).toBeLessThan(drawn!.at);
       expect(drawn!.at).toBeLessThan(drawn!.to);
       expect(drawn!.to).toBeLessThanOrEqual(1);
     }
   }
+});
+
+it('leaves a method that takes its time to be asked for, and shows what it gave', () => {
+  const place = { scope: KITCHEN, levelId: 'some' };
+  const [open] = measureGroups(print, ['riskDifference'], place, () => null);
+  const row = open?.rows.find(({ question }) => question !== null);
+  expect(row).toMatchObject({ limits: null, drawn: null, isChosen: false });
+  const [known] = measureGroups(print, ['riskDifference'], place, answerTo);
+  const answered = known?.rows.find(({ methodId }) => methodId === row?.methodId);
+  expect(answered?.limits).toMatch(/^\S+ to \S+$/);
+});
+
+it('lays the ways to pool a measure on one axis', () => {
+  const [difference, ratio] = poolingGroups(print, ['riskDifference', 'riskRatio'], 'some');
+  expect(difference?.rows.map(({ methodId }) => methodId)).toEqual(['sato', 'greenlandRobins']);
+  expect(Number(difference?.value)).toBe(10);
+  expect(ratio?.rows.filter(({ isChosen }) => isChosen)).toHaveLength(1);
 });
 
 it('offers the methods of the risk of the level in view', () => {

@@ -78,6 +78,7 @@ function pinOf(analysis: AnalysisView): PinnedAnalysis {
     name,
     resultId,
     result,
+    outside: analysis.outside ?? [],
     cut: { id: cutId, number: cutNumber, dataDate: cutDataDate },
   };
 }

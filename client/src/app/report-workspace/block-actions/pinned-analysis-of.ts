@@ -10,5 +10,6 @@ export function pinnedAnalysisOf(view: AnalysisView): PinnedAnalysis {
     resultId: view.resultId,
     cut: { id: view.cutId, number: view.cutNumber, dataDate: view.cutDataDate },
     result: view.result,
+    outside: view.outside ?? [],
   };
 }
