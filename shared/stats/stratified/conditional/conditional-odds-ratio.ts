@@ -1,12 +1,13 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
+import type { ValueAndSlope } from '../../conditional/newton';
+import { zeroOfIncreasing } from '../../conditional/newton';
 import type { Estimate, EstimationIssue } from '../../estimate';
 import type { StratifiedTable } from '../../fourfold-table';
-import { zeroOfDecreasing } from '../../intervals/score/bisection';
 import { issueOfTest } from '../../tests-of-association/fourfold-issue';
 import { informativeStrata } from '../pooled-estimate';
 import type { ConditionalSupport, ConditionalTails } from './conditional-sum';
-import { FARTHEST, conditionalSum, conditionalSupport } from './conditional-sum';
+import { RANGE, conditionalSum, conditionalSupport } from './conditional-sum';
 
 /** The longest support that is summed: beyond, the approximation is as good and immediate. */
 const LONGEST_SUPPORT = 20_000;
@@ -19,7 +20,7 @@ export interface ConditionalLimits {
 
 /**
  * The conditional maximum likelihood estimate of a common odds ratio with limits from the tails of
- * its conditional distribution, by bisection to the last bit of its logarithm.
+ * its conditional distribution, by Newton steps on the logarithm of the ratio.
  */
 export function conditionalOddsRatio(
   strata: StratifiedTable,
@@ -53,20 +54,39 @@ function estimateOf(
   level: number,
   { method, shareOfObserved }: ConditionalLimits,
 ): Estimate {
-  const tails = conditionalSum(strata, support);
+  const { start, tailsAt } = conditionalSum(strata, support);
   const tail = (1 - level) / 2;
-  const withObserved = (outside: number, { at }: ConditionalTails): number =>
-    outside + shareOfObserved * at;
-  const root = (valueOf: (at: ConditionalTails) => number): number =>
-    Math.exp(zeroOfDecreasing((logRatio) => valueOf(tails(logRatio)), -FARTHEST, FARTHEST));
+  const root = (rising: (tails: ConditionalTails) => ValueAndSlope): number =>
+    Math.exp(zeroOfIncreasing((logRatio) => rising(tailsAt(logRatio)), start, RANGE));
   const none = support.observed === support.smallest;
   return {
-    value: none ? 0 : root(({ mean }) => support.observed - mean),
+    value: none ? 0 : root(meanDistance),
     interval: {
-      lower: none ? 0 : root((at) => tail - withObserved(at.above, at)),
-      upper: root((at) => withObserved(at.below, at) - tail),
+      lower: none ? 0 : root((tails) => upperTail(tails, shareOfObserved, tail)),
+      upper: root((tails) => lowerTail(tails, shareOfObserved, tail)),
       level,
       method,
     },
   };
+}
+
+/** The expected less the observed number; its slope is the variance. */
+function meanDistance({ momentBelow, momentAbove, variance }: ConditionalTails): ValueAndSlope {
+  return { value: momentBelow + momentAbove, slope: variance };
+}
+
+/** How far the probability of as many events or more lies above the wanted one. */
+function upperTail(tails: ConditionalTails, share: number, wanted: number): ValueAndSlope {
+  const { above, at, momentBelow, momentAbove } = tails;
+  const probability = above + share * at;
+  const slope = momentAbove - probability * (momentBelow + momentAbove);
+  return { value: probability - wanted, slope };
+}
+
+/** How far the probability of as many events or fewer lies below the wanted one. */
+function lowerTail(tails: ConditionalTails, share: number, wanted: number): ValueAndSlope {
+  const { below, at, momentBelow, momentAbove } = tails;
+  const probability = below + share * at;
+  const slope = probability * (momentBelow + momentAbove) - momentBelow;
+  return { value: wanted - probability, slope };
 }

@@ -7,8 +7,8 @@ import { zeroOfDecreasing } from '../../intervals/score/bisection';
 import type { WeightRun } from './weight-run';
 import { runAroundMode, sumOfRuns } from './weight-run';
 
-/** Half the width of a search on the log scale; e^60 is far beyond any ratio of counts. */
-export const FARTHEST = 60;
+/** The range of a search on the log scale; e^60 is far beyond any ratio of counts. */
+export const RANGE = [-60, 60] as const;
 
 /** The events of the index groups over all strata, with what they could have been. */
 export interface ConditionalSupport {
@@ -35,12 +35,22 @@ function urnOf(table: FourfoldTable): Urn {
   };
 }
 
-/** Probabilities of fewer events than observed, as many and more, with the mean, at some ratio. */
+/** Probabilities of fewer events than observed, as many and more, at some ratio, with moments. */
 export interface ConditionalTails {
   readonly below: number;
   readonly at: number;
   readonly above: number;
-  readonly mean: number;
+  /** Sums of probability times distance from the observed number, on either side. */
+  readonly momentBelow: number;
+  readonly momentAbove: number;
+  readonly variance: number;
+}
+
+/** The distribution of the index groups' events by the logarithm of the common odds ratio. */
+export interface ConditionalSum {
+  /** A ratio near the estimate. */
+  readonly start: number;
+  readonly tailsAt: (logRatio: number) => ConditionalTails;
 }
 
 /**
@@ -53,11 +63,12 @@ export interface ConditionalTails {
 export function conditionalSum(
   strata: StratifiedTable,
   support: ConditionalSupport,
-): (logRatio: number) => ConditionalTails {
+): ConditionalSum {
   const start = startingRatio(strata, support);
   const run = sumOfRuns(strata.map(({ table }) => noncentralRun(urnOf(table), Math.exp(start))));
   const logWeights = run.weights.map((weight) => Math.log(weight));
-  return (logRatio) => tailsOf(run.first, logWeights, logRatio - start, support.observed);
+  const first = run.first - support.observed;
+  return { start, tailsAt: (logRatio) => tailsOf(first, logWeights, logRatio - start) };
 }
 
 /** About where the expected events are the observed ones, half an event inside the support. */
@@ -68,8 +79,7 @@ function startingRatio(strata: StratifiedTable, support: ConditionalSupport): nu
     (logRatio) =>
       strata.reduce((sum, { table }) => sum + fitOddsRatio(table, logRatio).deviation, 0) +
       (inside - observed),
-    -FARTHEST,
-    FARTHEST,
+    ...RANGE,
   );
 }
 
@@ -82,32 +92,40 @@ function noncentralRun(urn: Urn, ratio: number): WeightRun {
   );
 }
 
-function tailsOf(
-  first: number,
-  logWeights: Float64Array,
-  tilt: number,
-  observed: number,
-): ConditionalTails {
-  const largest = logWeights.reduce((most, log, place) => Math.max(most, log + place * tilt), -1e9);
-  const sums = { below: 0, at: 0, above: 0, moment: 0 };
+/** `first` is the distance of the first weight's count from the observed one. */
+function tailsOf(first: number, logWeights: Float64Array, tilt: number): ConditionalTails {
+  const heaviest = largestTilted(logWeights, tilt);
+  const sums = { below: 0, at: 0, above: 0, momentBelow: 0, momentAbove: 0, squares: 0 };
   for (let place = 0; place < logWeights.length; place += 1) {
-    const weight = Math.exp((logWeights[place] as number) + place * tilt - largest);
-    const side = sideOf(first + place, observed);
-    sums[side] += weight;
-    sums.moment += weight * place;
+    const weight = Math.exp((logWeights[place] as number) + place * tilt - heaviest);
+    const distance = first + place;
+    sums.squares += weight * distance * distance;
+    if (distance < 0) {
+      sums.below += weight;
+      sums.momentBelow += weight * distance;
+    } else if (distance > 0) {
+      sums.above += weight;
+      sums.momentAbove += weight * distance;
+    } else {
+      sums.at = weight;
+    }
   }
   const total = sums.below + sums.at + sums.above;
+  const mean = (sums.momentBelow + sums.momentAbove) / total;
   return {
     below: sums.below / total,
     at: sums.at / total,
     above: sums.above / total,
-    mean: first + sums.moment / total,
+    momentBelow: sums.momentBelow / total,
+    momentAbove: sums.momentAbove / total,
+    variance: sums.squares / total - mean * mean,
   };
 }
 
-function sideOf(count: number, observed: number): 'below' | 'at' | 'above' {
-  if (count === observed) {
-    return 'at';
+function largestTilted(logWeights: Float64Array, tilt: number): number {
+  let largest = -Infinity;
+  for (let place = 0; place < logWeights.length; place += 1) {
+    largest = Math.max(largest, (logWeights[place] as number) + place * tilt);
   }
-  return count < observed ? 'below' : 'above';
+  return largest;
 }

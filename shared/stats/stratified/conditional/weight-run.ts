@@ -4,8 +4,8 @@ export interface WeightRun {
   readonly weights: Float64Array;
 }
 
-/** Weights below this share of the largest are cut off; tails that matter are far above. */
-const SMALLEST = 1e-75;
+/** Weights below this share of the largest, 15 standard errors away, are cut off. */
+const SMALLEST = 1e-50;
 
 /**
  * The weights of counts whose neighbours stand in a falling ratio, walked outwards from the mode.
