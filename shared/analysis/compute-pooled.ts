@@ -3,6 +3,7 @@ import { EFFECT_MEASURES, EFFECT_MEASURE_IDS } from '#shared/effects';
 import type { EffectMeasureId } from '#shared/effects';
 import { cochranMantelHaenszel } from '#shared/stats';
 import type { HomogeneityTest, StratifiedTable } from '#shared/stats';
+import { homogeneityId, poolingId } from './chosen-methods';
 import type { PooledContrastResult, ResultFrame, StratumLeftOut } from './analysis-result';
 import { byMeasure, ifGiven, tableOf } from './compute-layer';
 import type { AnalysisSpecification } from './specification';
@@ -10,23 +11,26 @@ import type { AnalysisCounts } from './tables';
 
 /** One level against the reference, pooled over strata, with what was left out of which number. */
 export function computePooled(
-  { level }: AnalysisSpecification,
+  specification: AnalysisSpecification,
   frame: ResultFrame,
   counts: AnalysisCounts,
   indexLevelId: string,
 ): PooledContrastResult {
+  const { level } = specification;
   const { referenceLevelId } = frame.exposure;
   const strata: StratifiedTable = [...counts.strata].map(([id, layer]) => ({
     id,
     table: tableOf(layer, indexLevelId, referenceLevelId),
   }));
-  const homogeneity = byMeasure((id) => homogeneityOf(id, frame, strata));
-  const measureLeftOut = byMeasure((id) => leftOutOf(id, frame, strata));
+  const homogeneity = byMeasure((id) => homogeneityOf(id, specification, frame, strata));
+  const measureLeftOut = byMeasure((id) => leftOutOf(id, specification, frame, strata));
   return {
     indexLevelId,
     referenceLevelId,
     measures: byMeasure((id) =>
-      ifGiven(id, frame, () => EFFECT_MEASURES[id].pooled(strata, level)),
+      ifGiven(id, frame, () =>
+        EFFECT_MEASURES[id].pooled(strata, level, poolingId(specification, id)),
+      ),
     ),
     homogeneity: byMeasure((id) => homogeneity[id].outcome),
     conditionalIndependence: cochranMantelHaenszel(strata),
@@ -38,22 +42,26 @@ export function computePooled(
 
 function homogeneityOf(
   id: EffectMeasureId,
+  specification: AnalysisSpecification,
   frame: ResultFrame,
   strata: StratifiedTable,
 ): HomogeneityTest {
   const measure = EFFECT_MEASURES[id];
   return measure.givenBy(frame.design)
-    ? measure.homogeneity(strata)
+    ? measure.homogeneity(strata, homogeneityId(specification, id))
     : { outcome: failure({ code: 'notGivenByDesign' }), leftOut: [] };
 }
 
 function leftOutOf(
   id: EffectMeasureId,
+  specification: AnalysisSpecification,
   frame: ResultFrame,
   strata: StratifiedTable,
 ): readonly StratumLeftOut[] {
   const measure = EFFECT_MEASURES[id];
-  return measure.givenBy(frame.design) ? measure.uninformative(strata) : [];
+  return measure.givenBy(frame.design)
+    ? measure.uninformative(strata, poolingId(specification, id))
+    : [];
 }
 
 /** Strata that none of the measures which the design gives could use. */

@@ -10,6 +10,7 @@ export type {
   ResultFrame,
   StratumLeftOut,
 } from './analysis-result';
+export { contrastTestId, homogeneityId, poolingId, takesTime } from './chosen-methods';
 export { computeAnalysis } from './compute-analysis';
 export {
   DEFAULT_INTERVAL_METHODS,
@@ -44,6 +45,7 @@ export type {
   AnalysisSpecification,
   AnalysisStanding,
   IntervalMethodChoice,
+  OtherMethodChoice,
 } from './specification';
 export { tallyRequestOf } from './tally-request';
 export { isAddressFacet, isAddressedQuantity } from './value-address';

@@ -1,7 +1,8 @@
-import { EFFECT_MEASURE_IDS, hasInterval } from '#shared/effects';
+import { EFFECT_MEASURE_IDS, hasHomogeneity, hasInterval, hasPooling } from '#shared/effects';
 import { RISK_INTERVALS } from '#shared/stats';
 import type { RiskIntervalId } from '#shared/stats';
 import type { AnalysisIssue } from './analysis-issue';
+import { homogeneityId, poolingId } from './chosen-methods';
 import type { ResultFrame } from './analysis-result';
 import type { AnalysisSpecification } from './specification';
 
@@ -13,6 +14,7 @@ export function issueOfSpecification(
   return (
     issueOfLevel(specification.level) ??
     issueOfMethods(specification) ??
+    issueOfPooling(specification) ??
     issueOfScores(specification, frame) ??
     issueOfReference(specification, frame)
   );
@@ -29,6 +31,17 @@ function issueOfMethods({ methods }: AnalysisSpecification): AnalysisIssue | nul
   const wrong = EFFECT_MEASURE_IDS.find((id) => !hasInterval(id, methods[id]));
   return wrong
     ? { code: 'unknownMethod', facts: { estimand: wrong, methodId: methods[wrong] } }
+    : null;
+}
+
+function issueOfPooling(specification: AnalysisSpecification): AnalysisIssue | null {
+  const chosen = EFFECT_MEASURE_IDS.flatMap((id) => [
+    { id, methodId: poolingId(specification, id), has: hasPooling },
+    { id, methodId: homogeneityId(specification, id), has: hasHomogeneity },
+  ]);
+  const wrong = chosen.find(({ id, methodId, has }) => !has(id, methodId));
+  return wrong
+    ? { code: 'unknownMethod', facts: { estimand: wrong.id, methodId: wrong.methodId } }
     : null;
 }
 

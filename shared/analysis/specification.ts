@@ -1,3 +1,4 @@
+import type { EffectMeasureId } from '#shared/effects';
 import type { Restriction } from '#shared/tally';
 
 /** How several strata become one number. */
@@ -9,6 +10,19 @@ export interface IntervalMethodChoice {
   readonly riskDifference: string;
   readonly riskRatio: string;
   readonly oddsRatio: string;
+}
+
+/**
+ * The tests and the ways over strata chosen, by register id. What is left out is the usual one:
+ * `chosen-methods.ts` says which.
+ */
+export interface OtherMethodChoice {
+  /** The test of a contrast, by id in FOURFOLD_TESTS. */
+  readonly contrastTest?: string | undefined;
+  /** How a measure is pooled, by id in its `poolings`. */
+  readonly poolings?: Readonly<Partial<Record<EffectMeasureId, string>>> | undefined;
+  /** How the strata are compared on a measure, by id in its `homogeneities`. */
+  readonly homogeneities?: Readonly<Partial<Record<EffectMeasureId, string>>> | undefined;
 }
 
 /** Whether and how the analysis was foreseen. */
@@ -34,6 +48,7 @@ export interface AnalysisSpecification {
   readonly restrictions: readonly Restriction[];
   readonly level: number;
   readonly methods: IntervalMethodChoice;
+  readonly otherMethods?: OtherMethodChoice | undefined;
   readonly adjustment: Adjustment;
   /** Scores of the exposure levels by level id; null scores them 1, 2, 3 … in code-book order. */
   readonly trendScores: Readonly<Record<string, number>> | null;

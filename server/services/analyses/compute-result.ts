@@ -1,5 +1,4 @@
 import {
-  computeAnalysis,
   ENGINE_VERSION,
   frameOf,
   tallyRequestOf,
@@ -9,6 +8,7 @@ import {
   type ResultFrame,
 } from '#shared/analysis';
 import { issueWords } from '#shared/wording';
+import { compute } from '../../computing/compute-off-thread';
 import type { Dependencies } from '../../dependencies';
 import { refuse, refuseField, type Outcome, type ServerIssue } from '../../errors/server-issue';
 import type { CodeBookVersion } from '../../models/code-book/code-book-store';
@@ -47,7 +47,7 @@ export async function computeResult(
   const request = tallyRequestOf(specification);
   const tally = await countRecords(dependencies, cutId, codeBook.content, request);
   if (!tally.ok) return tally;
-  const result = computeAnalysis(specification, frame.value, tally.value);
+  const result = await compute({ specification, frame: frame.value, tally: tally.value });
   if (!result.ok) return refuse('analysisNotComputable', problemOf(dependencies, result.issue));
   const computed = { cut, codeBook, engineVersion: ENGINE_VERSION, content: result.value };
   return { ok: true, value: computed };

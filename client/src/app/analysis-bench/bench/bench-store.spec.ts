@@ -116,6 +116,7 @@ it('says why counting was refused, and counts again when asked to', () => {
 it('leaves methods that take their time to the worker, and keeps the last result in view', () => {
   store.draft.set(SPECIFICATION);
   settle();
+  expect(store.result()).not.toBeNull();
   store.change((draft) => withMethod(draft, 'riskDifference', 'chanZhang'));
   settle();
   expect(store.state().kind).toBe('counting');

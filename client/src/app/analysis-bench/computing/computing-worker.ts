@@ -1,4 +1,4 @@
-import { type ComputingTask, perform } from './computing-task';
+import { type ComputingAnswers, type ComputingTask, perform } from './computing-task';
 
 /** A task on its way to the worker, numbered so that its answer finds back. */
 export interface NumberedTask {
@@ -6,6 +6,13 @@ export interface NumberedTask {
   readonly task: ComputingTask;
 }
 
+/** What a numbered task gave. */
+export interface NumberedAnswer {
+  readonly number: number;
+  readonly answer: ComputingAnswers[ComputingTask['kind']];
+}
+
 addEventListener('message', ({ data }: MessageEvent<NumberedTask>) => {
-  postMessage({ number: data.number, answer: perform(data.task) });
+  const answer: NumberedAnswer = { number: data.number, answer: perform(data.task) };
+  postMessage(answer);
 });

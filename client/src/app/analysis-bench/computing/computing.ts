@@ -1,5 +1,6 @@
 import { DestroyRef, inject, Injectable, InjectionToken } from '@angular/core';
 import { Observable } from 'rxjs';
+import type { NumberedAnswer } from './computing-worker';
 import type { ComputingAnswers, ComputingTask } from './computing-task';
 
 /** Starts the worker; another one in tests. */
@@ -29,7 +30,7 @@ export class Computing {
     return new Observable((answers) => {
       const worker = (this.worker ??= this.start());
       const number = (this.tasks += 1);
-      const onMessage = ({ data }: MessageEvent): void => {
+      const onMessage = ({ data }: MessageEvent<NumberedAnswer>): void => {
         if (data.number !== number) return;
         answers.next(data.answer as ComputingAnswers[Kind]);
         answers.complete();

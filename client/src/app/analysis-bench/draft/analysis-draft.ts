@@ -152,21 +152,17 @@ function chosenBut(
   id: string,
   usual: string,
 ): ByMeasure {
-  const { [measure]: _before, ...others } = chosen ?? {};
-  return id === usual ? others : { ...others, [measure]: id };
+  const others = Object.entries(chosen ?? {}).filter(([key]) => key !== measure);
+  return Object.fromEntries(id === usual ? others : [...others, [measure, id]]);
 }
 
 /** Only what is not usual is kept, so that going back gives the same draft as before. */
 function withOther(draft: AnalysisDraft, change: OtherMethodChoice): AnalysisDraft {
   const { otherMethods, ...rest } = draft;
   const kept = Object.entries({ ...otherMethods, ...change }).filter(
-    ([, value]) => value !== undefined && !(typeof value === 'object' && isEmpty(value)),
+    ([, value]) => typeof value === 'string' || Object.keys(value).length > 0,
   );
   return kept.length === 0 ? rest : { ...rest, otherMethods: Object.fromEntries(kept) };
-}
-
-function isEmpty(value: object): boolean {
-  return Object.keys(value).length === 0;
 }
 
 /** Whether two drafts say the same analysis. */
