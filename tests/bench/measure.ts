@@ -3,6 +3,8 @@ import { mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 /** Wall times of repeated runs, in milliseconds. */
 export interface Timing {
   readonly median: number;
+  /** Three quarters of the runs take at most this. */
+  readonly upperQuartile: number;
   readonly lowest: number;
   readonly highest: number;
   readonly runs: number;
@@ -28,11 +30,8 @@ export function timed<Input>(
     const start = performance.now();
     work(input);
     return performance.now() - start;
-  })
-    .slice(warmUps)
-    .toSorted((one, other) => one - other);
-  const [lowest = 0] = times;
-  return { median: times[Math.floor(runs / 2)] ?? 0, lowest, highest: times.at(-1) ?? 0, runs };
+  });
+  return timingOf(times.slice(warmUps));
 }
 
 /** The same for work that is waited for. */
@@ -46,9 +45,20 @@ export async function timedWait(
     await work();
     if (run >= warmUps) times.push(performance.now() - start);
   }
-  times.sort((one, other) => one - other);
-  const [lowest = 0] = times;
-  return { median: times[Math.floor(runs / 2)] ?? 0, lowest, highest: times.at(-1) ?? 0, runs };
+  return timingOf(times);
+}
+
+/** Sums up the times of runs. */
+export function timingOf(times: readonly number[]): Timing {
+  const sorted = times.toSorted((one, other) => one - other);
+  const at = (share: number): number => sorted[Math.floor(share * (sorted.length - 1))] ?? 0;
+  return {
+    median: at(0.5),
+    upperQuartile: at(0.75),
+    lowest: at(0),
+    highest: at(1),
+    runs: times.length,
+  };
 }
 
 const FILE = 'coverage/bench.json';
