@@ -138,6 +138,7 @@ test('a report in hand: editors, menus and dialogs', async ({ page }) => {
   await page.getByRole('dialog', { name: 'Which value?' }).getByRole('list').waitFor();
   await expectAccessible(page);
   await page.keyboard.press('Escape');
+  await expect(page.getByRole('dialog')).toHaveCount(0);
   await report.leaveBlock();
 
   for (const name of ['Table 1', 'Figure 1', 'Effect sentence', 'Heading']) {
