@@ -31,7 +31,7 @@ describe('score limits are where the score is the critical value', () => {
   interface Scored {
     readonly name: string;
     readonly method: IntervalMethod<FourfoldTable>;
-    score(table: FourfoldTable, limit: number): number;
+    readonly score: (table: FourfoldTable, limit: number) => number;
   }
 
   const scored: readonly Scored[] = [
@@ -132,7 +132,7 @@ describe('exact limits are where a tail is half of what the level leaves', () =>
     readonly method: IntervalMethod<FourfoldTable>;
     readonly sides: UnconditionalTest['sides'];
     readonly familyOf: typeof differences;
-    tested(limit: number): number;
+    readonly tested: (limit: number) => number;
   }
 
   const { chanZhang, agrestiMin } = RISK_DIFFERENCE_INTERVALS;

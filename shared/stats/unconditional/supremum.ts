@@ -27,19 +27,31 @@ export function supremumOf(curve: NuisanceCurve, size: number): number {
   );
 }
 
-/** Whether a curve passes a threshold; mostly fewer looks than the supremum would take. */
-export function exceeds(curve: NuisanceCurve, size: number, threshold: number): boolean {
+/**
+ * Where a curve passes a threshold, or null; mostly fewer looks than the supremum would take, above
+ * all with a hint where it may.
+ */
+export function placeAbove(
+  curve: NuisanceCurve,
+  size: number,
+  threshold: number,
+  hint: number,
+): number | null {
+  if (curve(hint) > threshold) {
+    return hint;
+  }
   const values: number[] = [];
   for (let place = 0; place <= size; place += 1) {
     const value = curve(place / size);
     if (value > threshold) {
-      return true;
+      return place / size;
     }
     values.push(value);
   }
-  return peaksOf(values, threshold).some(
+  const peak = peaksOf(values, threshold).find(
     (place) => refine(curve, values, place, threshold) > threshold,
   );
+  return peak === undefined ? null : peak / size;
 }
 
 /** The places no lower than their neighbours around which the curve may reach a height. */

@@ -23,59 +23,63 @@ export function tailProbability(
 ): TailProbability {
   const index = binomialTerms(indexTotal, negligible);
   const reference = binomialTerms(referenceTotal, negligible);
-  const sums = new Float64Array(referenceTotal + 2);
+  const sums = new Float64Array(referenceTotal + 3);
   return ({ below, above }, chances) => {
     const range = reference.fill(chances.reference);
-    const upwards = sumUp(reference, range, sums);
-    const favouring = weighted(index, chances.indexBelow, below, upwards);
+    sumUp(reference.terms, range, sums);
+    const favouring = weighted(index, chances.indexBelow, below, { ...range, sums });
     if (above === null) {
       return favouring;
     }
-    const downwards = sumDown(reference, range, sums);
-    return favouring + weighted(index, chances.indexAbove, above, downwards);
+    sumDown(reference.terms, range, sums);
+    return favouring + weighted(index, chances.indexAbove, above, { ...range, sums });
   };
 }
 
-/** Sum over the index group's events of their probability times that of the reference's range. */
+/** Probabilities of the reference group's events up to, or from, each place of a range. */
+interface Sums extends CountRange {
+  readonly sums: Float64Array;
+}
+
+/**
+ * Sum over the index group's events of their probability times that of the reference's range. The
+ * bounds are cut to the range's ends, beyond which the sums stand still.
+ */
 function weighted(
-  binomial: BinomialTerms,
+  index: BinomialTerms,
   chance: number,
   bounds: Int32Array,
-  sumTo: (bound: number) => number,
+  { from, to, sums }: Sums,
 ): number {
-  const { terms } = binomial;
-  const { from, to } = binomial.fill(chance);
+  const { terms } = index;
+  const rows = index.fill(chance);
   let sum = 0;
-  for (let events = from; events <= to; events += 1) {
-    sum += (terms[events] as number) * sumTo(bounds[events] as number);
+  for (let row = rows.from; row <= rows.to; row += 1) {
+    const bound = bounds[row] as number;
+    const place = bound < from ? 0 : Math.min(bound, to + 1) - from + 1;
+    sum += (terms[row] as number) * (sums[place] as number);
   }
   return sum;
 }
 
-/** Probability of at most so many events. */
-function sumUp(
-  { terms }: BinomialTerms,
-  { from, to }: CountRange,
-  sums: Float64Array,
-): (bound: number) => number {
+/** Place 0: nothing; place k: the first k counts of the range; beyond the last count: all. */
+function sumUp(terms: Float64Array, { from, to }: CountRange, sums: Float64Array): void {
   let sum = 0;
+  sums[0] = 0;
   for (let events = from; events <= to; events += 1) {
     sum += terms[events] as number;
-    sums[events] = sum;
+    sums[events - from + 1] = sum;
   }
-  return (bound) => (bound < from ? 0 : bound >= to ? 1 : (sums[bound] as number));
+  sums[to - from + 2] = sum;
 }
 
-/** Probability of at least so many events. */
-function sumDown(
-  { terms }: BinomialTerms,
-  { from, to }: CountRange,
-  sums: Float64Array,
-): (bound: number) => number {
+/** Place 0: all; place k: the range from its k-th count on; beyond the last count: nothing. */
+function sumDown(terms: Float64Array, { from, to }: CountRange, sums: Float64Array): void {
   let sum = 0;
+  sums[to - from + 2] = 0;
   for (let events = to; events >= from; events -= 1) {
     sum += terms[events] as number;
-    sums[events] = sum;
+    sums[events - from + 1] = sum;
   }
-  return (bound) => (bound > to ? 0 : bound <= from ? 1 : (sums[bound] as number));
+  sums[0] = sum;
 }

@@ -1,8 +1,9 @@
 import type { FourfoldTable } from '../fourfold-table';
+import { zeroOfDecreasing } from '../intervals/score/bisection';
 import { eitherExtreme, extremeTables, isSame } from './extreme-tables';
 import type { ExtremeSides, ExtremeTables } from './extreme-tables';
 import type { NullFamily } from './null-family';
-import { exceeds, gridSize, supremumOf } from './supremum';
+import { gridSize, placeAbove, supremumOf } from './supremum';
 import type { NuisanceCurve } from './supremum';
 import { tailProbability } from './tail-probability';
 import type { TailProbability } from './tail-probability';
@@ -79,9 +80,13 @@ interface Place {
 interface Search {
   readonly tail: number;
   readonly size: number;
+  /** Whether more of the tested effect makes the same extreme tables more probable. */
+  readonly isMonotone: boolean;
   readonly placeAt: (tested: number) => Place;
   /** An upper bound of the probability for every tested value between two places. */
   readonly curveBetween: (from: Place, to: Place) => NuisanceCurve;
+  /** Whether that bound passes the tail. */
+  readonly mayAccept: (from: Place, to: Place) => boolean;
 }
 
 function searchOf(
@@ -91,9 +96,14 @@ function searchOf(
 ): Search {
   const { family, sides } = test;
   const probability = tailProbability(index.total, reference.total, NEGLIGIBLE);
+  const between = (from: Place, to: Place): NuisanceCurve =>
+    curveBetween(family, probability, from, to);
+  const size = gridSize(Math.max(index.total, reference.total));
+  let hint = 0.5;
   return {
     tail,
-    size: gridSize(Math.max(index.total, reference.total)),
+    size,
+    isMonotone: sides === 'upper',
     placeAt(tested) {
       const scoreOf = family.scoreAt(tested);
       const observed = scoreOf(index.events, reference.events);
@@ -101,7 +111,12 @@ function searchOf(
       const extreme = extremeTables(index.total, reference.total, scoreOf, bound, sides);
       return { tested, extreme };
     },
-    curveBetween: (from, to) => curveBetween(family, probability, from, to),
+    curveBetween: between,
+    mayAccept(from, to) {
+      const above = placeAbove(between(from, to), size, tail, hint);
+      hint = above ?? hint;
+      return above !== null;
+    },
   };
 }
 
@@ -124,36 +139,45 @@ function curveBetween(
 }
 
 function firstAccepted(search: Search, from: Place, to: Place): number | null {
-  const { curveBetween: curve, size, tail } = search;
-  if (!exceeds(curve(from, to), size, tail)) {
+  if (!search.mayAccept(from, to)) {
     return null;
   }
-  if (to.tested - from.tested <= NARROWEST) {
-    const accepted = [from, to].some((place) => exceeds(curve(place, place), size, tail));
-    return accepted ? from.tested : null;
+  const width = to.tested - from.tested;
+  if (width <= NARROWEST) {
+    return search.mayAccept(from, from) || search.mayAccept(to, to) ? from.tested : null;
   }
-  const middle = search.placeAt((from.tested + to.tested) / 2);
-  if (staysBelow(search, [from, middle, to])) {
-    return null;
-  }
-  return firstAccepted(search, from, middle) ?? firstAccepted(search, middle, to);
+  const middle = search.placeAt(from.tested + width / 2);
+  const short = search.isMonotone || width <= 1 / (4 * search.size);
+  const same = [middle, to].every((place) => isSame(from.extreme, place.extreme));
+  const found = short && same ? firstOnSmooth(search, from, to) : undefined;
+  return found === undefined
+    ? (firstAccepted(search, from, middle) ?? firstAccepted(search, middle, to))
+    : found;
 }
 
-/** Whether a short stretch with the same extreme tables throughout has no accepted value. */
-function staysBelow(
+/**
+ * The first accepted value of a stretch over which the same tables are extreme and the p-value is
+ * smooth; null where the parabola through three values stays below the tail, undefined where that
+ * cannot be told.
+ */
+function firstOnSmooth(
   { curveBetween: curve, size, tail }: Search,
-  places: readonly Place[],
-): boolean {
-  const [from, middle, to] = places as [Place, Place, Place];
-  const short = to.tested - from.tested <= 1 / (4 * size);
-  if (!short || ![middle, to].every((place) => isSame(from.extreme, place.extreme))) {
-    return false;
+  from: Place,
+  to: Place,
+): number | null | undefined {
+  const pValue = (tested: number): number => {
+    const place = { tested, extreme: from.extreme };
+    return supremumOf(curve(place, place), size);
+  };
+  const [first, last] = [pValue(from.tested), pValue(to.tested)];
+  if (first > tail) {
+    return from.tested;
   }
-  const [first, second, third] = places.map((place) => supremumOf(curve(place, place), size)) as [
-    number,
-    number,
-    number,
-  ];
-  const bend = Math.max(0, second - (first + third) / 2);
-  return Math.max(first, second, third) + bend <= tail;
+  if (last > tail) {
+    const shortfall = (tested: number): number => Math.log(tail / pValue(tested));
+    return zeroOfDecreasing(shortfall, from.tested, to.tested);
+  }
+  const second = pValue((from.tested + to.tested) / 2);
+  const bend = Math.max(0, second - (first + last) / 2);
+  return Math.max(first, second, last) + bend <= tail ? null : undefined;
 }
