@@ -4,7 +4,7 @@ import published from './published-examples.json';
 import { computed } from './quantities';
 
 describe('published worked examples', () => {
-  it.each(published.cases)('$quantity of $counts$strata prints $printed ($source)', (example) => {
+  it.each(published.cases)('$quantity of $counts$strata$pairs prints $printed ($source)', (example) => {
     const values = computed(example);
     expect(values).toHaveLength(example.printed.length);
     values.forEach((value, place) => {

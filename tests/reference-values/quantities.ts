@@ -30,12 +30,17 @@ import type {
   TestOutcome,
 } from '#shared/stats';
 import type { Result } from '#shared/core';
+import { TABLE_AND_PAIR_READERS } from './table-and-pair-quantities';
+import { valueOf } from './value-of';
+
+export { valueOf };
 
 /** Counts as the reference files give them: events and others by group, or events and total. */
 export interface ReferenceCase {
   readonly quantity: string;
   readonly counts?: readonly number[] | readonly (readonly number[])[];
   readonly strata?: readonly (readonly (readonly number[])[])[];
+  readonly pairs?: readonly number[];
   readonly level?: number;
 }
 
@@ -78,6 +83,7 @@ const READERS: Readonly<Record<string, Read>> = {
   ...testOf('cochranMantelHaenszel', (one) => cochranMantelHaenszel(strataOf(one))),
   ...correctedTest((one) => cochranMantelHaenszel(strataOf(one), 'half')),
   ...homogeneityOf(ODDS_RATIO_HOMOGENEITIES),
+  ...TABLE_AND_PAIR_READERS,
   ...estimateOf('pooledOddsRatio', (one) => pooledOddsRatio(strataOf(one), 0.95)),
   ...estimateOf('pooledRiskRatio', (one) => pooledRiskRatio(strataOf(one), 0.95)),
   'eValue.ofValue': (one) => [valueOf(eValue(ratioOf(one))).ofValue],
@@ -163,14 +169,6 @@ function estimate(result: Result<Estimate, unknown>): readonly number[] {
 function outcome(result: Result<TestOutcome, unknown>): readonly number[] {
   const { statistic, pValue } = valueOf(result);
   return [Number(statistic), pValue];
-}
-
-/** The value of a result that must be one. */
-export function valueOf<Value>(result: Result<Value, unknown>): Value {
-  if (!result.ok) {
-    throw new Error(`No value: ${JSON.stringify(result.issue)}`);
-  }
-  return result.value;
 }
 
 function groupOf({ counts }: ReferenceCase): GroupCount {

@@ -11,8 +11,8 @@ import { tailOfTables } from './tail-of-tables';
 const MOST_RECORDS = 1500;
 /** With more tables of the same margins than this, the search is not begun. */
 const MOST_TABLES = 1e15;
-/** With more partial tables than this, the search is given up: about half a second. */
-const MOST_PARTIAL_TABLES = 500_000;
+/** With more partial tables than this, the search is given up: one to two seconds. */
+const MOST_PARTIAL_TABLES = 2_000_000;
 
 /**
  * Fisher's exact test of a table of any size, after Freeman and Halton: the probability, with all
@@ -22,7 +22,8 @@ const MOST_PARTIAL_TABLES = 500_000;
  * Takes counts by row and column; empty ones are removed first. Gives no statistic. Issues as
  * `likelihoodRatioOfTable`; and `tooLarge` with the `cap`, what it is of (`records`, `tables` with
  * the same margins, `partialTables` looked at) and what to use `instead`: 4 × 4 tables of 100
- * records fit, 2 × 6 tables of 1000 do not.
+ * records fit, 6 × 2 tables of 1000 do not. It may take a second before it is given up, so that it
+ * is work for the side, not for a screen's own thread.
  *
  * Source: Freeman and Halton (1951) Biometrika 38:141-149; the search by columns after Mehta and
  * Patel (1983) Journal of the American Statistical Association 78:427-434.
