@@ -52,6 +52,8 @@ export interface ContrastResult {
   readonly measures: Readonly<Record<EffectMeasureId, Result<Estimate, EstimationIssue>>>;
   readonly pearson: Result<TestOutcome, EstimationIssue>;
   readonly fisher: Result<TestOutcome, EstimationIssue>;
+  /** By the test that the specification chose, where it chose one. */
+  readonly test?: Result<TestOutcome, EstimationIssue>;
 }
 
 /** All levels within one stratum, or over all records (crude, `stratumId` null). */

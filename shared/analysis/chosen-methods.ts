@@ -1,10 +1,17 @@
 import { EFFECT_MEASURES, EFFECT_MEASURE_IDS } from '#shared/effects';
 import type { EffectMeasureId } from '#shared/effects';
+import { FOURFOLD_TESTS } from '#shared/stats';
+import type { FourfoldTest } from '#shared/stats';
 import type { AnalysisSpecification } from './specification';
 
-/** Id of the test of a contrast; Pearson's chi-square unless another was chosen. */
-export function contrastTestId({ otherMethods }: AnalysisSpecification): string {
-  return otherMethods?.contrastTest ?? 'pearsonChiSquare';
+/** Id of the test of a contrast; null leaves it to the expected counts (`printedTest`). */
+export function contrastTestId({ otherMethods }: AnalysisSpecification): string | null {
+  return otherMethods?.contrastTest ?? null;
+}
+
+/** Id of the test for a trend; Cochran and Armitage's unless another was chosen. */
+export function trendTestId({ otherMethods }: AnalysisSpecification): string {
+  return otherMethods?.trendTest ?? 'cochranArmitage';
 }
 
 /** Id of the way in which a measure is pooled over strata. */
@@ -26,8 +33,17 @@ export function homogeneityId(
 }
 
 /** Whether some chosen method is heavy, so that the analysis is no work for a main thread. */
-export function takesTime({ methods }: AnalysisSpecification): boolean {
-  return EFFECT_MEASURE_IDS.some(
-    (id) => EFFECT_MEASURES[id].intervals[methods[id]]?.effort === 'heavy',
-  );
+export function takesTime(specification: AnalysisSpecification): boolean {
+  const { methods } = specification;
+  const intervals = EFFECT_MEASURE_IDS.map((id) => EFFECT_MEASURES[id].intervals[methods[id]]);
+  const test = registered<FourfoldTest>(FOURFOLD_TESTS, contrastTestId(specification) ?? '');
+  return [...intervals, test].some((method) => method?.effort === 'heavy');
+}
+
+/** A member of a register; undefined where it has none of that id. */
+export function registered<Method>(
+  register: Readonly<Record<string, Method>>,
+  id: string,
+): Method | undefined {
+  return Object.hasOwn(register, id) ? register[id] : undefined;
 }

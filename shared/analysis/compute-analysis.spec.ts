@@ -1,7 +1,10 @@
 import { describe, expect, it } from 'vitest';
+import type { AnalysisResult } from './analysis-result';
 import { computeAnalysis } from './compute-analysis';
 import { reverseContrast } from './default-specification';
 import { frameOf } from './frame';
+import { printedTest } from './printed-test';
+import type { OtherMethodChoice } from './specification';
 import { TEST_OUTCOME, inputsOf, resultOf } from './testing/counts-analysis';
 import type { CountsAnalysis } from './testing/counts-analysis';
 
@@ -142,5 +145,57 @@ describe('computeAnalysis', () => {
     expect(compute({ ...tally, cells: broken })).toMatchObject({
       issue: { code: 'invalidCounts' },
     });
+  });
+});
+
+describe('methods that were chosen', () => {
+  const chosen = (otherMethods: OtherMethodChoice): AnalysisResult =>
+    resultOf({ ...STRATIFIED, specification: { otherMethods } });
+
+  it('pool, compare strata and test as they are named', () => {
+    const { pooled, strata } = chosen({
+      contrastTest: 'fisherMidP',
+      poolings: { riskDifference: 'greenlandRobins', oddsRatio: 'exactConditional' },
+      homogeneities: { oddsRatio: 'woolf' },
+    });
+    const [contrast] = pooled;
+    expect(contrast?.measures).toMatchObject({
+      riskDifference: { value: { interval: { method: 'greenlandRobins' } } },
+      riskRatio: { value: { interval: { method: 'greenlandRobins' } } },
+      oddsRatio: { value: { interval: { method: 'exactConditional' } } },
+    });
+    expect(contrast?.homogeneity.oddsRatio).toMatchObject({ value: { method: 'woolf' } });
+    expect(strata[0]?.contrasts[0]?.test).toMatchObject({ value: { method: 'fisherMidP' } });
+  });
+
+  it('leave the test of a contrast to the expected counts where none is named', () => {
+    const result = resultOf(STRATIFIED);
+    const [kitchen, , office] = result.strata;
+    expect(kitchen?.contrasts[0]).not.toHaveProperty('test');
+    expect(printedTest(result, result.crude, result.crude.contrasts[0]!).quantity).toBe('pearson');
+    expect(printedTest(result, office!, office!.contrasts[0]!).quantity).toBe('fisher');
+  });
+
+  it('test a trend by another test', () => {
+    const result = resultOf({
+      ...PLAIN,
+      specification: { otherMethods: { trendTest: 'exactTrend' } },
+    });
+    expect(result.crude.trend).toMatchObject({ value: { method: 'exactTrend' } });
+  });
+
+  it.each([
+    { contrastTest: 'guess' },
+    { trendTest: 'guess' },
+    { poolings: { riskRatio: 'sato' } },
+    { homogeneities: { riskDifference: 'woolf' } },
+  ])('are refused where no register has them: %j', (otherMethods) => {
+    const { codeBook, specification, study, tally } = inputsOf({
+      ...STRATIFIED,
+      specification: { otherMethods },
+    });
+    const frame = frameOf(codeBook, specification, TEST_OUTCOME, study);
+    const result = frame.ok ? computeAnalysis(specification, frame.value, tally) : frame;
+    expect(result).toMatchObject({ ok: false, issue: { code: 'unknownMethod' } });
   });
 });

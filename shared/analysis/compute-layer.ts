@@ -3,8 +3,9 @@ import type { Result } from '#shared/core';
 import { EFFECT_MEASURES, EFFECT_MEASURE_IDS, designGivesRisk } from '#shared/effects';
 import type { EffectMeasureId } from '#shared/effects';
 import {
+  FOURFOLD_TESTS,
   RISK_INTERVALS,
-  cochranArmitage,
+  TREND_TESTS,
   fisherOfFourfold,
   pearsonOfFourfold,
   pearsonOfTable,
@@ -13,11 +14,14 @@ import type {
   Estimate,
   EstimationIssue,
   FourfoldTable,
+  FourfoldTest,
   GroupCount,
   RiskIntervalId,
   TestOutcome,
+  TrendTest,
 } from '#shared/stats';
 import type { ContrastResult, LayerResult, LevelResult, ResultFrame } from './analysis-result';
+import { contrastTestId, registered, trendTestId } from './chosen-methods';
 import type { AnalysisSpecification } from './specification';
 import type { LayerCounts } from './tables';
 
@@ -111,7 +115,18 @@ function contrastResult(
     ),
     pearson: pearsonOfFourfold(table),
     fisher: fisherOfFourfold(table),
+    ...chosenTest(specification, table),
   };
+}
+
+/** The outcome of the chosen test; nothing where none was chosen. */
+function chosenTest(
+  specification: AnalysisSpecification,
+  table: FourfoldTable,
+): Pick<ContrastResult, 'test'> {
+  const id = contrastTestId(specification);
+  const test = id === null ? undefined : registered<FourfoldTest>(FOURFOLD_TESTS, id);
+  return test ? { test: test.test(table) } : {};
 }
 
 /** One value for each effect measure. */
@@ -132,15 +147,20 @@ export function ifGiven<Value>(
 }
 
 function trendOf(
-  { trendScores }: AnalysisSpecification,
+  specification: AnalysisSpecification,
   frame: ResultFrame,
   counts: LayerCounts,
 ): Result<TestOutcome, EstimationIssue> {
   const { ordered, levels } = frame.exposure;
+  const { trendScores } = specification;
   if (!ordered && trendScores === null) {
     return failure({ code: 'notOrdered' });
   }
-  return cochranArmitage(
+  const test = registered<TrendTest>(TREND_TESTS, trendTestId(specification));
+  if (!test) {
+    throw new Error(`No test for trend ${trendTestId(specification)}`);
+  }
+  return test.test(
     levels.map(({ id }, place) => ({
       ...countOf(counts, id),
       score: trendScores?.[id] ?? place + 1,

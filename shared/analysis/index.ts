@@ -10,7 +10,7 @@ export type {
   ResultFrame,
   StratumLeftOut,
 } from './analysis-result';
-export { contrastTestId, homogeneityId, poolingId, takesTime } from './chosen-methods';
+export { contrastTestId, homogeneityId, poolingId, takesTime, trendTestId } from './chosen-methods';
 export { computeAnalysis } from './compute-analysis';
 export {
   DEFAULT_INTERVAL_METHODS,
@@ -35,6 +35,8 @@ export type {
 } from './guards/guard';
 export { listValues } from './list-values';
 export type { AddressedValue } from './list-values';
+export { printedTest } from './printed-test';
+export type { PrintedTest } from './printed-test';
 export { numberOf } from './quantity';
 export type { Quantity } from './quantity';
 export { readValue } from './read-value';

@@ -74,7 +74,7 @@ function caseControlPlaces({ frame }: AnalysisResult, scope: ResultScope): reado
 function contrastPlaces(scope: ResultScope, levelId: string): readonly Place[] {
   return [
     ...placesAt(scope, levelId, ESTIMATE, [...EFFECT_MEASURE_IDS, 'numberNeeded']),
-    ...placesAt(scope, levelId, TEST, ['pearson', 'fisher']),
+    ...placesAt(scope, levelId, TEST, ['test', 'pearson', 'fisher']),
   ];
 }
 

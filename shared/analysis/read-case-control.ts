@@ -44,9 +44,7 @@ function readLimit(
     return NOT_THERE;
   }
   const estimate = shareEstimate(specification, { events: part(group), total: part(layer.total) });
-  return estimate.ok
-    ? success({ kind: 'real', value: estimate.value.interval[facet] })
-    : estimate;
+  return estimate.ok ? success({ kind: 'real', value: estimate.value.interval[facet] }) : estimate;
 }
 
 const NOT_THERE = failure({ code: 'addressNotInResult' } as const);

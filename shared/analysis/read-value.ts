@@ -49,6 +49,7 @@ const READERS: Readonly<
   riskRatio: (result, address) => readMeasure('riskRatio', result, address),
   oddsRatio: (result, address) => readMeasure('oddsRatio', result, address),
   numberNeeded: readNumberNeeded,
+  test: (result, address) => readTest(contrastAt(result, address)?.test, address.facet),
   pearson: (result, address) => readTest(contrastAt(result, address)?.pearson, address.facet),
   fisher: (result, address) => readTest(contrastAt(result, address)?.fisher, address.facet),
   association: (result, address) =>

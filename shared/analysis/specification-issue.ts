@@ -1,8 +1,8 @@
 import { EFFECT_MEASURE_IDS, hasHomogeneity, hasInterval, hasPooling } from '#shared/effects';
-import { RISK_INTERVALS } from '#shared/stats';
+import { FOURFOLD_TESTS, RISK_INTERVALS, TREND_TESTS } from '#shared/stats';
 import type { RiskIntervalId } from '#shared/stats';
 import type { AnalysisIssue } from './analysis-issue';
-import { homogeneityId, poolingId } from './chosen-methods';
+import { contrastTestId, homogeneityId, poolingId, trendTestId } from './chosen-methods';
 import type { ResultFrame } from './analysis-result';
 import type { AnalysisSpecification } from './specification';
 
@@ -15,6 +15,7 @@ export function issueOfSpecification(
     issueOfLevel(specification.level) ??
     issueOfMethods(specification) ??
     issueOfPooling(specification) ??
+    issueOfTests(specification) ??
     issueOfScores(specification, frame) ??
     issueOfReference(specification, frame)
   );
@@ -43,6 +44,16 @@ function issueOfPooling(specification: AnalysisSpecification): AnalysisIssue | n
   return wrong
     ? { code: 'unknownMethod', facts: { estimand: wrong.id, methodId: wrong.methodId } }
     : null;
+}
+
+function issueOfTests(specification: AnalysisSpecification): AnalysisIssue | null {
+  const [contrast, trend] = [contrastTestId(specification), trendTestId(specification)];
+  if (contrast !== null && !Object.hasOwn(FOURFOLD_TESTS, contrast)) {
+    return { code: 'unknownMethod', facts: { estimand: 'contrastTest', methodId: contrast } };
+  }
+  return Object.hasOwn(TREND_TESTS, trend)
+    ? null
+    : { code: 'unknownMethod', facts: { estimand: 'trendTest', methodId: trend } };
 }
 
 /** Whether an id names an interval method for a risk. */

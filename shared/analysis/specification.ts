@@ -19,6 +19,8 @@ export interface IntervalMethodChoice {
 export interface OtherMethodChoice {
   /** The test of a contrast, by id in FOURFOLD_TESTS. */
   readonly contrastTest?: string | undefined;
+  /** The test for a trend, by id in TREND_TESTS. */
+  readonly trendTest?: string | undefined;
   /** How a measure is pooled, by id in its `poolings`. */
   readonly poolings?: Readonly<Partial<Record<EffectMeasureId, string>>> | undefined;
   /** How the strata are compared on a measure, by id in its `homogeneities`. */

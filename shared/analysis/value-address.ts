@@ -21,6 +21,7 @@ const PLAIN_QUANTITIES = [
   'risk',
   ...EFFECT_MEASURE_IDS,
   'numberNeeded',
+  'test',
   'pearson',
   'fisher',
   'association',

@@ -47,6 +47,22 @@ describe('readValue', () => {
     });
   });
 
+  it('gives the estimate of a method that has its own, not the sample’s fraction', () => {
+    const result = resultOf({
+      levels: ['no', 'yes'],
+      counts: [
+        [1, 4],
+        [3, 4],
+      ],
+      specification: {
+        methods: { ...RESULT.specification.methods, oddsRatio: 'conditionalExact' },
+      },
+    });
+    const read = readValue(result, at('oddsRatio'));
+    expect(read).toMatchObject({ ok: true, value: { kind: 'real' } });
+    expect(read.ok && numberOf(read.value)).toBeCloseTo(6.40832, 5);
+  });
+
   it('gives counts, limits, tests and pooled numbers', () => {
     const ward: ResultScope = { kind: 'stratum', stratumId: 'ward' };
     expect(readValue(RESULT, at('events', 'value', 'no', ward))).toEqual({

@@ -31,6 +31,7 @@ export const analysisSpecificationSchema: z.ZodType<AnalysisSpecification> = z.o
   otherMethods: z
     .object({
       contrastTest: idSchema.optional(),
+      trendTest: idSchema.optional(),
       poolings: methodsByMeasureSchema.optional(),
       homogeneities: methodsByMeasureSchema.optional(),
     })

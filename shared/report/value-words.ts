@@ -1,5 +1,8 @@
 import type { AddressedQuantity, AddressFacet, ResultScope, ValueAddress } from '#shared/analysis';
+import { contrastTestId } from '#shared/analysis';
 import type { EffectMeasureId } from '#shared/effects';
+import { TEST_METHODS } from '#shared/stats';
+import type { MethodWords } from '#shared/stats';
 import type { PinnedAnalysis } from './report';
 import { outsideMeasureName } from '#shared/wording';
 import type { DesignTerms, Phrasebook } from '#shared/wording';
@@ -52,6 +55,7 @@ const QUANTITIES: Readonly<Record<AddressedQuantity, QuantityWords>> = {
   riskRatio: measure('riskRatio'),
   oddsRatio: measure('oddsRatio'),
   numberNeeded: () => 'Number needed',
+  test: (_terms, { result }) => testLabel(contrastTestId(result.specification)),
   pearson: () => 'Pearson chi-square test',
   fisher: () => 'Fisher’s exact test',
   association: () => 'Test over all levels',
@@ -71,6 +75,11 @@ const QUANTITIES: Readonly<Record<AddressedQuantity, QuantityWords>> = {
   shareOfComparedControls: () => 'Share of controls compared',
   outsideEstimate: outside,
 };
+
+function testLabel(id: string | null): string {
+  const register: Readonly<Record<string, MethodWords>> = TEST_METHODS;
+  return register[id ?? '']?.label ?? 'Test';
+}
 
 function measure(id: EffectMeasureId): QuantityWords {
   return (terms) => capitalised(terms.measures[id].name);
@@ -121,6 +130,7 @@ const COMPARES: readonly AddressedQuantity[] = [
   'riskRatio',
   'oddsRatio',
   'numberNeeded',
+  'test',
   'pearson',
   'fisher',
   'conditionalIndependence',

@@ -2,6 +2,7 @@ import {
   contrastTable,
   layerAt,
   pooledAt,
+  printedTest,
   type AnalysisResult,
   type ContrastResult,
   type LayerResult,
@@ -40,7 +41,12 @@ export function claimOf(result: AnalysisResult, target: ClaimTarget): Result<Cla
   const index = groupOf(result, layer, target.indexLevelId);
   const reference = groupOf(result, layer, referenceLevelId);
   return index && reference && contrast
-    ? success({ ...frameWords(result, target), index, reference, ...evidence(layer, contrast) })
+    ? success({
+        ...frameWords(result, target),
+        index,
+        reference,
+        ...evidence(result, layer, contrast),
+      })
     : failure({ code: 'levelNotInResult', facts: { levelId: target.indexLevelId } });
 }
 
@@ -107,7 +113,7 @@ function strataWords({ frame }: AnalysisResult): string | null {
 
 type Evidence = Pick<Claim, 'measures' | 'exact' | 'test' | 'testQuantity'>;
 
-function evidence(layer: LayerResult, contrast: AnyContrast): Evidence {
+function evidence(result: AnalysisResult, layer: LayerResult, contrast: AnyContrast): Evidence {
   if ('conditionalIndependence' in contrast) {
     return {
       measures: contrast.measures,
@@ -117,12 +123,12 @@ function evidence(layer: LayerResult, contrast: AnyContrast): Evidence {
     };
   }
   const table = contrastTable(layer, contrast.indexLevelId);
-  const testQuantity = table && isSparse(table) ? 'fisher' : 'pearson';
+  const { quantity, outcome } = printedTest(result, layer, contrast);
   return {
     measures: contrast.measures,
     exact: exactValues(table, contrast),
-    test: contrast[testQuantity],
-    testQuantity,
+    test: outcome,
+    testQuantity: quantity,
   };
 }
 
@@ -141,12 +147,4 @@ function exactValues(
     riskRatio: exact('riskRatio'),
     oddsRatio: exact('oddsRatio'),
   };
-}
-
-/** The chi-square approximation asks for expected counts of 5 and more. */
-function isSparse({ index, reference }: FourfoldTable): boolean {
-  const total = index.total + reference.total;
-  const events = index.events + reference.events;
-  const smallestGroup = Math.min(index.total, reference.total);
-  return smallestGroup * Math.min(events, total - events) < 5 * total;
 }

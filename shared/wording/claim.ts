@@ -42,7 +42,7 @@ export interface Claim {
   readonly test: Result<TestOutcome, EstimationIssue>;
   readonly testQuantity: Extract<
     AddressedQuantity,
-    'pearson' | 'fisher' | 'conditionalIndependence'
+    'test' | 'pearson' | 'fisher' | 'conditionalIndependence'
   >;
   readonly planned: 'prespecified' | 'postHoc';
   /** What decides the decimals, so that sentence, table and figure print the same digits. */

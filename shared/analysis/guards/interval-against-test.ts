@@ -3,6 +3,7 @@ import type { EffectMeasureId } from '#shared/effects';
 import type { Result } from '#shared/core';
 import type { Estimate, EstimationIssue, TestOutcome } from '#shared/stats';
 import type { AnalysisResult } from '../analysis-result';
+import { printedTest } from '../printed-test';
 import type { ResultScope } from '../value-address';
 import type { Guard, GuardPoint } from './guard';
 import { layersOf, scopeOf } from './places';
@@ -31,11 +32,11 @@ interface Compared {
 
 function comparedIn(result: AnalysisResult): readonly Compared[] {
   const within = layersOf(result).flatMap((layer) =>
-    layer.contrasts.map(({ indexLevelId, measures, pearson }) => ({
+    layer.contrasts.map((contrast) => ({
       scope: scopeOf(layer),
-      levelId: indexLevelId,
-      measures,
-      test: pearson,
+      levelId: contrast.indexLevelId,
+      measures: contrast.measures,
+      test: printedTest(result, layer, contrast).outcome,
     })),
   );
   const pooled = result.pooled.map(({ indexLevelId, measures, conditionalIndependence }) => ({

@@ -60,6 +60,7 @@ const PRINTERS: Readonly<Record<ResultQuantity, Printer>> = {
   riskRatio: (value, format) => printRatio('riskRatio', value, format),
   oddsRatio: (value, format) => printRatio('oddsRatio', value, format),
   numberNeeded: printCount,
+  test: printTest,
   pearson: printTest,
   fisher: printTest,
   association: printTest,

@@ -21,6 +21,7 @@ const FORMATS: Readonly<Record<AddressedQuantity, readonly BoundValueFormat[]>> 
   riskRatio: RATIO,
   oddsRatio: RATIO,
   numberNeeded: FIGURE,
+  test: FIGURE,
   pearson: FIGURE,
   fisher: FIGURE,
   association: FIGURE,

@@ -1,4 +1,5 @@
 import { formatCount, formatNumber, formatPValue, levelPercent } from '#shared/format';
+import type { PValueText } from '#shared/format';
 import type { HouseStyle } from '#shared/house-style';
 import type { OutsideFinding, OutsideFindingId } from '#shared/outside-estimates';
 import { fillWords } from '../phrasebook/fill-pattern';
@@ -81,12 +82,15 @@ function count({ facts, style }: FindingContext, name: string): string {
   return formatCount(Number(facts[name]), style).text;
 }
 
-/** The p-values that the limits allow for, or the one that both ends print as. */
+/** The p-values that the limits allow for: a range, one value, or what lies below a bound. */
 function impliedWords({ facts, style, book }: FindingContext): string {
-  const print = (name: string): string => formatPValue(Number(facts[name]), 0.95, style).text;
+  const print = (name: string): PValueText => formatPValue(Number(facts[name]), 0.95, style);
   const lowest = print('lowest');
   const highest = print('highest');
-  return lowest === highest
-    ? fillWords(book, 'outside.finding.impliedOne', { pValue: lowest })
-    : fillWords(book, 'outside.finding.impliedRange', { lowest, highest });
+  const pValue = highest.figure;
+  if (highest.relation === '<') return fillWords(book, 'outside.finding.impliedBelow', { pValue });
+  if (lowest.relation === '<') return fillWords(book, 'outside.finding.impliedAtMost', { pValue });
+  return lowest.text === highest.text
+    ? fillWords(book, 'outside.finding.impliedOne', { pValue })
+    : fillWords(book, 'outside.finding.impliedRange', { lowest: lowest.text, highest: pValue });
 }

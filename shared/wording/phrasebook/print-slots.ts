@@ -64,6 +64,7 @@ export const PRINT_SLOTS = {
   'methods.independence': ['method'],
   'methods.homogeneity': ['methods'],
   'methods.trend': ['method', 'scores'],
+  'methods.testChosen': ['method'],
   'methods.tests': ['pearson', 'fisher'],
   'methods.missing': ['count'],
   'methods.missingOne': ['count'],

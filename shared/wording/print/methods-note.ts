@@ -1,3 +1,4 @@
+import { contrastTestId } from '#shared/analysis';
 import { EFFECT_MEASURES, EFFECT_MEASURE_IDS, type EffectMeasureId } from '#shared/effects';
 import { formatCount, levelPercent } from '#shared/format';
 import type { HouseStyle } from '#shared/house-style';
@@ -83,7 +84,11 @@ function intervals(context: PrintContext, measures: readonly EffectMeasureId[]):
   return fillPattern(book, 'methods.intervals', { level, methods });
 }
 
-function tests({ style, book }: PrintContext): readonly Parts[] {
+function tests({ result, style, book }: PrintContext): readonly Parts[] {
+  const chosen = contrastTestId(result.specification);
+  if (chosen !== null) {
+    return [fillPattern(book, 'methods.testChosen', { method: testMethod(chosen) })];
+  }
   return style.sentence.pValue === 'omitted'
     ? []
     : [

@@ -1,6 +1,6 @@
 import type { CodeBook } from '#shared/code-book';
 import { EFFECT_MEASURE_IDS, EFFECT_MEASURES } from '#shared/effects';
-import { RISK_INTERVALS } from '#shared/stats';
+import { type MethodWords, RISK_INTERVALS, TEST_METHODS } from '#shared/stats';
 import type { AnalysisDraft } from '../draft/analysis-draft';
 import { columnById, levelLabels } from '../draft/column-choices';
 
@@ -52,6 +52,7 @@ function describedParts(
     'Confidence level': `${Number((level * 100).toPrecision(12))}%`,
     'Interval methods': methodLabels(methods).join(', '),
     'Over the strata': overStrata(specification).join(', ') || 'the usual methods',
+    Tests: testLabels(specification).join(', ') || 'the usual ones',
     Adjustment: adjustment === 'crude' ? 'none' : 'Mantel–Haenszel',
     'Trend scores': trendScores === null ? '1, 2, 3 …' : Object.values(trendScores).join(', '),
     Standing: [
@@ -60,6 +61,12 @@ function describedParts(
       standing.analysisSet,
     ].join(', '),
   };
+}
+
+function testLabels({ otherMethods }: AnalysisDraft): readonly string[] {
+  const tests: Readonly<Record<string, MethodWords>> = TEST_METHODS;
+  const chosen = [otherMethods?.contrastTest, otherMethods?.trendTest];
+  return chosen.flatMap((id) => (id === undefined ? [] : [tests[id]?.label ?? id]));
 }
 
 /** How each measure is pooled, and how the strata are compared on it. */

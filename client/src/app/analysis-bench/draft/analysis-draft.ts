@@ -132,6 +132,18 @@ export function withPooling(
   });
 }
 
+/** The draft with another test of a contrast; undefined leaves it to the expected counts. */
+export function withContrastTest(draft: AnalysisDraft, testId: string | undefined): AnalysisDraft {
+  return withOther(draft, { contrastTest: testId });
+}
+
+/** The draft with another test for trend; the usual one is not written down. */
+export function withTrendTest(draft: AnalysisDraft, testId: string): AnalysisDraft {
+  return withOther(draft, { trendTest: testId === USUAL_TREND_TEST ? undefined : testId });
+}
+
+const USUAL_TREND_TEST = 'cochranArmitage';
+
 /** The draft with another test of whether a measure is the same in all strata. */
 export function withHomogeneity(
   draft: AnalysisDraft,
@@ -159,10 +171,14 @@ function chosenBut(
 /** Only what is not usual is kept, so that going back gives the same draft as before. */
 function withOther(draft: AnalysisDraft, change: OtherMethodChoice): AnalysisDraft {
   const { otherMethods, ...rest } = draft;
-  const kept = Object.entries({ ...otherMethods, ...change }).filter(
-    ([, value]) => typeof value === 'string' || Object.keys(value).length > 0,
-  );
+  const parts: readonly [string, unknown][] = Object.entries({ ...otherMethods, ...change });
+  const kept = parts.filter(([, part]) => isGiven(part));
   return kept.length === 0 ? rest : { ...rest, otherMethods: Object.fromEntries(kept) };
+}
+
+function isGiven(part: unknown): boolean {
+  if (typeof part === 'object' && part !== null) return Object.keys(part).length > 0;
+  return part !== undefined;
 }
 
 /** Whether two drafts say the same analysis. */

@@ -1,10 +1,11 @@
 import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
 import { keptLevels } from '#shared/analysis';
 import type { FactorLevel } from '#shared/code-book';
+import { FOURFOLD_TESTS, TREND_TESTS } from '#shared/stats';
 import { Field } from '../../ui/field/field';
 import { FieldControl } from '../../ui/field/field-control';
 import { BenchStore } from '../bench/bench-store';
-import type { AnalysisDraft } from '../draft/analysis-draft';
+import { type AnalysisDraft, withContrastTest, withTrendTest } from '../draft/analysis-draft';
 import { columnById } from '../draft/column-choices';
 import { parsedLevel, parsedScore } from './setting-values';
 
@@ -30,6 +31,23 @@ export class SettingPanel {
     return column === null ? [] : keptLevels(column, restrictions);
   });
   protected readonly hasStrata = computed(() => this.store.draft().stratumColumnIds.length > 0);
+
+  protected readonly contrastTests = Object.values(FOURFOLD_TESTS);
+  protected readonly trendTests = Object.values(TREND_TESTS);
+  protected readonly contrastTest = computed(
+    () => this.store.draft().otherMethods?.contrastTest ?? '',
+  );
+  protected readonly trendTest = computed(
+    () => this.store.draft().otherMethods?.trendTest ?? TREND_TESTS.cochranArmitage.id,
+  );
+
+  protected changeContrastTest(id: string): void {
+    this.store.change((draft) => withContrastTest(draft, id === '' ? undefined : id));
+  }
+
+  protected changeTrendTest(id: string): void {
+    this.store.change((draft) => withTrendTest(draft, id));
+  }
 
   protected valueOf(event: Event): string {
     return (event.target as HTMLInputElement | HTMLSelectElement).value;

@@ -1,10 +1,17 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
-import { layerAt, type LayerResult, pooledAt } from '#shared/analysis';
+import {
+  type ContrastResult,
+  contrastTestId,
+  layerAt,
+  type LayerResult,
+  pooledAt,
+  trendTestId,
+} from '#shared/analysis';
 import type { Result } from '#shared/core';
 import {
   type EstimationIssue,
+  type MethodWords,
   TEST_METHODS,
-  type TestMethodId,
   type TestOutcome,
 } from '#shared/stats';
 import { BenchStore } from '../bench/bench-store';
@@ -66,6 +73,8 @@ export class TestsLine {
   });
 }
 
+const METHODS: Readonly<Record<string, MethodWords>> = TEST_METHODS;
+
 function testsOf(print: BenchPrint, store: BenchStore): readonly PrintedTest[] {
   const { result } = print;
   const levelId = store.levelId();
@@ -81,6 +90,7 @@ function testsOf(print: BenchPrint, store: BenchStore): readonly PrintedTest[] {
   if (layer === undefined || contrast === undefined) return [];
   const severalLevels = result.frame.exposure.levels.length > 2;
   return [
+    ...chosenTest(print, pair, contrast),
     printed(print, 'pearsonChiSquare', pair, contrast.pearson),
     printed(print, 'fisherExact', pair, contrast.fisher),
     ...(severalLevels ? [printed(print, 'pearsonChiSquare', 'all levels', layer.association)] : []),
@@ -88,19 +98,35 @@ function testsOf(print: BenchPrint, store: BenchStore): readonly PrintedTest[] {
   ];
 }
 
+/** The test that the analysis chose, unless it is shown anyway. */
+function chosenTest(
+  print: BenchPrint,
+  pair: string,
+  { test }: ContrastResult,
+): readonly PrintedTest[] {
+  const id = contrastTestId(print.result.specification);
+  const shown = id === null || id === 'pearsonChiSquare' || id === 'fisherExact';
+  return shown || test === undefined ? [] : [printed(print, id, pair, test)];
+}
+
 function trendOf(print: BenchPrint, layer: LayerResult): PrintedTest {
-  return printed(print, 'cochranArmitage', `all levels, scores ${scoresOf(print)}`, layer.trend);
+  return printed(
+    print,
+    trendTestId(print.result.specification),
+    `all levels, scores ${scoresOf(print)}`,
+    layer.trend,
+  );
 }
 
 function printed(
   print: BenchPrint,
-  methodId: TestMethodId,
+  methodId: string,
   about: string,
   test: Result<TestOutcome, EstimationIssue>,
 ): PrintedTest {
   const pValue = printedPValue(print, test);
   return {
-    name: TEST_METHODS[methodId].label,
+    name: METHODS[methodId]?.label ?? methodId,
     about,
     text: pValue.ok ? pValue.value : pValue.reason,
   };
