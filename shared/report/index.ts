@@ -30,6 +30,7 @@ export type { PrintedNumber } from './compose/value-ledger';
 export type { ContentIssue, ContentIssueCode } from './content-issue';
 export { isOrderKey, placeAfter, visibleBlocks } from './order';
 export type { Placement } from './order';
+export { pinValues } from './pin-values';
 export { REPORT_STAGES } from './report';
 export type { Block, PinnedAnalysis, Report, ReportStage } from './report';
 export { reportIssueText } from './report-issue-text';

@@ -34,7 +34,7 @@ test('an adjusted estimate from elsewhere is checked, listed, printed and export
   await expect(dialog.getByText(/The limits stand for a p-value/)).toHaveCount(0);
   await fill('Model', 'logistic regression');
   await fill('Adjusted for', 'age; sex');
-  await fill('Number analysed', '1,180');
+  await fill('N analysed', '1,180');
   await fill('Computed by', 'Statistics group, main model');
   await dialog.getByRole('button', { name: 'Keep the estimate' }).click();
   const row = panel.getByRole('row').filter({ hasText: 'odds ratio' });

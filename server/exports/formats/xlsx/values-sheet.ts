@@ -1,7 +1,7 @@
-import { addressKey, listValues, numberOf } from '#shared/analysis';
+import { addressKey, numberOf } from '#shared/analysis';
 import type { AddressedValue, ValueAddress } from '#shared/analysis';
 import type { PinnedAnalysis } from '#shared/report';
-import { valueWords } from '#shared/report';
+import { pinValues, valueWords } from '#shared/report';
 import type { Phrasebook } from '#shared/wording';
 import {
   cellsRow,
@@ -12,7 +12,10 @@ import {
   type SheetRow,
 } from './sheet-plan';
 
-/** Every value of every analysis that the report pins, at full precision, with its address. */
+/**
+ * Every value of every analysis that the report pins, at full precision, with its address;
+ * estimates from elsewhere as precisely as they were entered.
+ */
 export function valuesSheet(pins: readonly PinnedAnalysis[], phrasebook: Phrasebook): SheetPlan {
   return {
     name: 'Values',
@@ -49,7 +52,7 @@ const HEADS = [
 const HEAD_LOOK = { bold: true, bottom: 'thin' } as const;
 
 function analysisRows(pin: PinnedAnalysis, phrasebook: Phrasebook): readonly SheetRow[] {
-  return listValues(pin.result, pin.analysisId).map((value) => valueRow(value, pin, phrasebook));
+  return pinValues(pin).map((value) => valueRow(value, pin, phrasebook));
 }
 
 function valueRow(
@@ -72,20 +75,24 @@ function valueRow(
     words(where),
     numberCell(numberOf(quantity), 'General'),
     words(fraction, { align: 'end' }),
-    words(scaleWords(address)),
+    words(scaleWords(address, pin)),
     words(addressKey(address)),
   ]);
 }
 
 /** What a number counts, so that nobody takes a share for a percentage. */
-function scaleWords({ quantity, facet }: ValueAddress): string {
+function scaleWords({ quantity, facet, estimateId }: ValueAddress, pin: PinnedAnalysis): string {
   if (facet === 'pValue') return 'probability, 0 to 1';
   if (facet === 'statistic') return 'test statistic';
   if (COUNTS.includes(quantity)) return 'count';
-  if (quantity === 'riskDifference') return 'difference of shares, −1 to 1';
-  if (quantity === 'riskRatio' || quantity === 'oddsRatio') return 'ratio';
+  const outside = pin.outside?.find(({ id }) => id === estimateId);
+  const measure = outside?.measure ?? quantity;
+  if (measure === 'riskDifference') return 'difference of shares, −1 to 1';
+  if (RATIOS.includes(measure)) return 'ratio';
   return quantity === 'numberNeeded' ? 'people' : 'share, 0 to 1';
 }
+
+const RATIOS: readonly string[] = ['riskRatio', 'oddsRatio', 'rateRatio', 'hazardRatio'];
 
 const COUNTS: readonly ValueAddress['quantity'][] = [
   'events',

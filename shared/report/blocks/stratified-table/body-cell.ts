@@ -155,8 +155,7 @@ export function referenceCell(
   return wordsCell(text, setting.blockId, { parts: 3, marks: ['secondary'] });
 }
 
-/** A cell that has no value. */
-export function missingCell(parts: number, { houseStyle, blockId }: TableSetting): TableBodyCell {
+function missingCell(parts: number, { houseStyle, blockId }: TableSetting): TableBodyCell {
   return wordsCell(houseStyle.table.missingCell.mark, blockId, { parts });
 }
 

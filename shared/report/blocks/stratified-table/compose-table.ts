@@ -8,7 +8,7 @@ import { phraseRuns } from '../phrase-runs';
 import { pinnedAnalysis, problemElement } from '../pinned-result';
 import type { StratifiedTableContent } from './content';
 import { layTable } from './lay-table';
-import { outsideColumns } from './outside-columns';
+import { hasLevels, outsideColumns } from './outside-columns';
 import { notesOfTable } from './table-notes';
 import { planTable } from './table-plan';
 import type { TableSetting } from './table-setting';
@@ -27,9 +27,10 @@ export function composeStratifiedTable(
   const { blockId, houseStyle, phrasebook } = context;
   const decimals = decimalsOf(result, houseStyle);
   const heads = columnHeads(pinned.value, houseStyle, phrasebook);
-  const outside = outsideColumns(content.show, pinned.value);
+  const outsideNoted = outsideColumns(content.show, pinned.value);
+  const outside = outsideNoted.filter(hasLevels);
   const words = { heads, houseStyle, phrasebook };
-  const setting = { blockId, analysisId, result, decimals, outside, ...words };
+  const setting = { blockId, analysisId, result, decimals, outside, outsideNoted, ...words };
   const plan = planTable(content, result, context.framing, outside.length);
   const laid = layTable(plan, setting);
   const table: TableElement = {

@@ -6,7 +6,6 @@ import { countedLayer } from './counted-layer';
 import { columnShape, LEVEL_COLUMN_WEIGHT } from './column-shapes';
 import { outsideCell, outsideShape } from './outside-columns';
 import { groupHead, headRows } from './table-heads';
-import { isOfAll } from './table-plan';
 import type { TableColumnId, TableLayer, TablePlan } from './table-plan';
 import type { TableSetting } from './table-setting';
 
@@ -49,7 +48,6 @@ function levelRows(plan: TablePlan, setting: TableSetting): readonly TableRow[] 
 
 function stackedRows(plan: TablePlan, setting: TableSetting): readonly TableRow[] {
   const { levels } = setting.result.frame.exposure;
-  const beside = plan.layers.findLast(({ scope }) => isOfAll(scope));
   return plan.layers.flatMap((layer): readonly TableRow[] => [
     {
       kind: 'group',
@@ -59,7 +57,7 @@ function stackedRows(plan: TablePlan, setting: TableSetting): readonly TableRow[
     ...levels.map((level) =>
       withOutside(
         levelRow(level, [layer], 1, setting),
-        layer === beside ? level.id : null,
+        layer.scope.kind === 'crude' ? level.id : null,
         setting,
       ),
     ),
@@ -80,7 +78,7 @@ function levelRow(
   return { kind: 'level', indent, cells: [head, ...cells] };
 }
 
-/** A row with its estimates from elsewhere; empty cells where the row is not about all records. */
+/** A row with its estimates from elsewhere; empty cells where it is not one of the crude rows. */
 function withOutside(row: TableRow, levelId: string | null, setting: TableSetting): TableRow {
   const cells = setting.outside.map((column) => outsideCell(column, levelId, setting));
   return cells.length === 0 ? row : { ...row, cells: [...row.cells, ...cells] };

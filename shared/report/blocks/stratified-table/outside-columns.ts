@@ -1,3 +1,4 @@
+import type { HouseStyle } from '#shared/house-style';
 import type { TableBodyCell } from '#shared/layout';
 import { isSameModel } from '#shared/outside-estimates';
 import type { OutsideEstimate } from '#shared/outside-estimates';
@@ -6,7 +7,7 @@ import type { OutsideColumn } from '#shared/wording';
 import type { PinnedAnalysis } from '../../report';
 import { fittingEstimates } from '../fitting-estimates';
 import { wordsCell } from '../table-cells';
-import { estimateCell, missingCell, referenceCell } from './body-cell';
+import { estimateCell, referenceCell } from './body-cell';
 import type { ColumnShape } from './column-shapes';
 import type { TableChoice } from './content';
 import type { TableSetting } from './table-setting';
@@ -32,6 +33,11 @@ export function outsideColumns(
     const number = rivals.length > 1 ? rivals.indexOf(first) + 1 : null;
     return { estimates: fitting.filter((one) => inOneColumn(one, first)), number };
   });
+}
+
+/** Whether a column has an estimate of a level, and not only of all levels together. */
+export function hasLevels({ estimates }: OutsideColumn): boolean {
+  return estimates.some(({ levelId }) => levelId !== null);
 }
 
 function inOneColumn(one: OutsideEstimate, other: OutsideEstimate): boolean {
@@ -70,5 +76,20 @@ export function outsideCell(
   const printed = estimate ? outsideText(estimate, setting.houseStyle) : null;
   return estimate && printed
     ? estimateCell(printed, (facet) => outsideAddress(estimate, facet), setting)
-    : missingCell(PARTS, setting);
+    : wordsCell(missingMark(setting.houseStyle), setting.blockId, { parts: PARTS });
+}
+
+/** What stands where no estimate was computed; a word for "not estimable" would say too much. */
+export function missingMark({ table }: HouseStyle): string {
+  const { mark, meaning } = table.missingCell;
+  return mark === meaning ? '–' : mark;
+}
+
+/** Whether a column lacks a level that is compared with the reference. */
+export function lacksLevels({ outside, result }: TableSetting): boolean {
+  const { levels, referenceLevelId } = result.frame.exposure;
+  const compared = levels.filter(({ id }) => id !== referenceLevelId);
+  return outside.some(({ estimates }) =>
+    compared.some(({ id }) => !estimates.some(({ levelId }) => levelId === id)),
+  );
 }

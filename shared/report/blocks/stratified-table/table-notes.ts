@@ -5,6 +5,7 @@ import { abbreviationNote } from '../abbreviation-note';
 import { phraseRuns } from '../phrase-runs';
 import { wordsRun } from '../table-cells';
 import type { TableChoice } from './content';
+import { lacksLevels, missingMark } from './outside-columns';
 import type { TablePlan } from './table-plan';
 import type { TableSetting } from './table-setting';
 
@@ -44,9 +45,14 @@ function contentsOf(show: TableChoice, plan: TablePlan): TableContents {
 }
 
 /** What stands behind each column of estimates from elsewhere, and who computed it. */
-function outsideNotes({ outside, ...setting }: TableSetting): readonly Phrase[] {
-  const { houseStyle, phrasebook } = setting;
-  return outside.map((column) => outsideNote(column, setting, houseStyle, phrasebook));
+function outsideNotes(setting: TableSetting): readonly Phrase[] {
+  const { outsideNoted, houseStyle, phrasebook } = setting;
+  const mark = missingMark(houseStyle);
+  const missing = { parts: fillPattern(phrasebook, 'outside.missing', { mark }) };
+  return [
+    ...outsideNoted.map((column) => outsideNote(column, setting, houseStyle, phrasebook)),
+    ...(lacksLevels(setting) ? [missing] : []),
+  ];
 }
 
 /** Counts are never adjusted; beside adjusted estimates that has to be said. */

@@ -29,8 +29,8 @@ const MOST_STRATA_BESIDE = 2;
 /**
  * Plans a table. The framing chooses among the effect columns: differences, ratios, or both with
  * the differences first; counts and risks stay in every framing. The arrangement never depends on
- * the framing, so that toggling it moves no rows. Estimates from elsewhere are about all strata:
- * below each other, they stand in the rows of all records, which they bring along.
+ * the framing, so that toggling it moves no rows. Estimates from elsewhere stand beside the
+ * crude ones: where layers are below each other, they bring the rows of all strata along.
  */
 export function planTable(
   content: Pick<StratifiedTableContent, 'show' | 'layout'>,
@@ -40,9 +40,8 @@ export function planTable(
 ): TablePlan {
   const arrangement = arrangementOf(content, result, outsideColumns);
   const columns = columnsOf(content.show, result, framing);
-  const chosen = scopesOf(content.show, result);
-  const needsAll = outsideColumns > 0 && arrangement === 'stacked' && !chosen.some(isOfAll);
-  const scopes = needsAll ? [...chosen, { kind: 'crude' } as const] : chosen;
+  const needsCrude = outsideColumns > 0 && arrangement === 'stacked';
+  const scopes = scopesOf(needsCrude ? { ...content.show, crude: true } : content.show, result);
   return { arrangement, layers: scopes.map((scope) => layerOf(scope, columns, arrangement)) };
 }
 
@@ -116,11 +115,6 @@ function arrangementOf(
   const total = widths.reduce((sum, width) => sum + width, outsideColumns);
   const fits = result.strata.length <= MOST_STRATA_BESIDE && total <= MOST_COLUMNS;
   return fits ? 'sideBySide' : 'stacked';
-}
-
-/** Whether a layer is about all records. */
-export function isOfAll({ kind }: ResultScope): boolean {
-  return kind !== 'stratum';
 }
 
 /** Beside the strata, pooled estimates have columns of their own, and no counts to repeat. */

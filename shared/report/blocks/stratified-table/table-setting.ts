@@ -12,6 +12,8 @@ export interface TableSetting {
   readonly heads: ColumnHeads;
   /** Estimates from elsewhere, a column for each measure of each model. */
   readonly outside: readonly OutsideColumn[];
+  /** Those columns, and what is about all levels together and so stands in the notes only. */
+  readonly outsideNoted: readonly OutsideColumn[];
   readonly houseStyle: HouseStyle;
   readonly phrasebook: Phrasebook;
 }

@@ -32,6 +32,18 @@ export class OutsideStore {
     return print === null ? [] : outsideRows(this.bench.saved()?.outside ?? [], print);
   });
 
+  /** What the checks found, each sentence once with the estimates that it is about. */
+  readonly notes = computed(() => {
+    const rows = this.rows();
+    const words = new Set(rows.flatMap(({ notes }) => notes.map((note) => note.words)));
+    return [...words].flatMap((said) => {
+      const about = rows.filter(({ notes }) => notes.some((note) => note.words === said));
+      const note = about[0]?.notes.find((one) => one.words === said);
+      const subject = about.map(({ level, measure }) => `${level}, ${measure}`).join('; ');
+      return note === undefined ? [] : [{ ...note, subject }];
+    });
+  });
+
   /** Lists an estimate that was added or changed. */
   take(estimate: OutsideEstimate): void {
     this.update((estimates) => {

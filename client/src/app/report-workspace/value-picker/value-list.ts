@@ -1,5 +1,5 @@
-import { addressKey, listValues, type ValueAddress } from '#shared/analysis';
-import { valueWords, type PinnedAnalysis, type ValueWords } from '#shared/report';
+import { addressKey, type ValueAddress } from '#shared/analysis';
+import { pinValues, valueWords, type PinnedAnalysis, type ValueWords } from '#shared/report';
 import type { Phrasebook } from '#shared/wording';
 
 /** A value to choose: in words, and as it prints. */
@@ -20,7 +20,7 @@ export function listedValues(
   phrasebook: Phrasebook,
   textOf: (address: ValueAddress) => string,
 ): readonly ListedValue[] {
-  return listValues(pin.result, pin.analysisId).map(({ address }) => {
+  return pinValues(pin).map(({ address }) => {
     const words = valueWords(address, pin, phrasebook);
     const place = [words.whom, words.where].filter(Boolean).join(', ');
     return { ...words, place, key: addressKey(address), address, text: textOf(address) };
