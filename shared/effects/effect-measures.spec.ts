@@ -47,6 +47,35 @@ describe.each(EFFECT_MEASURE_IDS.map((id) => EFFECT_MEASURES[id]))('$label', (me
   });
 });
 
+describe('an interval method with its own estimate', () => {
+  const tea: FourfoldTable = {
+    index: { events: 3, total: 4 },
+    reference: { events: 1, total: 4 },
+  };
+
+  it('gives the value, which is no fraction of the counts', () => {
+    const { oddsRatio } = EFFECT_MEASURES;
+    const estimate = oddsRatio.estimate(tea, 'conditionalExact', 0.95);
+    expect(estimate.ok && estimate.value.value).toBeCloseTo(6.40832, 5);
+    expect(oddsRatio.fraction(tea, 'conditionalExact')).toBeNull();
+    expect(oddsRatio.fraction(tea, 'woolf')).toEqual({ numerator: 9, denominator: 1 });
+  });
+
+  it('keeps what is known from below of an infinite ratio', () => {
+    const apart = { ...tea, reference: { events: 0, total: 4 } };
+    for (const [measure, method] of [
+      ['riskRatio', 'koopman'],
+      ['riskRatio', 'chanZhang'],
+      ['oddsRatio', 'conditionalExact'],
+      ['oddsRatio', 'cornfield'],
+    ] as const) {
+      const estimate = EFFECT_MEASURES[measure].estimate(apart, method, 0.95);
+      expect(estimate).toMatchObject({ ok: false, issue: { code: 'zeroCell' } });
+      expect(Number(!estimate.ok && estimate.issue.facts?.atLeast)).toBeGreaterThan(0);
+    }
+  });
+});
+
 describe('designs', () => {
   it('give every measure, but odds only where the outcome was sampled', () => {
     for (const design of STUDY_DESIGNS) {

@@ -22,7 +22,8 @@ export function makeMeasure(parts: MeasureParts): EffectMeasure {
     nullValue: NULL_VALUES[parts.scale],
     estimate: (table, intervalId, level) =>
       estimateBy(memberOf(intervals, intervalId, id), valueOf, table, level),
-    fraction: (table) => safeFraction(fractionOf(table)),
+    fraction: (table, intervalId) =>
+      intervals[intervalId ?? '']?.pointOf ? null : safeFraction(fractionOf(table)),
     pooled: (strata, level, poolingId = parts.defaultPoolingId) =>
       memberOf(poolings, poolingId, id).pooled(strata, level),
     uninformative: (strata, poolingId = parts.defaultPoolingId) => {

@@ -28,13 +28,24 @@ export function constrainedReferenceRisk(table: FourfoldTable, difference: numbe
   }
   let risk = inside(closedRoot(table, difference), lower, upper);
   for (let step = 0; step < MOST_STEPS; step += 1) {
-    const slope = slopeAt(cells, risk, difference);
+    const one = 1 / (risk + difference);
+    const two = 1 / (1 - risk - difference);
+    const three = 1 / risk;
+    const four = 1 / (1 - risk);
+    const { indexEvents, indexOthers, referenceEvents, referenceOthers } = cells;
+    const slope =
+      indexEvents * one - indexOthers * two + referenceEvents * three - referenceOthers * four;
+    const steepness =
+      indexEvents * one * one +
+      indexOthers * two * two +
+      referenceEvents * three * three +
+      referenceOthers * four * four;
     if (slope > 0) {
       lower = risk;
     } else {
       upper = risk;
     }
-    const next = inside(risk + slope / steepnessAt(cells, risk, difference), lower, upper);
+    const next = inside(risk + slope / steepness, lower, upper);
     const settled = Math.abs(next - risk) <= SETTLED * Math.min(next, 1 - next);
     risk = next;
     if (settled) {
@@ -75,20 +86,6 @@ function term(count: number, risk: number): number {
   return count === 0 ? 0 : count / Math.max(0, risk);
 }
 
-/** Minus the slope's own slope. */
-function steepnessAt(cells: FourfoldCells, risk: number, difference: number): number {
-  return (
-    square(cells.indexEvents, risk + difference) +
-    square(cells.indexOthers, 1 - risk - difference) +
-    square(cells.referenceEvents, risk) +
-    square(cells.referenceOthers, 1 - risk)
-  );
-}
-
-function square(count: number, risk: number): number {
-  return count === 0 ? 0 : count / (risk * risk);
-}
-
 /** The middle root of the likelihood's cubic, by the cosine of a third of an angle. */
 function closedRoot({ index, reference }: FourfoldTable, difference: number): number {
   const total = index.total + reference.total;
@@ -97,8 +94,8 @@ function closedRoot({ index, reference }: FourfoldTable, difference: number): nu
   const first =
     ((reference.total * difference - total - 2 * reference.events) * difference + events) / total;
   const constant = (reference.events * difference * (1 - difference)) / total;
-  const q = second ** 3 / 27 - (first * second) / 6 + constant / 2;
+  const q = (second * second * second) / 27 - (first * second) / 6 + constant / 2;
   const p = Math.sign(q) * Math.sqrt(Math.max(0, (second * second) / 9 - first / 3));
-  const cosine = Math.max(-1, Math.min(1, q / p ** 3));
+  const cosine = Math.max(-1, Math.min(1, q / (p * p * p)));
   return 2 * p * Math.cos((Math.PI + Math.acos(cosine)) / 3) - second / 3;
 }
