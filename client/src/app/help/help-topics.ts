@@ -2,6 +2,7 @@ import analyses from './topics/analyses.md' with { loader: 'text' };
 import begin from './topics/begin.md' with { loader: 'text' };
 import cautions from './topics/cautions.md' with { loader: 'text' };
 import codeBook from './topics/code-book.md' with { loader: 'text' };
+import coverage from './topics/coverage.md' with { loader: 'text' };
 import data from './topics/data.md' with { loader: 'text' };
 import framing from './topics/framing.md' with { loader: 'text' };
 import keys from './topics/keys.md' with { loader: 'text' };
@@ -21,6 +22,7 @@ export const HELP_TOPICS: readonly HelpTopic[] = [
   { path: 'data', name: 'Load data', text: data },
   { path: 'code-book', name: 'The code book', text: codeBook },
   { path: 'analyses', name: 'Analyses', text: analyses },
+  { path: 'intervals', name: 'Intervals compared', text: coverage },
   { path: 'report', name: 'The report', text: report },
   { path: 'framing', name: 'Both ways', text: framing },
   { path: 'wording', name: 'How sentences are worded', text: wording },
