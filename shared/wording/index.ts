@@ -12,6 +12,7 @@ export { outsideAddress, outsidePValue, outsideText } from './outside/outside-nu
 export {
   outsideHead,
   outsideMeasureName,
+  outsideName,
   outsideNote,
   outsideSentence,
 } from './outside/outside-words';

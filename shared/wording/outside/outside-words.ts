@@ -40,12 +40,20 @@ export function outsideHead(
 ): string {
   const [first] = column.estimates;
   if (first === undefined) return '';
+  return headWithInterval(outsideName(column, analysis, style, book), first.level, style, book);
+}
+
+/** "Adjusted odds ratio": what a column of estimates from elsewhere holds, differences with unit. */
+export function outsideName(
+  column: OutsideColumn,
+  analysis: PrintedAnalysis,
+  style: HouseStyle,
+  book: Phrasebook,
+): string {
   const name = columnName(column, analysis, book);
-  const inUnit =
-    first.measure === 'riskDifference'
-      ? fillWords(book, `head.${style.difference.unit}`, { head: name })
-      : name;
-  return headWithInterval(inUnit, first.level, style, book);
+  return column.estimates[0]?.measure === 'riskDifference'
+    ? fillWords(book, `head.${style.difference.unit}`, { head: name })
+    : name;
 }
 
 /** Method, covariates, number analysed and source of a column, and its estimate over all levels. */

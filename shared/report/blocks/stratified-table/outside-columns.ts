@@ -2,7 +2,7 @@ import type { HouseStyle } from '#shared/house-style';
 import type { TableBodyCell } from '#shared/layout';
 import { isSameModel } from '#shared/outside-estimates';
 import type { OutsideEstimate } from '#shared/outside-estimates';
-import { fillWords, outsideAddress, outsideHead, outsideText } from '#shared/wording';
+import { fillWords, outsideAddress, outsideName, outsideText } from '#shared/wording';
 import type { OutsideColumn } from '#shared/wording';
 import type { PinnedAnalysis } from '../../report';
 import { fittingEstimates } from '../fitting-estimates';
@@ -47,7 +47,7 @@ function inOneColumn(one: OutsideEstimate, other: OutsideEstimate): boolean {
 /** How a column of estimates from elsewhere stands in a table. */
 export function outsideShape(column: OutsideColumn, setting: TableSetting): ColumnShape {
   const { houseStyle, phrasebook } = setting;
-  const value = outsideHead(column, setting, houseStyle, phrasebook);
+  const value = outsideName(column, setting, houseStyle, phrasebook);
   return {
     weight: COLUMN_WEIGHT,
     align: 'end',
