@@ -6,8 +6,8 @@ import type { Estimate, EstimationIssue } from '../../estimate';
 import type { StratifiedTable } from '../../fourfold-table';
 import { issueOfTest } from '../../tests-of-association/fourfold-issue';
 import { informativeStrata } from '../pooled-estimate';
-import type { ConditionalSupport, ConditionalTails } from './conditional-sum';
-import { RANGE, conditionalSum, conditionalSupport } from './conditional-sum';
+import type { ConditionalSum, ConditionalSupport, ConditionalTails } from './conditional-sum';
+import { RANGE, conditionalSum, conditionalSupport, startingRatio } from './conditional-sum';
 
 /** The longest support that is summed: beyond, the approximation is as good and immediate. */
 const LONGEST_SUPPORT = 20_000;
@@ -54,10 +54,11 @@ function estimateOf(
   level: number,
   { method, shareOfObserved }: ConditionalLimits,
 ): Estimate {
-  const { start, tailsAt } = conditionalSum(strata, support);
+  const start = startingRatio(strata, support);
+  const sum = conditionalSum(strata, support, start);
   const tail = (1 - level) / 2;
   const root = (rising: (tails: ConditionalTails) => ValueAndSlope): number =>
-    Math.exp(zeroOfIncreasing((logRatio) => rising(tailsAt(logRatio)), start, RANGE));
+    Math.exp(rootOf(strata, support, { sum, start }, rising));
   const none = support.observed === support.smallest;
   return {
     value: none ? 0 : root(meanDistance),
@@ -68,6 +69,27 @@ function estimateOf(
       method,
     },
   };
+}
+
+/** A distribution and the logarithm of the ratio at which it was laid out. */
+interface LaidOut {
+  readonly sum: ConditionalSum;
+  readonly start: number;
+}
+
+/** Where a rising function of the tails is 0; laid out anew there when that is too far away. */
+function rootOf(
+  strata: StratifiedTable,
+  support: ConditionalSupport,
+  { sum, start }: LaidOut,
+  rising: (tails: ConditionalTails) => ValueAndSlope,
+): number {
+  const root = zeroOfIncreasing((logRatio) => rising(sum.tailsAt(logRatio)), start, RANGE);
+  if (sum.covers(root)) {
+    return root;
+  }
+  const nearer = { sum: conditionalSum(strata, support, root), start: root };
+  return rootOf(strata, support, nearer, rising);
 }
 
 /** The expected less the observed number; its slope is the variance. */

@@ -1,11 +1,10 @@
 import { marginsOf } from '../../check-counts';
 import { hypergeometricSupport } from '../../distributions';
 import type { Urn } from '../../distributions';
-import { fitOddsRatio } from '../../fitted-odds-ratio';
 import type { FourfoldTable, StratifiedTable } from '../../fourfold-table';
-import { zeroOfDecreasing } from '../../intervals/score/bisection';
+import { zeroOfIncreasing } from '../../conditional/newton';
 import type { WeightRun } from './weight-run';
-import { runAroundMode, sumOfRuns } from './weight-run';
+import { LOG_OF_CUT, runAroundMode, sumOfRuns } from './weight-run';
 
 /** The range of a search on the log scale; e^60 is far beyond any ratio of counts. */
 export const RANGE = [-60, 60] as const;
@@ -48,39 +47,68 @@ export interface ConditionalTails {
 
 /** The distribution of the index groups' events by the logarithm of the common odds ratio. */
 export interface ConditionalSum {
-  /** A ratio near the estimate. */
-  readonly start: number;
   readonly tailsAt: (logRatio: number) => ConditionalTails;
+  /** Whether the counts that were cut off at either end do not matter at a ratio. */
+  readonly covers: (logRatio: number) => boolean;
 }
 
 /**
  * The distribution of the index groups' events given all margins, as a function of the logarithm of
  * the common odds ratio: noncentral hypergeometric counts of the strata, summed.
  *
- * The weights are laid out at a ratio near the estimate and tilted from there, so that nothing
- * near the observed number underflows however far the ratio is from 1.
+ * The weights are laid out at a ratio, best near those that are asked for, and tilted from there:
+ * counts that hardly occur at it are cut off, so that the distribution covers ratios around it.
  */
 export function conditionalSum(
   strata: StratifiedTable,
   support: ConditionalSupport,
+  start: number,
 ): ConditionalSum {
-  const start = startingRatio(strata, support);
   const run = sumOfRuns(strata.map(({ table }) => noncentralRun(urnOf(table), Math.exp(start))));
   const logWeights = run.weights.map((weight) => Math.log(weight));
   const first = run.first - support.observed;
-  return { start, tailsAt: (logRatio) => tailsOf(first, logWeights, logRatio - start) };
+  return {
+    tailsAt: (logRatio) => tailsOf(first, logWeights, logRatio - start),
+    covers(logRatio) {
+      const tilt = logRatio - start;
+      const negligible = largestTilted(logWeights, tilt) - DIGITS - LOG_OF_CUT;
+      return -tilt < negligible && logWeights.length * tilt < negligible;
+    },
+  };
 }
 
-/** About where the expected events are the observed ones, half an event inside the support. */
-function startingRatio(strata: StratifiedTable, support: ConditionalSupport): number {
+/** The logarithm of what no double would notice in a sum. */
+const DIGITS = 40;
+
+/**
+ * The logarithm of the ratio at which the expected events are the observed ones, kept half an event
+ * inside the support: strata one by one, no sum laid out.
+ */
+export function startingRatio(strata: StratifiedTable, support: ConditionalSupport): number {
   const { observed, smallest, largest } = support;
   const inside = Math.min(largest - 0.5, Math.max(smallest + 0.5, observed));
-  return zeroOfDecreasing(
-    (logRatio) =>
-      strata.reduce((sum, { table }) => sum + fitOddsRatio(table, logRatio).deviation, 0) +
-      (inside - observed),
-    ...RANGE,
+  const urns = strata.map(({ table }) => urnOf(table));
+  return zeroOfIncreasing(
+    (logRatio) => {
+      const moments = urns.map((urn) => momentsOf(noncentralRun(urn, Math.exp(logRatio))));
+      const mean = moments.reduce((sum, one) => sum + one.mean, 0);
+      return { value: mean - inside, slope: moments.reduce((sum, one) => sum + one.variance, 0) };
+    },
+    0,
+    RANGE,
   );
+}
+
+function momentsOf({ first, weights }: WeightRun): { mean: number; variance: number } {
+  const sums = { weight: 0, moment: 0, squares: 0 };
+  for (let place = 0; place < weights.length; place += 1) {
+    const weight = weights[place] as number;
+    sums.weight += weight;
+    sums.moment += weight * place;
+    sums.squares += weight * place * place;
+  }
+  const mean = sums.moment / sums.weight;
+  return { mean: first + mean, variance: sums.squares / sums.weight - mean * mean };
 }
 
 function noncentralRun(urn: Urn, ratio: number): WeightRun {

@@ -7,6 +7,9 @@ export interface WeightRun {
 /** Weights below this share of the largest, 15 standard errors away, are cut off. */
 const SMALLEST = 1e-50;
 
+/** The logarithm of the largest weight that can have been cut off. */
+export const LOG_OF_CUT = Math.log(SMALLEST);
+
 /**
  * The weights of counts whose neighbours stand in a falling ratio, walked outwards from the mode.
  *
