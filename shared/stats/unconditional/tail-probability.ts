@@ -1,5 +1,5 @@
 import { binomialTerms } from '../distributions';
-import type { BinomialTerms, CountRange } from '../distributions';
+import type { CountRange } from '../distributions';
 import type { ExtremeTables } from './extreme-tables';
 
 /** Chances of an event; the index group's may differ between the two sides of extreme tables. */
@@ -27,12 +27,15 @@ export function tailProbability(
   return ({ below, above }, chances) => {
     const range = reference.fill(chances.reference);
     sumUp(reference.terms, range, sums);
-    const favouring = weighted(index, chances.indexBelow, below, { ...range, sums });
+    const rows = index.fill(chances.indexBelow);
+    const favouring = weighted(index.terms, rows, below, { ...range, sums });
     if (above === null) {
       return favouring;
     }
     sumDown(reference.terms, range, sums);
-    return favouring + weighted(index, chances.indexAbove, above, { ...range, sums });
+    const same = chances.indexAbove === chances.indexBelow;
+    const others = same ? rows : index.fill(chances.indexAbove);
+    return favouring + weighted(index.terms, others, above, { ...range, sums });
   };
 }
 
@@ -46,13 +49,11 @@ interface Sums extends CountRange {
  * bounds are cut to the range's ends, beyond which the sums stand still.
  */
 function weighted(
-  index: BinomialTerms,
-  chance: number,
+  terms: Float64Array,
+  rows: CountRange,
   bounds: Int32Array,
   { from, to, sums }: Sums,
 ): number {
-  const { terms } = index;
-  const rows = index.fill(chance);
   let sum = 0;
   for (let row = rows.from; row <= rows.to; row += 1) {
     const bound = bounds[row] as number;
