@@ -135,22 +135,23 @@ function keyOf(numbers: readonly number[], total: number): number | string {
 
 /** Pasts in the order of their sums, with the probability from each place to the end. */
 interface SortedPast {
-  readonly sums: readonly number[];
-  readonly shares: readonly number[];
-  readonly from: readonly number[];
+  readonly sums: Float64Array;
+  readonly shares: Float64Array;
+  readonly from: Float64Array;
 }
 
 function sortedPast(pasts: ReadonlyMap<number, number>): SortedPast {
-  const entries = [...pasts].sort(([one], [other]) => one - other);
-  const from = new Array<number>(entries.length + 1).fill(0);
-  for (let at = entries.length - 1; at >= 0; at -= 1) {
-    from[at] = (from[at + 1] ?? 0) + (entries[at]?.[1] ?? 0);
+  const sums = Float64Array.from(pasts.keys()).sort();
+  const shares = sums.map((sum) => pasts.get(sum) ?? 0);
+  const from = new Float64Array(sums.length + 1);
+  for (let at = sums.length - 1; at >= 0; at -= 1) {
+    from[at] = (from[at + 1] as number) + (shares[at] as number);
   }
-  return { sums: entries.map(([sum]) => sum), shares: entries.map(([, share]) => share), from };
+  return { sums, shares, from };
 }
 
 /** The first place whose sum is at least so large. */
-function firstFrom(sums: readonly number[], least: number): number {
+function firstFrom(sums: Float64Array, least: number): number {
   let low = 0;
   let high = sums.length;
   while (low < high) {
