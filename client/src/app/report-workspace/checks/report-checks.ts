@@ -1,5 +1,5 @@
 import { computed, inject, Injectable } from '@angular/core';
-import { listValues } from '#shared/analysis';
+import { pinValues } from '#shared/report';
 import { PHRASEBOOK } from '../../ui/phrasebook';
 import { ProofWords } from '../proof/proof-words';
 import type { PrintedBlock } from '../proof/printed-block';
@@ -8,6 +8,7 @@ import { ReportState } from '../report-store/report-state';
 import { ReportStore } from '../report-store/report-store';
 import { blockChecks } from './block-checks';
 import { guardChecks } from './guard-checks';
+import { outsideChecks } from './outside-checks';
 import type { ProofCheck } from './proof-check';
 import { printedValue, type PrintedValue } from './typed-numbers';
 
@@ -61,16 +62,18 @@ export class ReportChecks {
     const shown = new Set(printed.bound.map(({ address }) => address.analysisId));
     return [...shown].flatMap((analysisId) => {
       const pin = this.state.pins().get(analysisId);
-      return pin === undefined ? [] : guardChecks(blockId, printed, pin, under);
+      if (pin === undefined) return [];
+      return [
+        ...guardChecks(blockId, printed, pin, under),
+        ...outsideChecks(blockId, printed, pin, under),
+      ];
     });
   }
 
   /** Every value of the pinned analyses as it prints; worked out once a number was typed. */
   private readonly values = computed((): readonly PrintedValue[] =>
-    [...this.state.pins().values()].flatMap(({ analysisId, result }) =>
-      listValues(result, analysisId).map(({ address }) =>
-        printedValue(address, this.words.textOf(address)),
-      ),
+    [...this.state.pins().values()].flatMap((pin) =>
+      pinValues(pin).map(({ address }) => printedValue(address, this.words.textOf(address))),
     ),
   );
 
