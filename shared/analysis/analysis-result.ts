@@ -1,7 +1,13 @@
 import type { Result } from '#shared/core';
 import type { FactorLevel } from '#shared/code-book';
 import type { EffectMeasureId, StudyDesign } from '#shared/effects';
-import type { Estimate, EstimationIssue, GroupCount, TestOutcome } from '#shared/stats';
+import type {
+  Estimate,
+  EstimationIssue,
+  GroupCount,
+  Interaction,
+  TestOutcome,
+} from '#shared/stats';
 import type { LeftOut } from '#shared/tally';
 import type { AnalysisSpecification } from './specification';
 
@@ -80,6 +86,16 @@ export interface PooledContrastResult {
   readonly measures: Readonly<Record<EffectMeasureId, Result<Estimate, EstimationIssue>>>;
   readonly homogeneity: Readonly<Record<EffectMeasureId, Result<TestOutcome, EstimationIssue>>>;
   readonly conditionalIndependence: Result<TestOutcome, EstimationIssue>;
+  /**
+   * How the effect differs between two strata, the second against the first: a difference of
+   * differences, ratios of ratios. Only there where there are exactly two strata.
+   */
+  readonly interaction?: Readonly<Record<EffectMeasureId, Result<Interaction, EstimationIssue>>>;
+  /**
+   * The relative excess risk due to interaction of an exposure of two levels and a stratifying
+   * factor of two, whose first level is the reference. Only there where there are just those.
+   */
+  readonly excessRisk?: Result<Interaction, EstimationIssue>;
   /** Strata that no pooled number of the contrast could use (an empty group, for instance). */
   readonly leftOut: readonly StratumLeftOut[];
   /** Strata that tell nothing about one measure's pooled estimate; includes those of `leftOut`. */

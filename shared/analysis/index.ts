@@ -39,9 +39,11 @@ export { printedTest } from './printed-test';
 export type { PrintedTest } from './printed-test';
 export { numberOf } from './quantity';
 export type { Quantity } from './quantity';
+export { impactOf } from './read-impact';
+export type { Impact, ImpactPlace } from './read-impact';
 export { readValue } from './read-value';
 export type { ValueIssue } from './read-value';
-export { contrastTable, layerAt, pooledAt } from './result-places';
+export { contrastStrata, contrastTable, layerAt, pooledAt } from './result-places';
 export type {
   Adjustment,
   AnalysisSpecification,

@@ -74,16 +74,26 @@ function caseControlPlaces({ frame }: AnalysisResult, scope: ResultScope): reado
 function contrastPlaces(scope: ResultScope, levelId: string): readonly Place[] {
   return [
     ...placesAt(scope, levelId, ESTIMATE, [...EFFECT_MEASURE_IDS, 'numberNeeded']),
+    ...placesAt(scope, levelId, ESTIMATE, IMPACT),
     ...placesAt(scope, levelId, TEST, ['test', 'pearson', 'fisher']),
   ];
 }
+
+const INTERACTIONS: readonly AddressedQuantity[] = [
+  ...EFFECT_MEASURE_IDS.map((id) => `interaction:${id}` as const),
+  'excessRisk',
+];
+
+const IMPACT = ['fractionInExposed', 'populationFraction', 'eValue'] as const;
 
 function pooledPlaces(result: AnalysisResult): readonly Place[] {
   const scope: ResultScope = { kind: 'pooled' };
   const homogeneity = EFFECT_MEASURE_IDS.map((id) => `homogeneity:${id}` as const);
   return result.pooled.flatMap(({ indexLevelId }) => [
     ...placesAt(scope, indexLevelId, ESTIMATE, [...EFFECT_MEASURE_IDS, 'numberNeeded']),
+    ...placesAt(scope, indexLevelId, ESTIMATE, IMPACT),
     ...placesAt(scope, indexLevelId, TEST, ['conditionalIndependence', ...homogeneity]),
+    ...placesAt(scope, indexLevelId, [...ESTIMATE, ...TEST], INTERACTIONS),
   ]);
 }
 

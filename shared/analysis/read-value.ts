@@ -8,10 +8,13 @@ import type {
   EstimationIssue,
   EstimationIssueCode,
   GroupCount,
+  Interaction,
+  Interval,
   TestOutcome,
 } from '#shared/stats';
 import type { AnalysisResult, LayerResult, PooledContrastResult } from './analysis-result';
 import { readCaseControl } from './read-case-control';
+import { impactOf } from './read-impact';
 import { contrastTable, layerAt, pooledAt } from './result-places';
 import type { Quantity } from './quantity';
 import type {
@@ -61,6 +64,26 @@ const READERS: Readonly<
     readHomogeneity('riskDifference', result, address),
   'homogeneity:riskRatio': (result, address) => readHomogeneity('riskRatio', result, address),
   'homogeneity:oddsRatio': (result, address) => readHomogeneity('oddsRatio', result, address),
+  'interaction:riskDifference': (result, address) =>
+    readInteraction(interactionAt('riskDifference', result, address), address.facet),
+  'interaction:riskRatio': (result, address) =>
+    readInteraction(interactionAt('riskRatio', result, address), address.facet),
+  'interaction:oddsRatio': (result, address) =>
+    readInteraction(interactionAt('oddsRatio', result, address), address.facet),
+  excessRisk: (result, address) =>
+    readInteraction(pooledContrast(result, address)?.excessRisk, address.facet),
+  fractionInExposed: (result, address) =>
+    readReal(impactOf(result, address)?.fractionInExposed, ({ value, interval }) =>
+      estimateFacet(address.facet, value, interval),
+    ),
+  populationFraction: (result, address) =>
+    readReal(impactOf(result, address)?.populationFraction, ({ value, interval }) =>
+      estimateFacet(address.facet, value, interval),
+    ),
+  eValue: (result, address) =>
+    readReal(impactOf(result, address)?.eValue, (found) =>
+      address.facet === 'value' || address.facet === 'lower' ? found[address.facet] : null,
+    ),
   counted: (result, address) => readWholeCount(result.counted, address),
   leftOut: (result, address) =>
     readWholeCount(
@@ -223,6 +246,46 @@ function readHomogeneity(
   address: ValueAddress,
 ): Reading {
   return readTest(pooledContrast(result, address)?.homogeneity[id], address.facet);
+}
+
+function interactionAt(
+  id: EffectMeasureId,
+  result: AnalysisResult,
+  address: ValueAddress,
+): Result<Interaction, EstimationIssue> | undefined {
+  return pooledContrast(result, address)?.interaction?.[id];
+}
+
+function readInteraction(
+  interaction: Result<Interaction, EstimationIssue> | undefined,
+  facet: AddressFacet,
+): Reading {
+  return readReal(interaction, ({ estimate, test }) =>
+    facet === 'pValue' || facet === 'statistic'
+      ? test[facet]
+      : estimateFacet(facet, estimate.value, estimate.interval),
+  );
+}
+
+function estimateFacet(
+  facet: AddressFacet,
+  value: number,
+  { lower, upper }: Interval,
+): number | null {
+  const parts: Partial<Record<AddressFacet, number>> = { value, lower, upper };
+  return parts[facet] ?? null;
+}
+
+/** A real number of something that may not be estimable, or may not be there. */
+function readReal<Found>(
+  found: Result<Found, EstimationIssue> | undefined,
+  partOf: (found: Found) => number | null,
+): Reading {
+  if (!found?.ok) {
+    return failure(found?.issue ?? NOT_THERE);
+  }
+  const value = partOf(found.value);
+  return value === null ? failure(NOT_THERE) : success({ kind: 'real', value });
 }
 
 function contrastAt(

@@ -1,4 +1,4 @@
-import type { FourfoldTable } from '#shared/stats';
+import type { FourfoldTable, StratifiedTable } from '#shared/stats';
 import type { AnalysisResult, LayerResult, PooledContrastResult } from './analysis-result';
 import type { ResultScope } from './value-address';
 
@@ -33,4 +33,21 @@ export function contrastTable(
   const index = countAt(contrast?.indexLevelId);
   const reference = countAt(contrast?.referenceLevelId);
   return index && reference && { index: index.count, reference: reference.count };
+}
+
+/**
+ * The tables of a contrast by stratum, with what standardisation asks of a stratum: its members in
+ * the whole analysis, and its share in a chosen standard population.
+ */
+export function contrastStrata(result: AnalysisResult, indexLevelId: string): StratifiedTable {
+  const shares = result.specification.otherMethods?.standardShares;
+  return result.strata.flatMap((layer) => {
+    const { stratumId: id, total } = layer;
+    const table = contrastTable(layer, indexLevelId);
+    if (id === null || table === undefined) {
+      return [];
+    }
+    const share = shares?.[id];
+    return [{ id, table, members: total.total, ...(share === undefined ? {} : { share }) }];
+  });
 }

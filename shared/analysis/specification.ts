@@ -23,6 +23,8 @@ export interface OtherMethodChoice {
   readonly trendTest?: string | undefined;
   /** How a measure is pooled, by id in its `poolings`. */
   readonly poolings?: Readonly<Partial<Record<EffectMeasureId, string>>> | undefined;
+  /** Shares of the strata in a chosen standard population, by stratum id; any numbers from 0. */
+  readonly standardShares?: Readonly<Record<string, number>> | undefined;
   /** How the strata are compared on a measure, by id in its `homogeneities`. */
   readonly homogeneities?: Readonly<Partial<Record<EffectMeasureId, string>>> | undefined;
 }

@@ -27,6 +27,10 @@ const PLAIN_QUANTITIES = [
   'association',
   'trend',
   'conditionalIndependence',
+  'excessRisk',
+  'fractionInExposed',
+  'populationFraction',
+  'eValue',
   'counted',
   'leftOut',
   ...CASE_CONTROL_QUANTITIES,
@@ -35,14 +39,16 @@ const PLAIN_QUANTITIES = [
 
 /** Which number family of a result an address points into. */
 export type AddressedQuantity =
-  (typeof PLAIN_QUANTITIES)[number] | `homogeneity:${EffectMeasureId}`;
+  | (typeof PLAIN_QUANTITIES)[number]
+  | `homogeneity:${EffectMeasureId}`
+  | `interaction:${EffectMeasureId}`;
 
 const ADDRESS_FACETS = ['value', 'lower', 'upper', 'pValue', 'statistic'] as const;
 
 /**
  * Which number of the family. The `lower` and `upper` of a number needed are the smaller and the
  * larger count; where its limits run through infinity, `lower` is the count for one fewer event and
- * `upper` the count for one more.
+ * `upper` the count for one more. The `lower` of an E-value is that of the limit nearer to 1.
  */
 export type AddressFacet = (typeof ADDRESS_FACETS)[number];
 
@@ -68,7 +74,7 @@ export interface ValueAddress {
 
 const QUANTITIES: ReadonlySet<string> = new Set([
   ...PLAIN_QUANTITIES,
-  ...EFFECT_MEASURE_IDS.map((id) => `homogeneity:${id}`),
+  ...EFFECT_MEASURE_IDS.flatMap((id) => [`homogeneity:${id}`, `interaction:${id}`]),
 ]);
 
 /** Whether a text names a quantity that an address can point to. */

@@ -33,6 +33,7 @@ export const analysisSpecificationSchema: z.ZodType<AnalysisSpecification> = z.o
       contrastTest: idSchema.optional(),
       trendTest: idSchema.optional(),
       poolings: methodsByMeasureSchema.optional(),
+      standardShares: z.record(z.string(), z.number().nonnegative()).optional(),
       homogeneities: methodsByMeasureSchema.optional(),
     })
     .optional(),

@@ -1,5 +1,6 @@
 import type { AddressedQuantity, AddressFacet, ResultScope, ValueAddress } from '#shared/analysis';
-import { contrastTestId } from '#shared/analysis';
+import { contrastTestId, impactOf } from '#shared/analysis';
+import type { AnalysisResult } from '#shared/analysis';
 import type { EffectMeasureId } from '#shared/effects';
 import { TEST_METHODS } from '#shared/stats';
 import type { MethodWords } from '#shared/stats';
@@ -64,6 +65,22 @@ const QUANTITIES: Readonly<Record<AddressedQuantity, QuantityWords>> = {
   'homogeneity:riskDifference': homogeneity('riskDifference'),
   'homogeneity:riskRatio': homogeneity('riskRatio'),
   'homogeneity:oddsRatio': homogeneity('oddsRatio'),
+  'interaction:riskDifference': between('riskDifference', 'minus'),
+  'interaction:riskRatio': between('riskRatio', 'over'),
+  'interaction:oddsRatio': between('oddsRatio', 'over'),
+  excessRisk: () => 'Relative excess risk due to interaction',
+  fractionInExposed: (_terms, { result }, { address }) =>
+    readsAsPrevented(result, address)
+      ? 'Prevented fraction in the exposed, read as causal'
+      : 'Attributable fraction in the exposed, read as causal',
+  populationFraction: (_terms, { result }, { address }) =>
+    readsAsPrevented(result, address)
+      ? 'Prevented fraction in the population, read as causal'
+      : 'Attributable fraction in the population, read as causal',
+  eValue: (terms, _pin, { address }) =>
+    address.facet === 'lower'
+      ? `E-value of the ${terms.measures.riskRatio.name}’s limit nearer to 1`
+      : `E-value of the ${terms.measures.riskRatio.name}`,
   counted: () => 'Records counted',
   leftOut: () => 'Records left out',
   controls: () => 'Controls',
@@ -75,6 +92,19 @@ const QUANTITIES: Readonly<Record<AddressedQuantity, QuantityWords>> = {
   shareOfComparedControls: () => 'Share of controls compared',
   outsideEstimate: outside,
 };
+
+/** "Risk ratio, Kitchen over Hospital ward". */
+function between(id: EffectMeasureId, direction: 'minus' | 'over'): QuantityWords {
+  return (terms, { result }) => {
+    const [first = '', second = ''] = result.frame.strata.map(({ label }) => label);
+    return `${capitalised(terms.measures[id].name)}, ${second} ${direction} ${first}`;
+  };
+}
+
+function readsAsPrevented(result: AnalysisResult, place: ValueAddress): boolean {
+  const impact = impactOf(result, place)?.fractionInExposed;
+  return impact?.ok === true && impact.value.kind === 'prevented';
+}
 
 function testLabel(id: string | null): string {
   const register: Readonly<Record<string, MethodWords>> = TEST_METHODS;
@@ -137,5 +167,12 @@ const COMPARES: readonly AddressedQuantity[] = [
   'homogeneity:riskDifference',
   'homogeneity:riskRatio',
   'homogeneity:oddsRatio',
+  'interaction:riskDifference',
+  'interaction:riskRatio',
+  'interaction:oddsRatio',
+  'excessRisk',
+  'fractionInExposed',
+  'populationFraction',
+  'eValue',
   'outsideEstimate',
 ];

@@ -14,6 +14,10 @@ export interface FourfoldTable {
 export interface TableStratum {
   readonly id: string;
   readonly table: FourfoldTable;
+  /** Members of the stratum in the whole analysis, where it has more groups than these two. */
+  readonly members?: number;
+  /** The stratum's share in a chosen standard population, or its members there. */
+  readonly share?: number;
 }
 
 /** One contrast, layer by layer of the stratifying factor. */

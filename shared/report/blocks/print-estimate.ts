@@ -51,6 +51,22 @@ export function printRatio(
   return withLimits(text, limits, value);
 }
 
+/** A fraction of cases as a percentage, which may lie below 0, or with its limits. */
+export function printFraction(value: ReadValue, format: BoundValueFormat): PrintedValue {
+  const { houseStyle, result } = value;
+  const decimals = decimalsOf(result, houseStyle).percent;
+  const print = (quantity: Quantity): NumberText => {
+    const figure = formatNumber(quantity, { scale: 100, decimals, sign: 'minus' }, houseStyle);
+    return { ...figure, text: withPercentSign(figure.text, houseStyle) };
+  };
+  const [lower, upper] = [facet(value, 'lower'), facet(value, 'upper')];
+  const limits =
+    format === 'withLimits' && lower !== null && upper !== null
+      ? { lower: print(lower), upper: print(upper) }
+      : null;
+  return withLimits(print(value.quantity).text, limits, value);
+}
+
 type SizeKey = Extract<PatternKey, `size.per${string}`>;
 
 const SIZE_PATTERNS: Readonly<Record<DifferenceUnit, SizeKey>> = {

@@ -8,7 +8,7 @@ import { issueWords } from '#shared/wording';
 import type { Phrasebook } from '#shared/wording';
 import type { BoundPart } from '../text/bound-text';
 import type { BoundValueFormat } from '../text/text-document';
-import { printDifference, printRatio, printShare } from './print-estimate';
+import { printDifference, printFraction, printRatio, printShare } from './print-estimate';
 
 /** A value as it is read: its place, its number, and what it prints under. */
 export interface ReadValue {
@@ -69,6 +69,13 @@ const PRINTERS: Readonly<Record<ResultQuantity, Printer>> = {
   'homogeneity:riskDifference': printTest,
   'homogeneity:riskRatio': printTest,
   'homogeneity:oddsRatio': printTest,
+  'interaction:riskDifference': orTest(printDifference),
+  'interaction:riskRatio': orTest((value, format) => printRatio('riskRatio', value, format)),
+  'interaction:oddsRatio': orTest((value, format) => printRatio('oddsRatio', value, format)),
+  excessRisk: orTest((value, format) => printRatio('riskRatio', value, format)),
+  fractionInExposed: printFraction,
+  populationFraction: printFraction,
+  eValue: (value, format) => printRatio('riskRatio', value, format),
   counted: printCount,
   leftOut: printCount,
   controls: printCount,
@@ -79,6 +86,14 @@ const PRINTERS: Readonly<Record<ResultQuantity, Printer>> = {
   shareOfComparedCases: printShare,
   shareOfComparedControls: printShare,
 };
+
+/** A number with a test of its own: the test's facets print as a test does. */
+function orTest(printer: Printer): Printer {
+  return (value, format) =>
+    value.address.facet === 'pValue' || value.address.facet === 'statistic'
+      ? printTest(value)
+      : printer(value, format);
+}
 
 function printCount({ address, quantity, houseStyle }: ReadValue): PrintedValue {
   return [{ text: formatCount(numberOf(quantity), houseStyle).text, addresses: [address] }];

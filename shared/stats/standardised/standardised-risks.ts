@@ -27,7 +27,7 @@ export const STANDARDISATION = {
   shortLabel: 'direct standardisation',
   citation:
     'Fleiss JL, Levin B, Paik MC. Statistical methods for rates and proportions. 3rd edition. ' +
-    'Hoboken: Wiley; 2003, chapter 19.',
+    'Hoboken: Wiley; 2003. Chapter 19.',
 } as const satisfies MethodWords;
 
 /**

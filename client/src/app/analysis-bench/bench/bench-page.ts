@@ -21,6 +21,7 @@ import { ContrastPanel } from '../contrast/contrast-panel';
 import { OutsidePanel } from '../outside/outside-panel';
 import { CountsPanel } from '../panels/counts-panel';
 import { EstimatesPanel } from '../panels/estimates-panel';
+import { FurtherPanel } from '../panels/further-panel';
 import { GuardsPanel } from '../panels/guards-panel';
 import { MethodsPanel } from '../panels/methods-panel';
 import { PooledPanel } from '../panels/pooled-panel';
@@ -47,6 +48,7 @@ import { StaleAnalysis } from './stale-analysis';
     CountsPanel,
     EmptyState,
     EstimatesPanel,
+    FurtherPanel,
     GuardsPanel,
     MethodsPanel,
     OutsidePanel,

@@ -52,6 +52,8 @@ function describedParts(
     'Confidence level': `${Number((level * 100).toPrecision(12))}%`,
     'Interval methods': methodLabels(methods).join(', '),
     'Over the strata': overStrata(specification).join(', ') || 'the usual methods',
+    'Standard population':
+      Object.values(specification.otherMethods?.standardShares ?? {}).join(', ') || 'none',
     Tests: testLabels(specification).join(', ') || 'the usual ones',
     Adjustment: adjustment === 'crude' ? 'none' : 'Mantel–Haenszel',
     'Trend scores': trendScores === null ? '1, 2, 3 …' : Object.values(trendScores).join(', '),

@@ -88,7 +88,10 @@ export function withReference(draft: AnalysisDraft, referenceLevelId: string): A
   return { ...draft, exposure: { ...draft.exposure, referenceLevelId } };
 }
 
-/** Splits the counts by a column, or no longer; columns keep the order of the code book. */
+/**
+ * Splits the counts by a column, or no longer; columns keep the order of the code book. Shares of
+ * a standard population belong to the strata before, and go.
+ */
 export function withStratumToggled(
   draft: AnalysisDraft,
   codeBook: CodeBook,
@@ -97,7 +100,8 @@ export function withStratumToggled(
   const order = codeBook.columns.map(({ id }) => id);
   const stratumColumnIds = toggled(draft.stratumColumnIds, columnId, order);
   const adjustment = stratumColumnIds.length === 0 ? 'crude' : adjustmentFor(draft);
-  return { ...draft, stratumColumnIds, adjustment };
+  const others = withOther(draft, { standardShares: undefined });
+  return { ...others, stratumColumnIds, adjustment };
 }
 
 /** Keeps only records with one of these levels; null takes the restriction away. */
@@ -130,6 +134,14 @@ export function withPooling(
   return withOther(draft, {
     poolings: chosenBut(draft.otherMethods?.poolings, measure, poolingId, usual),
   });
+}
+
+/** The draft with the shares of a chosen standard population, by stratum. */
+export function withStandardShares(
+  draft: AnalysisDraft,
+  standardShares: Readonly<Record<string, number>>,
+): AnalysisDraft {
+  return withOther(draft, { standardShares });
 }
 
 /** The draft with another test of a contrast; undefined leaves it to the expected counts. */

@@ -1,5 +1,4 @@
-import type { AnalysisResult, ResultScope } from '#shared/analysis';
-import { contrastTable, layerAt, poolingId } from '#shared/analysis';
+import { contrastStrata, layerAt, poolingId, type ResultScope } from '#shared/analysis';
 import type { Result } from '#shared/core';
 import { EFFECT_MEASURES, type EffectMeasureId } from '#shared/effects';
 import { DIFFERENCE_SCALES, formatShareLimit, joinLimits } from '#shared/format';
@@ -71,7 +70,8 @@ export function poolingGroups(
   measures: readonly EffectMeasureId[],
   levelId: string | null,
 ): readonly MethodGroup[] {
-  const strata = strataOf(print.result, levelId);
+  if (levelId === null) return [];
+  const strata = contrastStrata(print.result, levelId);
   return measures.map((id) => poolingGroup(print, id, strata));
 }
 
@@ -93,13 +93,6 @@ function poolingGroup(
       estimate: method.pooled(strata, specification.level),
     }),
     printed: (estimate) => printedMeasure(print, measure, estimate, undefined),
-  });
-}
-
-function strataOf(result: AnalysisResult, levelId: string | null): StratifiedTable {
-  return result.strata.flatMap((layer) => {
-    const table = contrastTable(layer, levelId);
-    return table === undefined || layer.stratumId === null ? [] : [{ id: layer.stratumId, table }];
   });
 }
 

@@ -9,10 +9,12 @@ import { withHomogeneity } from '../draft/analysis-draft';
 import { shownMeasures } from '../print/bench-print';
 import { pooledRows, untestedWords } from '../print/pooled-rows';
 
+import { StandardShares } from './standard-shares';
+
 /** The contrasts pooled over strata, and whether the strata differ. */
 @Component({
   selector: 'eh-pooled-panel',
-  imports: [ScrollSideways],
+  imports: [ScrollSideways, StandardShares],
   templateUrl: './pooled-panel.html',
   styleUrl: './pooled-panel.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

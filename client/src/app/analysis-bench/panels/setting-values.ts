@@ -16,3 +16,9 @@ export function parsedScore(text: string): Result<number, string> {
   const score = Number(bare);
   return bare === '' || !Number.isFinite(score) ? failure('Give a number.') : success(score);
 }
+
+/** Members or share of a stratum in a standard population, as a person types it: 0 or more. */
+export function parsedShare(text: string): Result<number, string> {
+  const share = parsedScore(text.replaceAll(/[\s\u00a0\u202f]/g, ''));
+  return share.ok && share.value < 0 ? failure('Give 0 or more.') : share;
+}
