@@ -6,12 +6,13 @@ import { promisify } from 'node:util';
 
 const run = promisify(execFile);
 
-/** Programs that read exported files without any code of ours. */
+/** Programs that read exported files, or recompute numbers, without any code of ours. */
 const READERS = {
   libreOffice: ['soffice', '--version'],
   popplerText: ['pdftotext', '-v'],
   pythonDocx: ['/usr/bin/python3', '-c', 'import docx'],
   openpyxl: ['/usr/bin/python3', '-c', 'import openpyxl'],
+  r: ['Rscript', '--version'],
 } as const satisfies Readonly<Record<string, readonly [string, ...string[]]>>;
 
 /** One of the programs. */
