@@ -37,6 +37,8 @@ export { columnHeads, headWithInterval } from './print/column-heads';
 export type { ColumnHeads } from './print/column-heads';
 export { contrastSentence } from './print/contrast-sentence';
 export type { ContrastPart, ContrastSlot, ContrastWords } from './print/contrast-sentence';
+export { pValueNotes } from './print/p-value-notes';
+export type { PrintedPValues } from './print/p-value-notes';
 export { figureNotes } from './print/figure-notes';
 export { homogeneityWords } from './print/homogeneity-words';
 export { methodsNoteOf } from './print/methods-note';

@@ -21,6 +21,8 @@ export interface ColumnHeads {
   readonly controls: string;
   readonly casesShare: string;
   readonly controlsShare: string;
+  /** "P" or "p". */
+  readonly pValue: string;
 }
 
 /** The heads that the design and the house style ask for. */
@@ -42,6 +44,7 @@ export function columnHeads(
     controls: fillWords(book, 'head.controls', {}),
     casesShare: fillWords(book, 'head.casesShare', {}),
     controlsShare: fillWords(book, 'head.controlsShare', {}),
+    pValue: style.pValue.symbol,
   };
 }
 

@@ -6,6 +6,7 @@ import {
   countsOnlyMark,
   formatCount,
   formatEstimate,
+  formatPValue,
   formatShare,
   joinLimits,
   limitBrackets,
@@ -16,6 +17,7 @@ import type { OutsideMeasureId } from '#shared/outside-estimates';
 import type { Estimate, GroupCount } from '#shared/stats';
 import { cellNumber, numbersRun, wordsCell, wordsRun } from '../table-cells';
 import type { CountedLayer } from './counted-layer';
+import { pValueAt } from './p-values';
 import type { TableColumnId } from './table-plan';
 import type { TableSetting } from './table-setting';
 
@@ -50,6 +52,7 @@ const CELLS: Readonly<Record<TableColumnId, CellMaker>> = {
   riskDifference: (...parts) => effectCell('riskDifference', ...parts),
   riskRatio: (...parts) => effectCell('riskRatio', ...parts),
   oddsRatio: (...parts) => effectCell('oddsRatio', ...parts),
+  pValue: pValueCell,
 };
 
 function groupCountCell(
@@ -142,6 +145,21 @@ export function estimateCell(
     numbers: (['value', 'lower', 'upper'] as const).map((facet) =>
       cellNumber(printed[facet], address(facet)),
     ),
+  };
+}
+
+function pValueCell(layer: CountedLayer, levelId: string, setting: TableSetting): TableBodyCell {
+  const { result, blockId, houseStyle, pValues } = setting;
+  if (levelId === result.frame.exposure.referenceLevelId) {
+    return wordsCell('', blockId, { parts: 1 });
+  }
+  const placed = pValues && pValueAt(pValues, layer.scope, levelId);
+  if (!placed) return missingCell(1, setting);
+  const { text, number } = formatPValue(placed.pValue, result.specification.level, houseStyle);
+  const address = addressIn(layer, levelId, placed.quantity, setting, 'pValue');
+  return {
+    runs: [numbersRun(text, blockId, [address])],
+    numbers: [number && cellNumber(number, address)],
   };
 }
 

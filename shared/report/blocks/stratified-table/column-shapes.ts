@@ -41,6 +41,7 @@ const SHAPES: Readonly<Record<TableColumnId, Shape>> = {
   riskDifference: { weight: 19, parts: ESTIMATE },
   riskRatio: { weight: 17, parts: ESTIMATE },
   oddsRatio: { weight: 17, parts: ESTIMATE },
+  pValue: { weight: 8, parts: ['value'] },
 };
 
 /** A part's own word, or the column's head for the value itself. */

@@ -9,6 +9,7 @@ import { pinnedAnalysis, problemElement } from '../pinned-result';
 import type { StratifiedTableContent } from './content';
 import { layTable } from './lay-table';
 import { hasLevels, outsideColumns } from './outside-columns';
+import { tablePValues } from './p-values';
 import { notesOfTable } from './table-notes';
 import { planTable } from './table-plan';
 import type { TableSetting } from './table-setting';
@@ -30,8 +31,10 @@ export function composeStratifiedTable(
   const outsideNoted = outsideColumns(content.show, pinned.value);
   const outside = outsideNoted.filter(hasLevels);
   const words = { heads, houseStyle, phrasebook };
-  const setting = { blockId, analysisId, result, decimals, outside, outsideNoted, ...words };
   const plan = planTable(content, result, context.framing, outside.length);
+  const pValues = tablePValues(content.pValues, plan, result);
+  const parts = { outside, outsideNoted, pValues };
+  const setting = { blockId, analysisId, result, decimals, ...parts, ...words };
   const laid = layTable(plan, setting);
   const table: TableElement = {
     kind: 'table',

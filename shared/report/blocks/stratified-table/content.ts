@@ -1,3 +1,4 @@
+import type { PValueChoice } from './p-values';
 import type { TextDocument } from '../../text/text-document';
 
 /** Which columns and rows a table may show; the framing and the design choose among them. */
@@ -22,5 +23,7 @@ export interface StratifiedTableContent {
   readonly analysisId: string | null;
   readonly title: TextDocument | null;
   readonly show: TableChoice;
+  /** P-values of the contrasts, in a column of each layer; left out, there are none. */
+  readonly pValues?: PValueChoice | undefined;
   readonly layout: 'auto' | 'sideBySide' | 'stacked';
 }

@@ -1,9 +1,11 @@
+import { ADJUSTMENTS } from '#shared/stats';
 import * as z from 'zod/mini';
 import type { BlockField } from '../block-field';
 import type { BlockKind, EmptyContentContext } from '../block-kind';
 import { contentParser, idSchema, lineSchema } from '../content-schema';
 import { analysisIdsIn } from '../inline-context';
 import { composeStratifiedTable } from './compose-table';
+import { P_VALUE_CHOICES, type PValueChoice } from './p-values';
 import type { StratifiedTableContent } from './content';
 
 /** A stratified table. */
@@ -30,6 +32,7 @@ export const STRATIFIED_TABLE: BlockKind<StratifiedTableContent> = {
         trend: z.boolean(),
         outside: z.optional(z.boolean()),
       }),
+      pValues: z.optional(z.enum(P_VALUE_CHOICES)),
       layout: z.enum(['auto', 'sideBySide', 'stacked']),
     }),
   ),
@@ -78,6 +81,12 @@ function fields(): readonly BlockField[] {
     { kind: 'toggle', path: 'show.trend', label: 'Trend in the notes' },
     {
       kind: 'choice',
+      path: 'pValues',
+      label: 'P-values',
+      options: P_VALUE_CHOICES.map((value) => ({ value, label: pValueLabel(value) })),
+    },
+    {
+      kind: 'choice',
       path: 'layout',
       label: 'Strata',
       options: [
@@ -87,4 +96,15 @@ function fields(): readonly BlockField[] {
       ],
     },
   ];
+}
+
+function pValueLabel(choice: PValueChoice): string {
+  switch (choice) {
+    case 'none':
+      return 'Not shown';
+    case 'unadjusted':
+      return 'As they are';
+    default:
+      return ADJUSTMENTS[choice].label;
+  }
 }

@@ -38,7 +38,10 @@ export function headRows(
 }
 
 function heads(columns: readonly TableColumnId[], setting: TableSetting): readonly TableHeadCell[] {
-  return columns.map((id) => headCell([wordsRun(headText(id, setting), setting.blockId)], 'end'));
+  return columns.map((id) => {
+    const marks = id === 'pValue' && setting.houseStyle.pValue.italic ? (['italic'] as const) : [];
+    return headCell([wordsRun(headText(id, setting), setting.blockId, marks)], 'end');
+  });
 }
 
 function layerSpanners(plan: TablePlan, setting: TableSetting): readonly TableHeadCell[] {

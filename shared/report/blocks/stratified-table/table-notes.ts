@@ -1,5 +1,5 @@
 import type { Run, TableElement } from '#shared/layout';
-import { fillPattern, outsideNote, tableNotes } from '#shared/wording';
+import { fillPattern, outsideNote, pValueNotes, tableNotes } from '#shared/wording';
 import type { Phrase, TableContents } from '#shared/wording';
 import { abbreviationNote } from '../abbreviation-note';
 import { phraseRuns } from '../phrase-runs';
@@ -18,6 +18,7 @@ export function notesOfTable(
   const { houseStyle, phrasebook, blockId } = setting;
   const notes = [
     ...tableNotes(setting, contentsOf(show, plan), houseStyle, phrasebook),
+    ...pValuesNote(setting),
     ...countsNote(plan, setting),
     ...outsideNotes(setting),
   ].map((phrase) => phraseRuns(phrase, blockId));
@@ -42,6 +43,14 @@ function contentsOf(show: TableChoice, plan: TablePlan): TableContents {
     pooled: scopes.includes('pooled'),
     trend: show.trend,
   };
+}
+
+/** The tests behind the p-values, and the number of contrasts that they are adjusted for. */
+function pValuesNote({ pValues, houseStyle, phrasebook }: TableSetting): readonly Phrase[] {
+  if (pValues === null) return [];
+  const { placed, adjustment } = pValues;
+  const methods = [...new Set(placed.map(({ method }) => method))];
+  return pValueNotes({ methods, contrasts: placed.length, adjustment }, houseStyle, phrasebook);
 }
 
 /** What stands behind each column of estimates from elsewhere, and who computed it. */

@@ -6,7 +6,14 @@ import type { StratifiedTableContent, TableChoice } from './content';
 
 /** A column that a table may have in each of its layers. */
 export type TableColumnId =
-  'count' | 'share' | 'cases' | 'casesShare' | 'controls' | 'controlsShare' | EffectMeasureId;
+  | 'count'
+  | 'share'
+  | 'cases'
+  | 'casesShare'
+  | 'controls'
+  | 'controlsShare'
+  | EffectMeasureId
+  | 'pValue';
 
 /** A layer of the table: a stratum, all records, or the pooled estimates. */
 export interface TableLayer {
@@ -19,6 +26,9 @@ export interface TablePlan {
   readonly arrangement: 'plain' | 'sideBySide' | 'stacked';
   readonly layers: readonly TableLayer[];
 }
+
+/** What of a table's content decides its plan. */
+type PlannedContent = Pick<StratifiedTableContent, 'show' | 'layout' | 'pValues'>;
 
 /** More figure columns than this don't fit a portrait page. */
 const MOST_COLUMNS = 8;
@@ -33,13 +43,13 @@ const MOST_STRATA_BESIDE = 2;
  * crude ones: where layers are below each other, they bring the rows of all strata along.
  */
 export function planTable(
-  content: Pick<StratifiedTableContent, 'show' | 'layout'>,
+  content: PlannedContent,
   result: AnalysisResult,
   framing: Framing,
   outsideColumns = 0,
 ): TablePlan {
   const arrangement = arrangementOf(content, result, outsideColumns);
-  const columns = columnsOf(content.show, result, framing);
+  const columns = columnsOf(content, result, framing);
   const needsCrude = outsideColumns > 0 && arrangement === 'stacked';
   const scopes = scopesOf(needsCrude ? { ...content.show, crude: true } : content.show, result);
   return { arrangement, layers: scopes.map((scope) => layerOf(scope, columns, arrangement)) };
@@ -84,13 +94,14 @@ const SAMPLE_COLUMNS: readonly CountColumn[] = [
 ];
 
 function columnsOf(
-  show: TableChoice,
+  { show, pValues = 'none' }: PlannedContent,
   result: AnalysisResult,
   framing: Framing,
 ): readonly TableColumnId[] {
   const counts = designGivesRisk(result.frame.design) ? GROUP_COLUMNS : SAMPLE_COLUMNS;
   const shown = counts.filter(({ isShare }) => show.risk || !isShare).map(({ id }) => id);
-  return [...shown, ...effectColumns(show, result, framing)];
+  const tests = pValues === 'none' ? [] : (['pValue'] as const);
+  return [...shown, ...effectColumns(show, result, framing), ...tests];
 }
 
 function scopesOf(show: TableChoice, result: AnalysisResult): readonly ResultScope[] {
@@ -102,13 +113,14 @@ function scopesOf(show: TableChoice, result: AnalysisResult): readonly ResultSco
 }
 
 function arrangementOf(
-  { show, layout }: Pick<StratifiedTableContent, 'show' | 'layout'>,
+  content: PlannedContent,
   result: AnalysisResult,
   outsideColumns: number,
 ): TablePlan['arrangement'] {
+  const { show, layout } = content;
   if (result.strata.length === 0) return 'plain';
   if (layout !== 'auto') return layout;
-  const columns = columnsOf(show, result, 'both');
+  const columns = columnsOf(content, result, 'both');
   const widths = scopesOf(show, result).map(
     (scope) => layerOf(scope, columns, 'sideBySide').columns.length,
   );
@@ -124,9 +136,9 @@ function layerOf(
   arrangement: TablePlan['arrangement'],
 ): TableLayer {
   const effectsOnly = scope.kind === 'pooled' && arrangement === 'sideBySide';
-  return { scope, columns: effectsOnly ? columns.filter(isEffect) : columns };
+  return { scope, columns: effectsOnly ? columns.filter(isOfContrast) : columns };
 }
 
-function isEffect(column: TableColumnId): column is EffectMeasureId {
-  return EFFECT_COLUMNS.some((measure) => measure === column);
+function isOfContrast(column: TableColumnId): boolean {
+  return column === 'pValue' || EFFECT_COLUMNS.some((measure) => measure === column);
 }
