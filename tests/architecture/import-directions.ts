@@ -109,6 +109,7 @@ export const SERVER: DirectionTable = {
   static: { from: [], types: ['config'] },
   intake: { from: ['errors', 'workers'] },
   exports: { from: ['errors', 'workers'] },
+  computing: { from: ['workers'] },
   counting: { from: ['intake', 'runtime'], types: ['models'] },
   session: { from: ['errors', 'runtime'], types: ['config', 'dependencies', 'models'] },
   dependencies: {
@@ -126,7 +127,7 @@ export const SERVER: DirectionTable = {
     ],
   },
   services: {
-    from: ['errors', 'exports', 'intake', 'mail', 'models', 'runtime'],
+    from: ['computing', 'errors', 'exports', 'intake', 'mail', 'models', 'runtime'],
     types: ['config', 'counting', 'dependencies'],
   },
   routes: {
