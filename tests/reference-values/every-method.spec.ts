@@ -8,6 +8,7 @@ import {
   PAIRED_TESTS,
   POOLED_ODDS_RATIOS,
   POOLED_RISK_DIFFERENCES,
+  POOLED_RISK_RATIOS,
   RISK_DIFFERENCE_INTERVALS,
   RISK_INTERVALS,
   RISK_RATIO_INTERVALS,
@@ -52,6 +53,7 @@ describe('every method over strata, for trends and for pairs has reference value
   const names = [...stratified.cases, ...tablesAndPairs.cases].flatMap((one) => Object.keys(one));
   const methods = [
     POOLED_RISK_DIFFERENCES,
+    POOLED_RISK_RATIOS,
     POOLED_ODDS_RATIOS,
     ODDS_RATIO_HOMOGENEITIES,
     TREND_TESTS,
@@ -63,6 +65,10 @@ describe('every method over strata, for trends and for pairs has reference value
     robinsBreslowGreenland: 'pooledOddsRatio.limits',
     exactConditional: 'exact',
     exactMidP: 'midP',
+    standardisedToAll: 'shares',
+    standardisedToIndex: 'shares',
+    standardisedToReference: 'shares',
+    standardisedToChosen: 'shares',
   };
 
   it.each(methods)('%s', (id) => {

@@ -92,6 +92,28 @@ describe('standardised risks against R', () => {
     for (const name of ['index', 'reference', 'difference', 'ratio'] as const) {
       expectAll(numbersOf(valueOf(found[name])), one[name]!, FITTED);
     }
+    const weighed = strata.map((stratum, at) => ({
+      ...stratum,
+      share: one.shares![at]!,
+      members: one.shares![at]!,
+    }));
+    for (const id of ['standardisedToChosen', 'standardisedToAll'] as const) {
+      const difference = POOLED_RISK_DIFFERENCES[id].pooled(weighed, 0.95);
+      expectAll(numbersOf(valueOf(difference)), one.difference!, FITTED);
+      const ratio = POOLED_RISK_RATIOS[id].pooled(weighed, 0.95);
+      expectAll(numbersOf(valueOf(ratio)), one.ratio!, FITTED);
+    }
+  });
+
+  it.each(casesOf('standardised'))('$strata by the groups themselves', (one) => {
+    const strata = strataOf(one);
+    const groups = { standardisedToIndex: 'index', standardisedToReference: 'reference' } as const;
+    for (const [id, kind] of Object.entries(groups)) {
+      const shares = Object.fromEntries(strata.map(({ id, table }) => [id, table[kind].total]));
+      const chosen = valueOf(standardisedRisks(strata, { kind: 'chosen', shares }, 0.95));
+      const pooled = POOLED_RISK_DIFFERENCES[id as keyof typeof groups].pooled(strata, 0.95);
+      expectAll(numbersOf(valueOf(pooled)), numbersOf(valueOf(chosen.difference)), DIRECT);
+    }
   });
 });
 
