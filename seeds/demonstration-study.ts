@@ -1,6 +1,7 @@
 import type { AnalysisSpecification, OutcomeWords } from '#shared/analysis';
 import type { NewStudyRequest } from '#shared/api';
 import type { CodeBook } from '#shared/code-book';
+import type { OutsideEstimateEntry } from '#shared/outside-estimates';
 import type { Framing } from '#shared/wording';
 
 /** A block of a demonstration report, before it has an id and a place. */
@@ -29,6 +30,8 @@ export interface DemonstrationAnalysis {
   readonly key: string;
   readonly name: string;
   readonly specification: (outcomeId: string) => AnalysisSpecification;
+  /** Adjusted estimates beside it, computed elsewhere from the same invented records. */
+  readonly outside?: readonly OutsideEstimateEntry[];
 }
 
 /**

@@ -2,6 +2,7 @@ import type { Dependencies } from '../server/dependencies';
 import type { Study } from '../server/models/study/study-store';
 import type { User } from '../server/models/user/user-store';
 import { createAnalysis } from '../server/services/analyses/create-analysis';
+import { addEstimate } from '../server/services/outside-estimates/add-estimates';
 import { addMember } from '../server/services/studies/add-member';
 import { createStudy } from '../server/services/studies/create-study';
 import { putMilestone } from '../server/services/studies/put-milestone';
@@ -28,9 +29,12 @@ export async function seedStudy(
   const analyst = accountOf(accounts, 'analyst');
   const cutId = await loadCuts(dependencies, analyst, study, plan);
   const analysisIds: Record<string, string> = {};
-  for (const { key, name, specification } of plan.analyses) {
+  for (const { key, name, specification, outside = [] } of plan.analyses) {
     const request = { name, cutId, specification: specification(outcomeId) };
-    analysisIds[key] = done(await createAnalysis(dependencies, analyst, study, request));
+    const analysisId = done(await createAnalysis(dependencies, analyst, study, request));
+    const place = { studyId: study.id, analysisId };
+    for (const entry of outside) done(await addEstimate(dependencies, analyst, place, entry));
+    analysisIds[key] = analysisId;
   }
   for (const report of plan.reports) {
     await seedReport(dependencies, lead, study, report, analysisIds);

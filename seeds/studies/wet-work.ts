@@ -3,6 +3,7 @@ import { bound, effectSentence, groupedBarChart, heading, markdownProse, prose }
 import { reference, stratifiedTable } from '../blocks';
 import type { BlockPlan, DemonstrationBlock, DemonstrationStudy } from '../demonstration-study';
 import { alsoMissing, describeColumns } from '../describe-columns';
+import { WET_WORK_ADJUSTED } from './wet-work-adjusted';
 
 /** Wet work and hand eczema: a cohort with five ordered levels, two workplaces and two cuts. */
 export const WET_WORK: DemonstrationStudy = {
@@ -81,6 +82,7 @@ export const WET_WORK: DemonstrationStudy = {
             analysisSet: 'Staff seen at 12 months',
           },
         }),
+      outside: WET_WORK_ADJUSTED,
     },
     {
       key: 'workplace',
