@@ -6,6 +6,8 @@ import { chiSquareUpperTail } from '../distributions';
 import type { EstimationIssue, TestOutcome } from '../estimate';
 import type { FourfoldTable } from '../fourfold-table';
 import { riskDifferenceOf } from '../point-estimates';
+import { occupiedCounts } from '../tables-of-any-size/occupied-counts';
+import type { OccupiedCounts } from '../tables-of-any-size/occupied-counts';
 import { issueOfTest } from './fourfold-issue';
 
 /**
@@ -40,42 +42,25 @@ export function pearsonOfFourfold(table: FourfoldTable): Result<TestOutcome, Est
  * Example: [[762, 327, 468], [484, 239, 477]] gives 30.070 on 2 degrees of freedom.
  */
 export function pearsonOfTable(table: ContingencyTable): Result<TestOutcome, EstimationIssue> {
-  if (!table.counts.flat().every((count) => Number.isSafeInteger(count) && count >= 0)) {
-    return failure({ code: 'invalidCounts' });
+  const occupied = occupiedCounts(table);
+  if (!occupied.ok) {
+    return occupied;
   }
-  const rows = table.counts.filter((row) => sum(row) > 0);
-  if (rows.length < 2) {
-    return failure({ code: 'fewerThanTwoLevels', facts: { levels: rows.length } });
-  }
-  const columnTotals = (rows[0] ?? []).map((_, column) => sum(rows.map((row) => row[column] ?? 0)));
-  const columns = columnTotals.filter((total) => total > 0).length;
-  if (columns < 2) {
-    return failure({ code: 'emptyMargin', facts: { columns } });
-  }
-  return success(outcome(statisticOf(rows, columnTotals), (rows.length - 1) * (columns - 1)));
+  const { rowTotals, columnTotals } = occupied.value;
+  const degreesOfFreedom = (rowTotals.length - 1) * (columnTotals.length - 1);
+  return success(outcome(statisticOf(occupied.value), degreesOfFreedom));
 }
 
-function statisticOf(
-  rows: readonly (readonly number[])[],
-  columnTotals: readonly number[],
-): number {
-  const total = sum(columnTotals);
-  return sum(
-    rows.map((row) => {
-      const share = sum(row) / total;
-      return sum(
-        row.map((count, column) => squareOver(count, share * (columnTotals[column] ?? 0))),
-      );
-    }),
-  );
+function statisticOf({ rows, rowTotals, columnTotals, total }: OccupiedCounts): number {
+  const parts = rows.flatMap((row, at) => {
+    const share = (rowTotals[at] ?? 0) / total;
+    return row.map((count, column) => squareOver(count, share * (columnTotals[column] ?? 0)));
+  });
+  return parts.reduce((sum, part) => sum + part, 0);
 }
 
 function squareOver(observed: number, expected: number): number {
-  return expected === 0 ? 0 : ((observed - expected) * (observed - expected)) / expected;
-}
-
-function sum(numbers: readonly number[]): number {
-  return numbers.reduce((total, number) => total + number, 0);
+  return ((observed - expected) * (observed - expected)) / expected;
 }
 
 function outcome(statistic: number, degreesOfFreedom: number): TestOutcome {

@@ -50,15 +50,24 @@ function withRarerOutcome(groups: readonly ScoredGroup[]): readonly ScoredGroup[
   return events <= others ? groups : groups.map(turned);
 }
 
-function stepsOf(groups: readonly ScoredGroup[], { events, largest }: Sizes): number {
-  const befores = Array.from({ length: events + 1 }, (_, before) => before);
-  return sumOf(groups, ({ total }) =>
-    befores.reduce(
-      (sum, before) => sum + (before * largest + 1) * (Math.min(total, events - before) + 1),
-      0,
-    ),
-  );
+/** Additions, and the clearing of a table for each group; so many events need no counting. */
+function stepsOf(groups: readonly ScoredGroup[], sizes: Sizes): number {
+  const { events, largest } = sizes;
+  if (events > MOST_EVENTS) {
+    return Infinity;
+  }
+  const cells = (events + 1) * widthOf(sizes);
+  return sumOf(groups, ({ total }) => {
+    let steps = 4 * cells;
+    for (let before = 0; before <= events; before += 1) {
+      steps += (before * largest + 1) * (Math.min(total, events - before) + 1);
+    }
+    return steps;
+  });
 }
+
+/** The square of more would already pass any number of steps. */
+const MOST_EVENTS = 10_000;
 
 /** The distribution by events and score sum with one group more. */
 function withGroup(

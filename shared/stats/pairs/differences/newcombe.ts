@@ -1,3 +1,4 @@
+import { productDifference } from '../../exact';
 import type { Limits } from '../../intervals/interval-method';
 import { intervalMethod } from '../../intervals/interval-method';
 import { wilsonLimits } from '../../intervals/risk/wilson';
@@ -59,6 +60,6 @@ function correctedCorrelation({ both, onlyFirst, onlySecond, neither }: PairedTa
   if (spread === 0) {
     return 0;
   }
-  const product = both * neither - onlyFirst * onlySecond;
+  const product = productDifference(both, neither, onlyFirst, onlySecond);
   return (product > 0 ? Math.max(0, product - total / 2) : product) / spread;
 }
