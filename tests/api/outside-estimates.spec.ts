@@ -145,7 +145,7 @@ describe('a report', () => {
     await desk.send([insert('1', 'stratifiedTable', shown), insert('2', 'effectSentence', said)]);
     const view = await desk.view();
     expect(view.pins[0]?.outside).toMatchObject([{ value: '5.20' }]);
-    const docx = await desk.browser.get(desk.inReport('/exports/docx')).buffer(true).parse(binary);
+    const docx = await desk.browser.get(desk.inReport('/exports/docx')).responseType('blob');
     const words = new TextDecoder()
       .decode(unzipSync(docx.body as Uint8Array)['word/document.xml'])
       .replace(/<[^>]*>/g, '');
@@ -158,17 +158,6 @@ describe('a report', () => {
     expect(words.match(/5\.20/g)).toHaveLength(2);
   });
 });
-
-function binary(
-  response: NodeJS.ReadableStream,
-  done: (problem: null, body: Buffer) => void,
-): void {
-  const parts: Buffer[] = [];
-  response.on('data', (part: Buffer) => parts.push(part));
-  response.on('end', () => {
-    done(null, Buffer.concat(parts));
-  });
-}
 
 describe('GET /api/studies/:studyId/analyses/:analysisId/outside-estimates rejects', () => {
   it('an analysis that is not there', async () => {

@@ -11,7 +11,7 @@ import type { Study } from '../../server/models/study/study-store';
 import type { User } from '../../server/models/user/user-store';
 import { receiveUpload } from '../../server/services/uploads/receive-upload';
 import { startTestApplication, type TestApplication } from '../builders/test-application';
-import { report, type Timing } from './measure';
+import { report, timingOf } from './measure';
 
 const CSV_ROWS = 1_000_000;
 const XLSX_ROWS = 100_000;
@@ -41,11 +41,11 @@ it('reads, profiles, encodes and stores a CSV of 1,000,000 rows × 10 columns', 
   const path = join(folder, 'many.csv');
   await writeCsv(path);
   const { readings, floors } = await inTurn(path, 'many.csv');
-  const floor = spread(floors);
+  const floor = timingOf(floors);
   report({
     what: 'read and store a CSV of 1,000,000 rows × 10 columns (at most a third of csv-parse)',
     budgetInMilliseconds: Math.round(floor.median / 3),
-    timing: spread(readings.map(({ milliseconds }) => milliseconds)),
+    timing: timingOf(readings.map(({ milliseconds }) => milliseconds)),
     floor: { what: 'csv-parse alone', timing: floor },
   });
   tellSurroundings('CSV', (await stat(path)).size, readings, 300);
@@ -58,7 +58,7 @@ it('reads, profiles, encodes and stores an XLSX of 100,000 rows × 10 columns', 
   report({
     what: 'read and store an XLSX of 100,000 rows × 10 columns',
     budgetInMilliseconds: 20_000,
-    timing: spread(readings.map(({ milliseconds }) => milliseconds)),
+    timing: timingOf(readings.map(({ milliseconds }) => milliseconds)),
     floor: null,
   });
   tellSurroundings('XLSX', (await stat(path)).size, readings, 500);
@@ -162,19 +162,12 @@ function watchServer() {
     end: async () => {
       state.going = false;
       await watching;
-      const { highest: slowestAnswer } = spread(answers);
+      const { highest: slowestAnswer } = timingOf(answers);
       const sorted = answers.toSorted((one, other) => one - other);
       const mostAnswers = sorted[Math.floor(sorted.length * 0.95)] ?? 0;
       return { ...seen, slowestAnswer, mostAnswers };
     },
   };
-}
-
-function spread(times: readonly number[]): Timing {
-  const sorted = times.toSorted((one, other) => one - other);
-  const [lowest = 0] = sorted;
-  const median = sorted[Math.floor(sorted.length / 2)] ?? 0;
-  return { median, lowest, highest: sorted.at(-1) ?? 0, runs: sorted.length };
 }
 
 /** Milliseconds that csv-parse needs for the rows alone. */

@@ -1,7 +1,7 @@
 import { it } from 'vitest';
 import { bandColumn, setLayout, type CodeBook, type CodeBookColumn } from '#shared/code-book';
 import { countTally, type EncodedColumn, type EncodedCut, type TallyRequest } from '#shared/tally';
-import { report, type Timing } from './measure';
+import { report, type Timing, timingOf } from './measure';
 
 const MILLION = 1_000_000;
 const REQUEST: TallyRequest = { columnIds: ['outcome', 'exposure', 'stratum'], restrictions: [] };
@@ -72,17 +72,11 @@ function inTurn(work: () => unknown, floor: () => unknown): readonly [Timing, Ti
       if (run >= WARM_UPS) times[at]!.push(performance.now() - start);
     });
   }
-  return [spread(times[0]), spread(times[1])];
+  return [timingOf(times[0]), timingOf(times[1])];
 }
 
 const RUNS = 41;
 const WARM_UPS = 10;
-
-function spread(times: readonly number[]): Timing {
-  const sorted = times.toSorted((one, other) => one - other);
-  const [lowest = 0] = sorted;
-  return { median: sorted[RUNS >> 1] ?? 0, lowest, highest: sorted.at(-1) ?? 0, runs: RUNS };
-}
 
 /** Counts the codes as they are: no code book, no missing codes, nothing but the increments. */
 function plainLoop(cut: EncodedCut): Uint32Array {
