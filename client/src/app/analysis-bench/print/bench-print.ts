@@ -57,7 +57,8 @@ export function estimateText(
   estimate: Estimate,
   table: FourfoldTable | undefined,
 ): EstimateText {
-  const fraction = table === undefined ? null : EFFECT_MEASURES[measure].fraction(table);
+  const fraction =
+    table === undefined ? null : EFFECT_MEASURES[measure].fraction(table, estimate.interval.method);
   const exact = fraction === null ? null : { kind: 'fraction' as const, ...fraction };
   return formatEstimate(measure, { estimate, exact }, decimals, style);
 }
