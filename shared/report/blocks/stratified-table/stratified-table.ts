@@ -56,6 +56,7 @@ function emptyContent({ analysis }: EmptyContentContext): StratifiedTableContent
       outside: (analysis?.outside?.length ?? 0) > 0,
       trend: analysis?.result.frame.exposure.ordered ?? false,
     },
+    pValues: 'none',
     layout: 'auto',
   };
 }
