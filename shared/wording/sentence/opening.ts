@@ -2,6 +2,7 @@ import type { FactorLevel } from '#shared/code-book';
 import { fillPattern, fillWords, joinParts } from '../phrasebook/fill-pattern';
 import type { Phrasebook } from '../phrasebook/phrasebook';
 import type { PhrasePart } from '../phrase';
+import { poolingWords } from './pooling-words';
 import type { WordingContext } from './wording-context';
 
 /**
@@ -13,7 +14,11 @@ export function openingOf({ claim, book }: WordingContext): readonly PhrasePart[
   const strata = claim.strataLabel;
   const { kind } = claim.scope;
   const adjustment =
-    strata === null || kind === 'stratum' ? [] : fillPattern(book, `opening.${kind}`, { strata });
+    strata === null || kind === 'stratum'
+      ? []
+      : kind === 'pooled'
+        ? fillPattern(book, 'opening.pooled', { strata, methods: poolingWords(claim, book) })
+        : fillPattern(book, 'opening.crude', { strata });
   const within = claim.stratum
     ? fillPattern(book, 'opening.within', {
         within: withinWords(claim.stratum, claim.strataLabel ?? '', book),
