@@ -1,7 +1,7 @@
 import { EFFECT_MEASURES, EFFECT_MEASURE_IDS } from '#shared/effects';
 import type { EffectMeasureId } from '#shared/effects';
-import { FOURFOLD_TESTS } from '#shared/stats';
-import type { FourfoldTest } from '#shared/stats';
+import { FOURFOLD_TESTS, TREND_TESTS } from '#shared/stats';
+import type { FourfoldTest, TrendTest } from '#shared/stats';
 import type { AnalysisSpecification } from './specification';
 
 /** Id of the test of a contrast; null leaves it to the expected counts (`printedTest`). */
@@ -37,7 +37,8 @@ export function takesTime(specification: AnalysisSpecification): boolean {
   const { methods } = specification;
   const intervals = EFFECT_MEASURE_IDS.map((id) => EFFECT_MEASURES[id].intervals[methods[id]]);
   const test = registered<FourfoldTest>(FOURFOLD_TESTS, contrastTestId(specification) ?? '');
-  return [...intervals, test].some((method) => method?.effort === 'heavy');
+  const trend = registered<TrendTest>(TREND_TESTS, trendTestId(specification));
+  return [...intervals, test, trend].some((method) => method?.effort === 'heavy');
 }
 
 /** A member of a register; undefined where it has none of that id. */

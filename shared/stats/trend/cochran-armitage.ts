@@ -45,5 +45,6 @@ export const cochranArmitageTest = {
   citation:
     'Armitage P. Tests for linear trends in proportions and frequencies. ' +
     'Biometrics 1955;11:375-386.',
+  effort: 'light',
   test: cochranArmitage,
 } as const satisfies TrendTest;

@@ -30,6 +30,7 @@ export const exactTrend = {
   citation:
     'Agresti A, Mehta CR, Patel NR. Exact inference for contingency tables with ordered ' +
     'categories. Journal of the American Statistical Association 1990;85:453-458.',
+  effort: 'heavy',
   test: testOf,
 } as const satisfies TrendTest;
 

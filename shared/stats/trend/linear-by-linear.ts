@@ -36,6 +36,7 @@ export const linearByLinearTest = {
   citation:
     'Mantel N. Chi-square tests with one degree of freedom: extensions of the Mantel–Haenszel ' +
     'procedure. Journal of the American Statistical Association 1963;58:690-700.',
+  effort: 'light',
   test: (groups) =>
     linearByLinear({
       counts: groups.map(({ events, total }) => [events, total - events]),

@@ -1,6 +1,7 @@
 import type { Result } from '#shared/core';
 import type { ScoredGroup } from '../contingency-table';
 import type { EstimationIssue, TestOutcome } from '../estimate';
+import type { MethodEffort } from '../method-effort';
 import type { MethodWords } from '../intervals/interval-method';
 
 /**
@@ -11,5 +12,6 @@ import type { MethodWords } from '../intervals/interval-method';
  * nobody or in everybody give `emptyMargin`.
  */
 export interface TrendTest extends MethodWords {
+  readonly effort: MethodEffort;
   test(groups: readonly ScoredGroup[]): Result<TestOutcome, EstimationIssue>;
 }

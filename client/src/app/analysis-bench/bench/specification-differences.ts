@@ -55,7 +55,7 @@ function describedParts(
     'Standard population':
       Object.values(specification.otherMethods?.standardShares ?? {}).join(', ') || 'none',
     Tests: testLabels(specification).join(', ') || 'the usual ones',
-    Adjustment: adjustment === 'crude' ? 'none' : 'Mantel–Haenszel',
+    Adjustment: adjustment === 'crude' ? 'none' : 'pooled over the strata',
     'Trend scores': trendScores === null ? '1, 2, 3 …' : Object.values(trendScores).join(', '),
     Standing: [
       standing.planned === 'postHoc' ? 'post hoc' : standing.planned,

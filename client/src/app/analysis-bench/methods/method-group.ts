@@ -40,6 +40,8 @@ export interface GroupParts<Method extends MethodWords> {
   /** Axis units in one unit of the estimand: 100 for percentage points. */
   readonly factor: number;
   readonly methods: readonly Method[];
+  /** How a row names its method; its label where nothing is said. */
+  readonly nameOf?: (method: Method) => string;
   readonly chosenId: string;
   readonly answerOf: (method: Method) => MethodAnswer;
   readonly printed: (estimate: Estimate) => { readonly value: string; readonly limits: string };
@@ -64,7 +66,7 @@ export function methodGroup<Method extends MethodWords>(
     axis,
     rows: answers.map(({ method, answer }) => ({
       methodId: method.id,
-      name: method.label,
+      name: (parts.nameOf ?? labelOf)(method),
       citation: method.citation,
       isChosen: method.id === parts.chosenId,
       drawn: drawnOn(axis, parts.factor, answer),
@@ -72,6 +74,10 @@ export function methodGroup<Method extends MethodWords>(
       question: answer.kind === 'open' ? answer.question : null,
     })),
   };
+}
+
+function labelOf({ label }: MethodWords): string {
+  return label;
 }
 
 function computedOf(answer: MethodAnswer): readonly Estimate[] {

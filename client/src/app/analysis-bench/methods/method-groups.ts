@@ -87,6 +87,7 @@ function poolingGroup(
     scale,
     factor: measureFactor(print, measure),
     methods: Object.values(poolings),
+    nameOf: ({ shortLabel }) => shortLabel.charAt(0).toUpperCase() + shortLabel.slice(1),
     chosenId: poolingId(specification, measure),
     answerOf: (method) => ({
       kind: 'computed',
