@@ -43,7 +43,7 @@ export function outsideHead(
   return headWithInterval(outsideName(column, analysis, style, book), first.level, style, book);
 }
 
-/** "Adjusted odds ratio": what a column of estimates from elsewhere holds, differences with unit. */
+/** "Adjusted odds ratio": the head of a column of estimates from elsewhere, with any unit. */
 export function outsideName(
   column: OutsideColumn,
   analysis: PrintedAnalysis,
