@@ -34,7 +34,7 @@ export class ReportState {
   readonly conflicts = computed(() => this.shared()?.conflicts ?? []);
   readonly houseStyle = computed(() => this.styleOf(this.report()));
   /** Analyses by id, each with the result that is shown now. */
-  readonly pins = computed(() => this.pinsOf(this.report()));
+  readonly pins = computed(() => this.pinsOf(this.report()), { equal: hasSameEntries });
   /** Whether the report pins a result, or names a house style, that this page has not got yet. */
   readonly lacksSources = computed(() => this.lacks(this.report()));
 
@@ -92,6 +92,14 @@ export class ReportState {
 }
 
 const OPEN_STAGES: readonly ReportStage[] = ['drafting', 'inReview'];
+
+/** Most steps leave the pins as they are; what is made of all their values need not be made anew. */
+function hasSameEntries<Value>(
+  one: ReadonlyMap<string, Value>,
+  other: ReadonlyMap<string, Value>,
+): boolean {
+  return one.size === other.size && [...one].every(([key, value]) => other.get(key) === value);
+}
 
 function latestOf(
   analysisId: string,
