@@ -12,6 +12,8 @@ export interface CountRange {
 export interface BinomialTerms {
   readonly terms: Float64Array;
   fill(chance: number): CountRange;
+  /** The same as multiples of the largest probability, not yet brought to the sum of 1. */
+  fillRelative(chance: number): CountRange;
 }
 
 /**
@@ -21,16 +23,22 @@ export interface BinomialTerms {
 export function binomialTerms(trials: number, negligible: number): BinomialTerms {
   const terms = new Float64Array(trials + 1);
   const up = Float64Array.from({ length: trials }, (_, count) => (trials - count) / (count + 1));
+  const down = Float64Array.from({ length: trials }, (_, count) => (count + 1) / (trials - count));
+  const fillRelative = (chance: number): CountRange => {
+    const odds = chance / (1 - chance);
+    const mode = Math.min(trials, Math.floor((trials + 1) * chance));
+    const from = downwards(terms, down, mode, 1 / odds, negligible);
+    const to = upwards(terms, up, mode, odds, negligible);
+    return { from, to };
+  };
   return {
     terms,
     fill(chance) {
-      const odds = chance / (1 - chance);
-      const mode = Math.min(trials, Math.floor((trials + 1) * chance));
-      const from = downwards(terms, up, mode, 1 / odds, negligible);
-      const to = upwards(terms, up, mode, odds, negligible);
-      bringToOne(terms, from, to);
-      return { from, to };
+      const range = fillRelative(chance);
+      bringToOne(terms, range);
+      return range;
     },
+    fillRelative,
   };
 }
 
@@ -57,7 +65,7 @@ function upwards(
 
 function downwards(
   terms: Float64Array,
-  up: Float64Array,
+  down: Float64Array,
   mode: number,
   inverseOdds: number,
   negligible: number,
@@ -65,7 +73,7 @@ function downwards(
   let term = 1;
   let count = mode;
   while (count > 0) {
-    term *= inverseOdds / (up[count - 1] as number);
+    term *= inverseOdds * (down[count - 1] as number);
     if (term <= negligible) {
       break;
     }
@@ -75,7 +83,7 @@ function downwards(
   return count;
 }
 
-function bringToOne(terms: Float64Array, from: number, to: number): void {
+function bringToOne(terms: Float64Array, { from, to }: CountRange): void {
   let sum = 0;
   for (let count = from; count <= to; count += 1) {
     sum += terms[count] as number;

@@ -23,64 +23,62 @@ export function tailProbability(
 ): TailProbability {
   const index = binomialTerms(indexTotal, negligible);
   const reference = binomialTerms(referenceTotal, negligible);
-  const sums = new Float64Array(referenceTotal + 3);
+  const sums = new Float64Array(referenceTotal + 2);
   return ({ below, above }, chances) => {
-    const range = reference.fill(chances.reference);
-    sumUp(reference.terms, range, sums);
-    const rows = index.fill(chances.indexBelow);
-    const favouring = weighted(index.terms, rows, below, { ...range, sums });
+    sumUp(reference.terms, reference.fillRelative(chances.reference), sums);
+    const rows = index.fillRelative(chances.indexBelow);
+    const favouring = weightedBelow(index.terms, rows, below, sums);
     if (above === null) {
       return favouring;
     }
-    sumDown(reference.terms, range, sums);
     const same = chances.indexAbove === chances.indexBelow;
-    const others = same ? rows : index.fill(chances.indexAbove);
-    return favouring + weighted(index.terms, others, above, { ...range, sums });
+    const others = same ? rows : index.fillRelative(chances.indexAbove);
+    return favouring + weightedAbove(index.terms, others, above, sums);
   };
 }
 
-/** Probabilities of the reference group's events up to, or from, each place of a range. */
-interface Sums extends CountRange {
-  readonly sums: Float64Array;
-}
-
-/**
- * Sum over the index group's events of their probability times that of the reference's range. The
- * bounds are cut to the range's ends, beyond which the sums stand still.
- */
-function weighted(
-  terms: Float64Array,
-  rows: CountRange,
-  bounds: Int32Array,
-  { from, to, sums }: Sums,
-): number {
-  let sum = 0;
-  for (let row = rows.from; row <= rows.to; row += 1) {
-    const bound = bounds[row] as number;
-    const place = bound < from ? 0 : Math.min(bound, to + 1) - from + 1;
-    sum += (terms[row] as number) * (sums[place] as number);
-  }
-  return sum;
-}
-
-/** Place 0: nothing; place k: the first k counts of the range; beyond the last count: all. */
+/** Place k: the sum of the terms of fewer than k events; the last place: of all. */
 function sumUp(terms: Float64Array, { from, to }: CountRange, sums: Float64Array): void {
   let sum = 0;
-  sums[0] = 0;
+  sums.fill(0, 0, from + 1);
   for (let events = from; events <= to; events += 1) {
     sum += terms[events] as number;
-    sums[events - from + 1] = sum;
+    sums[events + 1] = sum;
   }
-  sums[to - from + 2] = sum;
+  sums.fill(sum, to + 2);
 }
 
-/** Place 0: all; place k: the range from its k-th count on; beyond the last count: nothing. */
-function sumDown(terms: Float64Array, { from, to }: CountRange, sums: Float64Array): void {
+/** The probability that the reference group has at most as many events as each row's bound. */
+function weightedBelow(
+  terms: Float64Array,
+  { from, to }: CountRange,
+  bounds: Int32Array,
+  sums: Float64Array,
+): number {
   let sum = 0;
-  sums[to - from + 2] = 0;
-  for (let events = to; events >= from; events -= 1) {
-    sum += terms[events] as number;
-    sums[events - from + 1] = sum;
+  let weight = 0;
+  for (let row = from; row <= to; row += 1) {
+    const term = terms[row] as number;
+    weight += term;
+    sum += term * (sums[(bounds[row] as number) + 1] as number);
   }
-  sums[0] = sum;
+  return sum / (weight * (sums[sums.length - 1] as number));
+}
+
+/** The probability that the reference group has at least as many events as each row's bound. */
+function weightedAbove(
+  terms: Float64Array,
+  { from, to }: CountRange,
+  bounds: Int32Array,
+  sums: Float64Array,
+): number {
+  const all = sums[sums.length - 1] as number;
+  let sum = 0;
+  let weight = 0;
+  for (let row = from; row <= to; row += 1) {
+    const term = terms[row] as number;
+    weight += term;
+    sum += term * (all - (sums[bounds[row] as number] as number));
+  }
+  return sum / (weight * all);
 }

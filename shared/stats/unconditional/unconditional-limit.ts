@@ -27,7 +27,7 @@ const FIRST_PARTS = 16;
 const NULL_TIES = 1e-8;
 
 /** Binomial terms this far below the largest play no part in an interval. */
-const NEGLIGIBLE = 1e-25;
+const NEGLIGIBLE = 1e-18;
 
 /**
  * The smallest tested value between two that is not refused: the first whose extreme tables have,
