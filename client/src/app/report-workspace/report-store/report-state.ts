@@ -93,7 +93,7 @@ export class ReportState {
 
 const OPEN_STAGES: readonly ReportStage[] = ['drafting', 'inReview'];
 
-/** Most steps leave the pins as they are; what is made of all their values need not be made anew. */
+/** Most steps leave the pins as they are; what is made of all their values is not made anew. */
 function hasSameEntries<Value>(
   one: ReadonlyMap<string, Value>,
   other: ReadonlyMap<string, Value>,
