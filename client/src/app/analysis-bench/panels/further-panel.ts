@@ -77,6 +77,7 @@ const IMPACT = ['fractionInExposed', 'populationFraction', 'eValue'] as const;
     }
   `,
   styleUrl: './further-panel.scss',
+  host: { '[hidden]': 'between().length === 0 && impact().length === 0' },
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class FurtherPanel {

@@ -2,6 +2,8 @@ import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/c
 import { findGuards, homogeneityId, poolingId } from '#shared/analysis';
 import { EFFECT_MEASURES, type EffectMeasureId } from '#shared/effects';
 import { columnHeads, guardWords, homogeneityWords } from '#shared/wording';
+import { Field } from '../../ui/field/field';
+import { FieldControl } from '../../ui/field/field-control';
 import { ScrollSideways } from '../../ui/scroll-sideways';
 import { BenchStore } from '../bench/bench-store';
 import { levelLabel } from '../bench/result-scopes';
@@ -14,7 +16,7 @@ import { StandardShares } from './standard-shares';
 /** The contrasts pooled over strata, and whether the strata differ. */
 @Component({
   selector: 'eh-pooled-panel',
-  imports: [ScrollSideways, StandardShares],
+  imports: [Field, FieldControl, ScrollSideways, StandardShares],
   templateUrl: './pooled-panel.html',
   styleUrl: './pooled-panel.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -62,7 +64,7 @@ export class PooledPanel {
     return this.measures()
       .map((measure) => ({
         measure,
-        label: `Strata compared by, ${heads[measure]}`,
+        label: `Test of whether strata differ, ${heads[measure].toLowerCase()}`,
         methods: Object.values(EFFECT_MEASURES[measure].homogeneities),
         chosenId: homogeneityId(specification, measure),
       }))
