@@ -2,4 +2,4 @@
  * Version of the computations behind a result. It goes up whenever any stored number could change,
  * so that a pinned result says what made it.
  */
-export const ENGINE_VERSION = '1';
+export const ENGINE_VERSION = '2';
