@@ -1,5 +1,5 @@
 import type { FourfoldTable } from '../fourfold-table';
-import { riskDifferenceScore } from '../intervals/score/risk-difference-score';
+import { scoreOfDifference } from '../intervals/score/risk-difference-score';
 import { riskRatioScore } from '../intervals/score/risk-ratio-score';
 import type { TableScore } from './extreme-tables';
 
@@ -19,10 +19,12 @@ export interface NullFamily {
 /** Risk differences, tested in [-1, 1], with tables in the order of the score statistic. */
 export function differences(indexTotal: number, referenceTotal: number): NullFamily {
   return {
-    scoreAt: (tested) => (indexEvents, referenceEvents) =>
-      riskDifferenceScore(tableOf(indexEvents, indexTotal, referenceEvents, referenceTotal))(
-        tested,
-      ),
+    scoreAt: (tested) => (indexEvents, referenceEvents) => {
+      const indexOthers = indexTotal - indexEvents;
+      const referenceOthers = referenceTotal - referenceEvents;
+      const cells = { indexEvents, indexOthers, referenceEvents, referenceOthers };
+      return scoreOfDifference(cells, tested);
+    },
     indexRisk: (referenceRisk, tested) => Math.min(1, Math.max(0, referenceRisk + tested)),
     referenceRisks: (from, to) => [Math.max(0, -to), Math.min(1, 1 - from)],
   };

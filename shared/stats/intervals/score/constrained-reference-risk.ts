@@ -1,6 +1,4 @@
-import { cellsOf } from '../../check-counts';
 import type { FourfoldCells } from '../../check-counts';
-import type { FourfoldTable } from '../../fourfold-table';
 
 /** More steps than Newton's method, bisecting where it leaves the bracket, ever took. */
 const MOST_STEPS = 120;
@@ -16,8 +14,8 @@ const SETTLED = 1e-8;
  * steps on the likelihood equation, kept inside a bracket, bring it to the last digits.
  * Source: Miettinen and Nurminen (1985) Statistics in Medicine 4:213-226.
  */
-export function constrainedReferenceRisk(table: FourfoldTable, difference: number): number {
-  const cells = cellsOf(table);
+export function constrainedReferenceRisk(cells: FourfoldCells, difference: number): number {
+  const { indexEvents, indexOthers, referenceEvents, referenceOthers } = cells;
   let lower = Math.max(0, -difference);
   let upper = Math.min(1, 1 - difference);
   if (!risesAtLower(cells, lower, difference)) {
@@ -26,13 +24,12 @@ export function constrainedReferenceRisk(table: FourfoldTable, difference: numbe
   if (!fallsAtUpper(cells, upper, difference)) {
     return upper;
   }
-  let risk = inside(closedRoot(table, difference), lower, upper);
+  let risk = inside(closedRoot(cells, difference), lower, upper);
   for (let step = 0; step < MOST_STEPS; step += 1) {
     const one = 1 / (risk + difference);
     const two = 1 / (1 - risk - difference);
     const three = 1 / risk;
     const four = 1 / (1 - risk);
-    const { indexEvents, indexOthers, referenceEvents, referenceOthers } = cells;
     const slope =
       indexEvents * one - indexOthers * two + referenceEvents * three - referenceOthers * four;
     const steepness =
@@ -87,13 +84,16 @@ function term(count: number, risk: number): number {
 }
 
 /** The middle root of the likelihood's cubic, by the cosine of a third of an angle. */
-function closedRoot({ index, reference }: FourfoldTable, difference: number): number {
-  const total = index.total + reference.total;
-  const events = index.events + reference.events;
-  const second = ((index.total + 2 * reference.total) * difference - total - events) / total;
+function closedRoot(cells: FourfoldCells, difference: number): number {
+  const indexTotal = cells.indexEvents + cells.indexOthers;
+  const referenceTotal = cells.referenceEvents + cells.referenceOthers;
+  const total = indexTotal + referenceTotal;
+  const events = cells.indexEvents + cells.referenceEvents;
+  const second = ((indexTotal + 2 * referenceTotal) * difference - total - events) / total;
   const first =
-    ((reference.total * difference - total - 2 * reference.events) * difference + events) / total;
-  const constant = (reference.events * difference * (1 - difference)) / total;
+    ((referenceTotal * difference - total - 2 * cells.referenceEvents) * difference + events) /
+    total;
+  const constant = (cells.referenceEvents * difference * (1 - difference)) / total;
   const q = (second * second * second) / 27 - (first * second) / 6 + constant / 2;
   const p = Math.sign(q) * Math.sqrt(Math.max(0, (second * second) / 9 - first / 3));
   const cosine = Math.max(-1, Math.min(1, q / (p * p * p)));
