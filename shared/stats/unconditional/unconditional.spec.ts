@@ -64,6 +64,19 @@ describe('exact unconditional limits', () => {
     expect(tied.ok && tied.value.lower).toBe(0);
   });
 
+  it('count tables that tie for good', () => {
+    // At the limit 0/2 against 1/2 ties with the observed table, 0/2 against 2/2 is more extreme.
+    const interval = RISK_DIFFERENCE_INTERVALS.agrestiMin.interval(table(1, 2, 2, 2), 0.9);
+    const upper = interval.ok ? interval.value.upper : 1;
+    const probability = (risk: number): number => {
+      const index = risk + upper;
+      const none = (1 - index) ** 2 * (1 - (1 - risk) ** 2);
+      return none + 2 * index * (1 - index) * risk ** 2;
+    };
+    const risks = Array.from({ length: 20_000 }, (_, step) => ((1 - upper) * step) / 20_000);
+    expect(Math.max(...risks.map(probability))).toBeCloseTo(0.1, 7);
+  });
+
   it('end at ±1 and at 0 where the counts do', () => {
     const apart = RISK_DIFFERENCE_INTERVALS.chanZhang.interval(table(5, 5, 0, 6), 0.95);
     expect(apart.ok && apart.value.upper).toBe(1);

@@ -42,12 +42,12 @@ export function constrainedReferenceRisk(cells: FourfoldCells, difference: numbe
     } else {
       upper = risk;
     }
-    const next = inside(risk + slope / steepness, lower, upper);
-    const settled = Math.abs(next - risk) <= SETTLED * Math.min(next, 1 - next);
-    risk = next;
-    if (settled) {
-      break;
+    const next = risk + slope / steepness;
+    const isSettled = Math.abs(next - risk) <= SETTLED * Math.min(risk, 1 - risk);
+    if (isSettled && next >= lower && next <= upper) {
+      return next;
     }
+    risk = inside(next, lower, upper);
   }
   return risk;
 }
