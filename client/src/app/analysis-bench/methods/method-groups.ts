@@ -26,7 +26,16 @@ export function measureGroups(
   known: KnownAnswers,
 ): readonly MethodGroup[] {
   const table = tableAt(print, place.scope, place.levelId);
-  return table === undefined ? [] : measures.map((id) => measureGroup(print, id, table, known));
+  const contrast = layerAt(print.result, place.scope)?.contrasts.find(
+    ({ indexLevelId }) => indexLevelId === place.levelId,
+  );
+  if (table === undefined || contrast === undefined) return [];
+  return measures.map((id) => {
+    const chosen = print.result.specification.methods[id];
+    const answers: KnownAnswers = (question) =>
+      question.methodId === chosen ? contrast.measures[id] : known(question);
+    return measureGroup(print, id, table, answers);
+  });
 }
 
 function measureGroup(
