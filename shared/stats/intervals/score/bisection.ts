@@ -22,11 +22,57 @@ export function zeroOfDecreasing(
   upper: number,
 ): number {
   const ends = endsOf(valueAt, lower, upper);
-  if (typeof ends === 'number') {
-    return ends;
+  return typeof ends === 'number' ? ends : zeroInside(valueAt, ends, 0.5);
+}
+
+/** A place and the value of the function there. */
+export interface KnownPlace {
+  readonly x: number;
+  readonly value: number;
+}
+
+/**
+ * The same between a place whose value is known and an end on either side of it, for a function
+ * that is nearly straight around its zero: sought in steps from the place, the first of a given
+ * width, so that about seven evaluations do.
+ */
+export function zeroOfDecreasingFrom(
+  valueAt: (x: number) => number,
+  known: KnownPlace,
+  end: number,
+  firstWidth: number,
+): number {
+  const isAbove = known.value > 0;
+  if (end === known.x || isAbove !== end > known.x) {
+    return known.x;
   }
+  let near = known;
+  let width = firstWidth;
+  for (;;) {
+    const x = isAbove ? Math.min(end, near.x + width) : Math.max(end, near.x - width);
+    const value = valueAt(x);
+    if (value > 0 !== isAbove) {
+      const ends = { newest: x, newestValue: value, opposite: near.x, oppositeValue: near.value };
+      return zeroInside(valueAt, ends, value / (value - near.value));
+    }
+    if (x === end) {
+      return end;
+    }
+    width = nextWidth(width, near.value, value);
+    near = { x, value };
+  }
+}
+
+/** Somewhat farther than a straight line through two values reaches zero. */
+function nextWidth(width: number, before: number, value: number): number {
+  const straight = (1.2 * width * value) / (before - value);
+  return straight > 0 ? Math.max(0.05 * width, Math.min(4 * width, straight)) : 4 * width;
+}
+
+/** The zero in a bracket, the first step going a given part of the way. */
+function zeroInside(valueAt: (x: number) => number, ends: Bracket, firstPart: number): number {
   let bracket = ends;
-  let part = 0.5;
+  let part = firstPart > 0 && firstPart < 1 ? firstPart : 0.5;
   for (let step = 0; step < MOST_STEPS; step += 1) {
     const { newest, newestValue, opposite, oppositeValue } = bracket;
     const width = opposite - newest;

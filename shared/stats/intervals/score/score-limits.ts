@@ -1,7 +1,7 @@
 import type { FourfoldTable } from '../../fourfold-table';
 import { riskDifferenceOf } from '../../point-estimates';
 import type { Limits } from '../interval-method';
-import { zeroOfDecreasing } from './bisection';
+import { zeroOfDecreasingFrom } from './bisection';
 
 /** Every difference that the score statistic does not refuse, as an interval within [-1, 1]. */
 export function limitsOfDifference(
@@ -10,10 +10,7 @@ export function limitsOfDifference(
   z: number,
 ): Limits {
   const difference = riskDifferenceOf(table);
-  return [
-    zeroOfDecreasing((tested) => score(tested) - z, -1, difference),
-    zeroOfDecreasing((tested) => score(tested) + z, difference, 1),
-  ];
+  return [limitTowards(-1, difference, score, z), limitTowards(1, difference, score, z)];
 }
 
 /** Half the width of the search on the log scale; e^60 is far beyond any ratio of counts. */
@@ -30,7 +27,21 @@ export function limitsOfRatio(
   z: number,
 ): Limits {
   const start = Math.max(-FARTHEST, Math.min(FARTHEST, Math.log(ratio)));
-  const lower = (): number => zeroOfDecreasing((tested) => score(tested) - z, -FARTHEST, start);
-  const upper = (): number => zeroOfDecreasing((tested) => score(tested) + z, start, FARTHEST);
-  return [ratio === 0 ? 0 : Math.exp(lower()), ratio === Infinity ? ratio : Math.exp(upper())];
+  const limit = (end: number): number => Math.exp(limitTowards(end, start, score, z));
+  return [ratio === 0 ? 0 : limit(-FARTHEST), ratio === Infinity ? ratio : limit(FARTHEST)];
+}
+
+/** How far the first look goes: near a usual limit of a difference, and on the log scale. */
+const FIRST_WIDTH = 0.25;
+
+/** The value towards an end where the score, seen from a start within the interval, reaches z. */
+function limitTowards(
+  end: number,
+  start: number,
+  score: (tested: number) => number,
+  z: number,
+): number {
+  const critical = end > start ? -z : z;
+  const valueAt = (tested: number): number => score(tested) - critical;
+  return zeroOfDecreasingFrom(valueAt, { x: start, value: valueAt(start) }, end, FIRST_WIDTH);
 }
