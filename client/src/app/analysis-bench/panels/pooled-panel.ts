@@ -70,6 +70,7 @@ export class PooledPanel {
       }))
       .filter(({ methods }) => methods.length > 1);
   });
+  protected readonly showsOdds = computed(() => this.measures().includes('oddsRatio'));
   protected readonly caption = computed(
     () => `Every level against ${this.against()}, pooled over ${this.over()}`,
   );

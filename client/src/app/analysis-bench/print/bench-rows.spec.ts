@@ -65,6 +65,10 @@ it('pools over strata with a test for each measure', () => {
   expect(rows[0]?.estimates).toHaveLength(2);
   expect(rows[0]?.homogeneity).toHaveLength(2);
   expect(printedNumber(rows[0]?.estimates[0])).toBe(10);
+  expect(rows[0]?.crude.map((beside) => beside?.shift)).toEqual([
+    expect.stringMatching(/percentage points?$/),
+    expect.stringMatching(/%$/),
+  ]);
 });
 
 it('lays every method of a measure on one axis, the chosen one marked', () => {
