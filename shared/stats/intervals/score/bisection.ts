@@ -71,24 +71,27 @@ function nextWidth(width: number, before: number, value: number): number {
 
 /** The zero in a bracket, the first step going a given part of the way. */
 function zeroInside(valueAt: (x: number) => number, ends: Bracket, firstPart: number): number {
-  let bracket = ends;
+  let { newest, newestValue, opposite, oppositeValue } = ends;
   let part = firstPart > 0 && firstPart < 1 ? firstPart : 0.5;
   for (let step = 0; step < MOST_STEPS; step += 1) {
-    const { newest, newestValue, opposite, oppositeValue } = bracket;
-    const width = opposite - newest;
-    const x = newest + part * width;
+    const x = newest + part * (opposite - newest);
     if (x === newest || x === opposite) {
       break;
     }
     const value = valueAt(x);
-    const staysOnSide = value > 0 === newestValue > 0;
-    const [left, leftValue] = staysOnSide ? [newest, newestValue] : [opposite, oppositeValue];
-    bracket = staysOnSide
-      ? { newest: x, newestValue: value, opposite, oppositeValue }
-      : { newest: x, newestValue: value, opposite: newest, oppositeValue: newestValue };
-    part = nextPart(bracket, left, leftValue);
+    let left = newest;
+    let leftValue = newestValue;
+    if (value > 0 !== newestValue > 0) {
+      left = opposite;
+      leftValue = oppositeValue;
+      opposite = newest;
+      oppositeValue = newestValue;
+    }
+    newest = x;
+    newestValue = value;
+    part = nextPart(newest, newestValue, opposite, oppositeValue, left, leftValue);
   }
-  return nearest(bracket);
+  return Math.abs(newestValue) < Math.abs(oppositeValue) ? newest : opposite;
 }
 
 function endsOf(valueAt: (x: number) => number, lower: number, upper: number): Bracket | number {
@@ -102,9 +105,12 @@ function endsOf(valueAt: (x: number) => number, lower: number, upper: number): B
     : { newest: upper, newestValue: atUpper, opposite: lower, oppositeValue: atLower };
 }
 
-/** How far to go from the newest place towards the opposite one. */
+/** How far to go from the newest place towards the opposite one; plain numbers, for speed. */
 function nextPart(
-  { newest, newestValue, opposite, oppositeValue }: Bracket,
+  newest: number,
+  newestValue: number,
+  opposite: number,
+  oppositeValue: number,
   left: number,
   leftValue: number,
 ): number {
@@ -119,8 +125,4 @@ function nextPart(
         (oppositeValue / (leftValue - oppositeValue))
     : 0.5;
   return Number.isFinite(part) ? Math.max(least, Math.min(1 - least, part)) : 0.5;
-}
-
-function nearest({ newest, newestValue, opposite, oppositeValue }: Bracket): number {
-  return Math.abs(newestValue) < Math.abs(oppositeValue) ? newest : opposite;
 }
