@@ -1,5 +1,3 @@
-import { logGamma } from './log-gamma';
-
 /** An urn with `marked` and `unmarked` members, of which `drawn` are taken. */
 export interface Urn {
   readonly marked: number;
@@ -58,18 +56,37 @@ export function logBinomial(count: number, trials: number, share: number): numbe
   );
 }
 
-/** log(n!) less Stirling's approximation. */
-function stirlingError(n: number): number {
-  if (n < STIRLING_ERRORS.length) {
-    return STIRLING_ERRORS[n] as number;
-  }
+/** log(n!) less Stirling's approximation, also between whole numbers; good to 1e-14. */
+export function stirlingError(n: number): number {
+  return n < SERIES_FROM ? (STIRLING_ERRORS[2 * n] ?? errorBySteps(n)) : errorBySeries(n);
+}
+
+/** The series is good to 1e-16 from here on. */
+const SERIES_FROM = 16;
+
+function errorBySeries(n: number): number {
   const square = n * n;
   const fifth = 1 / 1260 - (1 / 1680 - 1 / 1188 / square) / square;
   return (1 / 12 - (1 / 360 - fifth / square) / square) / n;
 }
 
-const STIRLING_ERRORS: readonly number[] = Array.from({ length: 32 }, (_, n) =>
-  n === 0 ? 0 : logGamma(n + 1) - ((n + 0.5) * Math.log(n) - n + 0.5 * Math.log(2 * Math.PI)),
+/** By the factors between a number and one for which the series will do; 0 at 0, by agreement. */
+function errorBySteps(n: number): number {
+  let [high, product] = [n, 1];
+  while (high < SERIES_FROM) {
+    high += 1;
+    product *= high;
+  }
+  return n === 0 ? 0 : errorBySeries(high) + stirling(high) - Math.log(product) - stirling(n);
+}
+
+function stirling(n: number): number {
+  return (n + 0.5) * Math.log(n) - n + 0.5 * Math.log(2 * Math.PI);
+}
+
+/** Of 0, 1/2, 1 and so on. */
+const STIRLING_ERRORS: readonly number[] = Array.from({ length: 2 * SERIES_FROM }, (_, twice) =>
+  errorBySteps(twice / 2),
 );
 
 /** x log(x / mean) + mean - x, without cancellation where x is near the mean. */
