@@ -1,13 +1,13 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { addressKey } from '#shared/analysis';
 import type { AnalysisResult } from '#shared/analysis';
-import type { ComposedReport } from '#shared/layout';
+import type { ComposedReport, LayoutElement } from '#shared/layout';
 import { valueLedger } from '#shared/report';
 import { balanceOf, claimOf } from '#shared/wording';
 import { seed } from '../../seeds/seed';
 import { composeStoredReport } from '../../server/services/reports/compose-stored-report';
 import { houseStyle, phrasebook } from '../builders/house-styles';
-import { blockOf, composed, pinned, reportOf } from '../builders/reports';
+import { blockOf, composed, pinned, reportOf, textOf } from '../builders/reports';
 import { startTestApplication, type TestApplication } from '../builders/test-application';
 import {
   BALANCE_TRAINING,
@@ -29,7 +29,7 @@ interface Displayed {
   readonly needed?: readonly string[];
 }
 
-const cases = displayed.cases.filter(({ kind }) => kind === 'table') as readonly Displayed[];
+const cases = displayed.cases.filter(({ kind }) => kind === 'table') as unknown as readonly Displayed[];
 
 const EXAMPLES: Readonly<Record<string, TwoGroups>> = {
   'night work': NIGHT_WORK,
@@ -110,9 +110,25 @@ async function printedByAnalysis({
   return byName;
 }
 
-/** What is printed of each number, in tables, sentences and figures. */
+/** What is printed of each number, in tables, sentences and figures, and in whole cells. */
 function stringsOf(report: ComposedReport): readonly { key: string; text: string }[] {
-  return valueLedger(report).map(({ address, text }) => ({ key: addressKey(address), text }));
+  const numbers = valueLedger(report).map(({ address, text }) => ({
+    key: addressKey(address),
+    text,
+  }));
+  return [...numbers, ...report.elements.flatMap(cellsOf)];
+}
+
+/** The whole text of the cells of an estimate with its limits, and of those of a p-value. */
+function cellsOf(element: LayoutElement): readonly { key: string; text: string }[] {
+  const cells = element.kind === 'table' ? element.rows.flatMap((row) => row.cells) : [];
+  return cells.flatMap(({ numbers, runs }) => {
+    const [first, ...limits] = numbers.filter((number) => number !== null);
+    const isP = limits.length === 0 && first?.address.facet === 'pValue';
+    if (first === undefined || (limits.length !== 2 && !isP)) return [];
+    const key = addressKey(first.address).replace(/\/(value|pValue)$/, '/cell');
+    return [{ key, text: textOf(runs) }];
+  });
 }
 
 /** Numbers that a table of counts alone does not give, or that words turn round. */
@@ -142,7 +158,7 @@ function isRelativeChange(key: string, text: string): boolean {
  * without them. `shown` is what our page prints.
  */
 function alike(text: string, shown: string, key: string): string {
-  const plain = text.replaceAll('\u2212', '-').replaceAll(/[\u00a0\u202f]/g, ' ').replace('%', '');
+  const plain = text.replaceAll(/[\u2212\u2013]/g, '-').replaceAll(/[\u00a0\u202f]/g, ' ').replace('%', '');
   if (key.endsWith('/pValue')) return plain.replace(/^[<>=]?0?\./, '');
   return /^[+\u2212]/.test(shown) ? plain : plain.replace(/^[+-]/, '');
 }

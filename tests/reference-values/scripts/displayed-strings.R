@@ -10,13 +10,17 @@ folder <- if (length(arguments) > 0) arguments[1] else "tests/reference-values"
 z <- qnorm(0.975)
 
 styles <- list(
-  "open-clinical" = list(steps = c(0, 200), scale = 100, fewer = 0, ratio = 2, small = 0,
+  "open-clinical" = list(between = " to ", brackets = c("(", ")"), 
+    steps = c(0, 200), scale = 100, fewer = 0, ratio = 2, small = 0,
     zero = TRUE, p = cbind(c(0.2, 1), c(3, 2)), floor = 0.001, ceiling = 0.99, group = 1e9),
-  "compact-clinical" = list(steps = c(0, 100), scale = 100, fewer = 0, ratio = 2, small = 0,
+  "compact-clinical" = list(between = "-", brackets = c("(", ")"), 
+    steps = c(0, 100), scale = 100, fewer = 0, ratio = 2, small = 0,
     zero = FALSE, p = cbind(c(0.01, 1), c(3, 2)), floor = 0.001, ceiling = 0.99, group = 1e9),
-  "bracketed-social-health" = list(steps = c(0, 100), scale = 100, fewer = 0, ratio = 2, small = 0,
+  "bracketed-social-health" = list(between = ", ", brackets = c("[", "]"), 
+    steps = c(0, 100), scale = 100, fewer = 0, ratio = 2, small = 0,
     zero = FALSE, p = cbind(c(0.1, 1), c(3, 2)), floor = 0.001, ceiling = 0.99, group = 1000),
-  "public-bulletin" = list(steps = 0, scale = 1000, fewer = 1, ratio = 1, small = 0.1,
+  "public-bulletin" = list(between = " to ", brackets = c("(", ")"), 
+    steps = 0, scale = 1000, fewer = 1, ratio = 1, small = 0.1,
     zero = TRUE, p = cbind(1, 2), floor = 0.01, ceiling = 0.9, group = 1000))
 
 # Whole units of the last digit, as text with a point.
@@ -48,6 +52,13 @@ p_text <- function(p, style) {
   places <- style$p[style$p[, 1] > p, 2][1]
   while ((units_of(p, 1, places) / 10^places < 0.05) != (p < 0.05)) places <- places + 1
   point(real(p, 1, places))
+}
+
+# An estimate with its limits; no dash stands beside a minus sign.
+cell <- function(values, style) {
+  minus <- any(startsWith(values[2:3], "-"))
+  between <- if (style$between == "-" && minus) " to " else style$between
+  paste0(values[1], " ", style$brackets[1], values[2], between, values[3], style$brackets[2])
 }
 
 # Each comparison t: events and total of the index group, events and total of the reference.
@@ -202,6 +213,7 @@ analysis_case <- function(name, style_id, layers, design, ids) {
       }
       mapply(function(facet, value) put(measure, at[1], at[2], facet, value),
         c("value", "lower", "upper"), values)
+      put(measure, at[1], at[2], "cell", cell(values, style))
     }
     if (stratified) for (level in others) put(paste0("homogeneity:", measure), ids[level], "pooled",
       "pValue", p_text(homogeneity[[measure]](strata_of(level)), style))
@@ -210,7 +222,7 @@ analysis_case <- function(name, style_id, layers, design, ids) {
     "pValue", p_text(mantelhaen_of(strata_of(level))$p.value, style))
   if (length(ids) == 2 && !stratified) {
     p <- chisq.test(cbind(crude[, 1], crude[, 2] - crude[, 1]), correct = FALSE)$p.value
-    put("pearson", ids[2], "crude", "pValue", p_text(p, style))
+    for (facet in c("pValue", "cell")) put("pearson", ids[2], "crude", facet, p_text(p, style))
   }
   strings <- object(mapply(field, names(out), text(out)))
   head <- c(field("kind", text("table")), field("name", text(name)),
