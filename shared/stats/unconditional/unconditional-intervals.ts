@@ -10,7 +10,7 @@ import { differences, logRatios } from './null-family';
 import { unconditionalLowerLimit } from './unconditional-limit';
 
 /**
- * The largest groups of exact unconditional intervals, and what to use beyond them: half a second
+ * The largest groups of exact unconditional intervals, and what to use beyond them: about 0.1 s
  * for 500 and 500, growing with the size to the power of 1.5. The score interval, whose statistic
  * they share, is then as good.
  */
