@@ -1,13 +1,12 @@
-import { cellsOf, marginsOf } from '../check-counts';
+import { cellsOf } from '../check-counts';
 import { criticalValue, hypergeometricSupport } from '../distributions';
 import type { FourfoldTable } from '../fourfold-table';
 import type { Limits } from '../intervals/interval-method';
 import { oddsRatioOf } from '../point-estimates';
+import { urnOf } from '../urn-of';
 import { conditionalCounts } from './conditional-counts';
-import { zeroOfIncreasing } from './newton';
-
-/** Half the width of a search on the log scale; e^60 is far beyond any ratio of counts. */
-const RANGE = [-60, 60] as const;
+import { RANGE, zeroOfIncreasing } from './newton';
+import { meanDistance } from './tail-sums';
 
 /** How a limit's tail counts the observed number: whole for exact limits, half for mid-p. */
 export type ShareOfObserved = 1 | 0.5;
@@ -28,11 +27,7 @@ export function conditionalOddsRatioOf(table: FourfoldTable): number {
   }
   const counts = conditionalCounts(table);
   const zero = zeroOfIncreasing(
-    (logRatio) => {
-      const { momentBelow, momentAbove, squares } = counts(logRatio);
-      const excess = momentBelow + momentAbove;
-      return { value: excess, slope: squares - excess * excess };
-    },
+    (logRatio) => meanDistance(counts(logRatio)),
     Math.log(oddsRatioOf(table)),
     RANGE,
   );
@@ -90,9 +85,5 @@ function roughLowerLimit(table: FourfoldTable, level: number): number {
 }
 
 function supportOf(table: FourfoldTable): { smallest: number; largest: number } {
-  return hypergeometricSupport({
-    marked: table.index.total,
-    unmarked: table.reference.total,
-    drawn: marginsOf(table).events,
-  });
+  return hypergeometricSupport(urnOf(table));
 }

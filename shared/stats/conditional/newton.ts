@@ -1,3 +1,6 @@
+/** The range of a search on the log scale; e^60 is far beyond any ratio of counts. */
+export const RANGE = [-60, 60] as const;
+
 /** A function's value and slope at a place. */
 export interface ValueAndSlope {
   readonly value: number;

@@ -1,4 +1,4 @@
-import { chiSquareUpperTail } from '../distributions';
+import { chiSquareOutcome } from '../chi-square-outcome';
 import type { Estimate, TestOutcome } from '../estimate';
 
 /** How an effect differs between two strata: an estimate with limits, a test of no difference. */
@@ -9,6 +9,5 @@ export interface Interaction {
 
 /** Wald's test of a number that is 0 without interaction. */
 export function waldTest(value: number, variance: number, method: string): TestOutcome {
-  const statistic = (value / variance) * value;
-  return { method, statistic, degreesOfFreedom: 1, pValue: chiSquareUpperTail(statistic, 1) };
+  return chiSquareOutcome(method, (value / variance) * value);
 }

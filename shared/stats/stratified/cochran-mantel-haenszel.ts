@@ -1,7 +1,7 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
+import { chiSquareOutcome } from '../chi-square-outcome';
 import { marginsOf } from '../check-counts';
-import { chiSquareUpperTail } from '../distributions';
 import type { EstimationIssue, TestOutcome } from '../estimate';
 import { productDifference } from '../exact';
 import type { FourfoldTable, StratifiedTable } from '../fourfold-table';
@@ -34,12 +34,7 @@ export function cochranMantelHaenszel(
     return failure({ code: 'noInformativeStratum', facts: { strata: strata.length } });
   }
   const statistic = statisticOf(parted.used, correction === 'half' ? 0.5 : 0);
-  return success({
-    method: 'cochranMantelHaenszel',
-    statistic,
-    degreesOfFreedom: 1,
-    pValue: chiSquareUpperTail(statistic, 1),
-  });
+  return success(chiSquareOutcome('cochranMantelHaenszel', statistic));
 }
 
 function statisticOf(strata: StratifiedTable, taken: number): number {

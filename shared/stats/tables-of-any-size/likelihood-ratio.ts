@@ -1,7 +1,8 @@
 import { success } from '#shared/core';
 import type { Result } from '#shared/core';
+import { chiSquareOutcome } from '../chi-square-outcome';
 import type { ContingencyTable } from '../contingency-table';
-import { chiSquareUpperTail, deviance } from '../distributions';
+import { deviance } from '../distributions';
 import type { EstimationIssue, TestOutcome } from '../estimate';
 import { occupiedCounts } from './occupied-counts';
 import type { OccupiedCounts } from './occupied-counts';
@@ -32,8 +33,7 @@ function outcomeOf({ rows, rowTotals, columnTotals, total }: OccupiedCounts): Te
   );
   const statistic = 2 * parts.reduce((sum, part) => sum + part, 0);
   const degreesOfFreedom = (rowTotals.length - 1) * (columnTotals.length - 1);
-  const pValue = chiSquareUpperTail(statistic, degreesOfFreedom);
-  return { method: 'likelihoodRatio', statistic, degreesOfFreedom, pValue };
+  return chiSquareOutcome('likelihoodRatio', statistic, degreesOfFreedom);
 }
 
 function cellPart(observed: number, expected: number): number {

@@ -1,10 +1,10 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
-import { marginsOf } from '../check-counts';
 import { hypergeometricSupport, logHypergeometric } from '../distributions';
 import type { Urn } from '../distributions';
 import type { EstimationIssue, TestOutcome } from '../estimate';
 import type { FourfoldTable } from '../fourfold-table';
+import { urnOf } from '../urn-of';
 import { issueOfTest } from './fourfold-issue';
 import { noLikelierThan } from './hypergeometric-ties';
 
@@ -28,15 +28,6 @@ export function fisherOfFourfold(table: FourfoldTable): Result<TestOutcome, Esti
         degreesOfFreedom: null,
         pValue: twoSided(table.index.events, urnOf(table)),
       });
-}
-
-/** The urn of a table's index group, all margins fixed. */
-export function urnOf(table: FourfoldTable): Urn {
-  return {
-    marked: table.index.total,
-    unmarked: table.reference.total,
-    drawn: marginsOf(table).events,
-  };
 }
 
 function twoSided(observed: number, urn: Urn): number {

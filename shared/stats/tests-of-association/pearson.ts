@@ -1,8 +1,8 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
+import { chiSquareOutcome } from '../chi-square-outcome';
 import { marginsOf } from '../check-counts';
 import type { ContingencyTable } from '../contingency-table';
-import { chiSquareUpperTail } from '../distributions';
 import type { EstimationIssue, TestOutcome } from '../estimate';
 import type { FourfoldTable } from '../fourfold-table';
 import { riskDifferenceOf } from '../point-estimates';
@@ -28,7 +28,9 @@ export function pearsonOfFourfold(table: FourfoldTable): Result<TestOutcome, Est
   const difference = riskDifferenceOf(table);
   const shares = (events / total) * (others / total);
   const precision = (table.index.total / total) * table.reference.total;
-  return success(outcome((difference * difference * precision) / shares, 1));
+  return success(
+    chiSquareOutcome('pearsonChiSquare', (difference * difference * precision) / shares, 1),
+  );
 }
 
 /**
@@ -48,7 +50,9 @@ export function pearsonOfTable(table: ContingencyTable): Result<TestOutcome, Est
   }
   const { rowTotals, columnTotals } = occupied.value;
   const degreesOfFreedom = (rowTotals.length - 1) * (columnTotals.length - 1);
-  return success(outcome(statisticOf(occupied.value), degreesOfFreedom));
+  return success(
+    chiSquareOutcome('pearsonChiSquare', statisticOf(occupied.value), degreesOfFreedom),
+  );
 }
 
 function statisticOf({ rows, rowTotals, columnTotals, total }: OccupiedCounts): number {
@@ -61,13 +65,4 @@ function statisticOf({ rows, rowTotals, columnTotals, total }: OccupiedCounts): 
 
 function squareOver(observed: number, expected: number): number {
   return ((observed - expected) * (observed - expected)) / expected;
-}
-
-function outcome(statistic: number, degreesOfFreedom: number): TestOutcome {
-  return {
-    method: 'pearsonChiSquare',
-    statistic,
-    degreesOfFreedom,
-    pValue: chiSquareUpperTail(statistic, degreesOfFreedom),
-  };
 }

@@ -1,7 +1,7 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
+import { chiSquareOutcome } from '../chi-square-outcome';
 import type { ScoredGroup } from '../contingency-table';
-import { chiSquareUpperTail } from '../distributions';
 import type { EstimationIssue, TestOutcome } from '../estimate';
 import { issueOfTrend, sumOf } from './trend-issue';
 import type { TrendTest } from './trend-test';
@@ -33,8 +33,7 @@ export function cochranArmitage(
   );
   const spread = sumOf(used, (group) => group.total * (group.score - centre) ** 2);
   const statistic = (trend * trend) / (share * (1 - share) * spread);
-  const pValue = chiSquareUpperTail(statistic, 1);
-  return success({ method: 'cochranArmitage', statistic, degreesOfFreedom: 1, pValue });
+  return success(chiSquareOutcome('cochranArmitage', statistic));
 }
 
 /** The test as a member of TREND_TESTS. */

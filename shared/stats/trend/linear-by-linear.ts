@@ -1,7 +1,7 @@
 import { success } from '#shared/core';
 import type { Result } from '#shared/core';
+import { chiSquareOutcome } from '../chi-square-outcome';
 import type { EstimationIssue, TestOutcome } from '../estimate';
-import { chiSquareUpperTail } from '../distributions';
 import { scoredSums } from './scored-table';
 import type { ScoredTable } from './scored-table';
 import type { TrendTest } from './trend-test';
@@ -24,8 +24,7 @@ export function linearByLinear(table: ScoredTable): Result<TestOutcome, Estimati
   }
   const { total, rowSquares, columnSquares, products } = sums.value;
   const statistic = (total - 1) * (products / rowSquares) * (products / columnSquares);
-  const pValue = chiSquareUpperTail(statistic, 1);
-  return success({ method: 'linearByLinear', statistic, degreesOfFreedom: 1, pValue });
+  return success(chiSquareOutcome('linearByLinear', statistic));
 }
 
 /** The test for two columns, events and others, as a member of TREND_TESTS. */

@@ -156,7 +156,7 @@ const ODDS_RATIO_CONDITIONAL: readonly Row[] = [
   ],
   [
     'estimate',
-    'stats/conditional/conditional-odds-ratio',
+    'stats/conditional/tail-sums',
     'exact',
     'const excess = momentBelow + momentAbove;',
     'const excess = momentBelow + momentAbove + 0.01;',

@@ -1,4 +1,5 @@
 import { oddsRatioOf } from '../../point-estimates';
+import { MIETTINEN_NURMINEN } from '../miettinen-nurminen-words';
 import { oddsRatioScore } from '../score/odds-ratio-score';
 import { limitsOfRatio } from '../score/score-limits';
 import { inflation } from '../score/standardised';
@@ -16,12 +17,7 @@ import { oddsRatioMethod } from './odds-ratio-method';
  * Example: 9/13 against 4/14 at level 0.95 gives 1.0934 to 28.9419.
  */
 export const miettinenNurminen = oddsRatioMethod({
-  id: 'miettinenNurminen',
-  label: 'Miettinen–Nurminen score',
-  shortLabel: 'Miettinen–Nurminen',
-  citation:
-    'Miettinen O, Nurminen M. Comparative analysis of two rates. ' +
-    'Statistics in Medicine 1985;4:213-226.',
+  ...MIETTINEN_NURMINEN,
   limits(table, z) {
     return limitsOfRatio(oddsRatioOf(table), oddsRatioScore(table, inflation(table)), z);
   },

@@ -1,3 +1,4 @@
+import { MIETTINEN_NURMINEN } from '../miettinen-nurminen-words';
 import { riskDifferenceScore } from '../score/risk-difference-score';
 import { limitsOfDifference } from '../score/score-limits';
 import { riskDifferenceMethod } from './risk-difference-method';
@@ -13,12 +14,7 @@ import { riskDifferenceMethod } from './risk-difference-method';
  * Example: 56/70 against 48/80 at level 0.95 gives 0.0528 to 0.3382.
  */
 export const miettinenNurminen = riskDifferenceMethod({
-  id: 'miettinenNurminen',
-  label: 'Miettinen–Nurminen score',
-  shortLabel: 'Miettinen–Nurminen',
-  citation:
-    'Miettinen O, Nurminen M. Comparative analysis of two rates. ' +
-    'Statistics in Medicine 1985;4:213-226.',
+  ...MIETTINEN_NURMINEN,
   limits(table, z) {
     return limitsOfDifference(table, riskDifferenceScore(table), z);
   },

@@ -1,4 +1,5 @@
 import { riskRatioOf } from '../../point-estimates';
+import { MIETTINEN_NURMINEN } from '../miettinen-nurminen-words';
 import { riskRatioScore } from '../score/risk-ratio-score';
 import { limitsOfRatio } from '../score/score-limits';
 import { inflation } from '../score/standardised';
@@ -16,12 +17,7 @@ import { riskRatioMethod } from './risk-ratio-method';
  * Example: 7/34 against 1/34 at level 0.95 gives 1.2086 to 43.0330.
  */
 export const miettinenNurminen = riskRatioMethod({
-  id: 'miettinenNurminen',
-  label: 'Miettinen–Nurminen score',
-  shortLabel: 'Miettinen–Nurminen',
-  citation:
-    'Miettinen O, Nurminen M. Comparative analysis of two rates. ' +
-    'Statistics in Medicine 1985;4:213-226.',
+  ...MIETTINEN_NURMINEN,
   limits(table, z) {
     return limitsOfRatio(riskRatioOf(table), riskRatioScore(table, inflation(table)), z);
   },

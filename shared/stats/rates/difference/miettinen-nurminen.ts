@@ -1,4 +1,5 @@
 import { intervalMethod } from '../../intervals/interval-method';
+import { MIETTINEN_NURMINEN } from '../../intervals/miettinen-nurminen-words';
 import { zeroOfDecreasing } from '../../intervals/score/bisection';
 import { issueOfRates, rateDifferenceOf } from '../rate-count';
 import type { RateTable } from '../rate-count';
@@ -12,12 +13,7 @@ import type { RateTable } from '../rate-count';
  * Source: Miettinen and Nurminen (1985) Statistics in Medicine 4:213-226, rates.
  */
 export const miettinenNurminen = intervalMethod(issueOfRates, {
-  id: 'miettinenNurminen',
-  label: 'Miettinen–Nurminen score',
-  shortLabel: 'Miettinen–Nurminen',
-  citation:
-    'Miettinen O, Nurminen M. Comparative analysis of two rates. ' +
-    'Statistics in Medicine 1985;4:213-226.',
+  ...MIETTINEN_NURMINEN,
   limits(table, z) {
     const score = (difference: number): number => rateDifferenceScore(table, difference);
     const estimate = rateDifferenceOf(table);

@@ -1,13 +1,15 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
 import type { ValueAndSlope } from '../../conditional/newton';
-import { zeroOfIncreasing } from '../../conditional/newton';
+import { RANGE, zeroOfIncreasing } from '../../conditional/newton';
+import { meanDistance } from '../../conditional/tail-sums';
+import type { ConditionalCounts } from '../../conditional/tail-sums';
 import type { Estimate, EstimationIssue } from '../../estimate';
 import type { StratifiedTable } from '../../fourfold-table';
 import { issueOfTest } from '../../tests-of-association/fourfold-issue';
 import { informativeStrata } from '../pooled-estimate';
-import type { ConditionalSum, ConditionalSupport, ConditionalTails } from './conditional-sum';
-import { RANGE, conditionalSum, conditionalSupport, startingRatio } from './conditional-sum';
+import type { ConditionalSum, ConditionalSupport } from './conditional-sum';
+import { conditionalSum, conditionalSupport, startingRatio } from './conditional-sum';
 
 /** The longest support that is summed: beyond, the approximation is as good and immediate. */
 const LONGEST_SUPPORT = 20_000;
@@ -57,7 +59,7 @@ function estimateOf(
   const start = startingRatio(strata, support);
   const sum = conditionalSum(strata, support, start);
   const tail = (1 - level) / 2;
-  const root = (rising: (tails: ConditionalTails) => ValueAndSlope): number =>
+  const root = (rising: (tails: ConditionalCounts) => ValueAndSlope): number =>
     Math.exp(rootOf(strata, support, { sum, start }, rising));
   const none = support.observed === support.smallest;
   return {
@@ -82,7 +84,7 @@ function rootOf(
   strata: StratifiedTable,
   support: ConditionalSupport,
   { sum, start }: LaidOut,
-  rising: (tails: ConditionalTails) => ValueAndSlope,
+  rising: (tails: ConditionalCounts) => ValueAndSlope,
 ): number {
   const root = zeroOfIncreasing((logRatio) => rising(sum.tailsAt(logRatio)), start, RANGE);
   if (sum.covers(root)) {
@@ -92,13 +94,8 @@ function rootOf(
   return rootOf(strata, support, nearer, rising);
 }
 
-/** The expected less the observed number; its slope is the variance. */
-function meanDistance({ momentBelow, momentAbove, variance }: ConditionalTails): ValueAndSlope {
-  return { value: momentBelow + momentAbove, slope: variance };
-}
-
 /** How far the probability of as many events or more lies above the wanted one. */
-function upperTail(tails: ConditionalTails, share: number, wanted: number): ValueAndSlope {
+function upperTail(tails: ConditionalCounts, share: number, wanted: number): ValueAndSlope {
   const { above, at, momentBelow, momentAbove } = tails;
   const probability = above + share * at;
   const slope = momentAbove - probability * (momentBelow + momentAbove);
@@ -106,7 +103,7 @@ function upperTail(tails: ConditionalTails, share: number, wanted: number): Valu
 }
 
 /** How far the probability of as many events or fewer lies below the wanted one. */
-function lowerTail(tails: ConditionalTails, share: number, wanted: number): ValueAndSlope {
+function lowerTail(tails: ConditionalCounts, share: number, wanted: number): ValueAndSlope {
   const { below, at, momentBelow, momentAbove } = tails;
   const probability = below + share * at;
   const slope = probability * (momentBelow + momentAbove) - momentBelow;

@@ -1,13 +1,12 @@
-import { marginsOf } from '../../check-counts';
 import { hypergeometricSupport } from '../../distributions';
 import type { Urn } from '../../distributions';
-import type { FourfoldTable, StratifiedTable } from '../../fourfold-table';
-import { zeroOfIncreasing } from '../../conditional/newton';
+import type { StratifiedTable } from '../../fourfold-table';
+import { RANGE, zeroOfIncreasing } from '../../conditional/newton';
+import { addTerm, emptySums, sharesOf } from '../../conditional/tail-sums';
+import type { ConditionalCounts } from '../../conditional/tail-sums';
+import { urnOf } from '../../urn-of';
 import type { WeightRun } from './weight-run';
 import { LOG_OF_CUT, runAroundMode, sumOfRuns } from './weight-run';
-
-/** The range of a search on the log scale; e^60 is far beyond any ratio of counts. */
-export const RANGE = [-60, 60] as const;
 
 /** The events of the index groups over all strata, with what they could have been. */
 export interface ConditionalSupport {
@@ -26,28 +25,9 @@ export function conditionalSupport(strata: StratifiedTable): ConditionalSupport 
   };
 }
 
-function urnOf(table: FourfoldTable): Urn {
-  return {
-    marked: table.index.total,
-    unmarked: table.reference.total,
-    drawn: marginsOf(table).events,
-  };
-}
-
-/** Probabilities of fewer events than observed, as many and more, at some ratio, with moments. */
-export interface ConditionalTails {
-  readonly below: number;
-  readonly at: number;
-  readonly above: number;
-  /** Sums of probability times distance from the observed number, on either side. */
-  readonly momentBelow: number;
-  readonly momentAbove: number;
-  readonly variance: number;
-}
-
 /** The distribution of the index groups' events by the logarithm of the common odds ratio. */
 export interface ConditionalSum {
-  readonly tailsAt: (logRatio: number) => ConditionalTails;
+  readonly tailsAt: (logRatio: number) => ConditionalCounts;
   /** Whether the counts that were cut off at either end do not matter at a ratio. */
   readonly covers: (logRatio: number) => boolean;
 }
@@ -121,33 +101,14 @@ function noncentralRun(urn: Urn, ratio: number): WeightRun {
 }
 
 /** `first` is the distance of the first weight's count from the observed one. */
-function tailsOf(first: number, logWeights: Float64Array, tilt: number): ConditionalTails {
+function tailsOf(first: number, logWeights: Float64Array, tilt: number): ConditionalCounts {
   const heaviest = largestTilted(logWeights, tilt);
-  const sums = { below: 0, at: 0, above: 0, momentBelow: 0, momentAbove: 0, squares: 0 };
+  const sums = emptySums();
   for (let place = 0; place < logWeights.length; place += 1) {
     const weight = Math.exp((logWeights[place] as number) + place * tilt - heaviest);
-    const distance = first + place;
-    sums.squares += weight * distance * distance;
-    if (distance < 0) {
-      sums.below += weight;
-      sums.momentBelow += weight * distance;
-    } else if (distance > 0) {
-      sums.above += weight;
-      sums.momentAbove += weight * distance;
-    } else {
-      sums.at = weight;
-    }
+    addTerm(sums, first + place, weight);
   }
-  const total = sums.below + sums.at + sums.above;
-  const mean = (sums.momentBelow + sums.momentAbove) / total;
-  return {
-    below: sums.below / total,
-    at: sums.at / total,
-    above: sums.above / total,
-    momentBelow: sums.momentBelow / total,
-    momentAbove: sums.momentAbove / total,
-    variance: sums.squares / total - mean * mean,
-  };
+  return sharesOf(sums);
 }
 
 function largestTilted(logWeights: Float64Array, tilt: number): number {

@@ -1,7 +1,7 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
+import { chiSquareOutcome } from '../../chi-square-outcome';
 import type { ContingencyTable } from '../../contingency-table';
-import { chiSquareUpperTail } from '../../distributions';
 import type { EstimationIssue, TestOutcome } from '../../estimate';
 import { quadraticForm } from './quadratic-form';
 
@@ -45,12 +45,7 @@ export function testContrasts(
   );
   return rank === 0
     ? failure({ code: 'noInformativeStratum', facts: { strata: strata.length } })
-    : success({
-        method,
-        statistic: value,
-        degreesOfFreedom: rank,
-        pValue: chiSquareUpperTail(value, rank),
-      });
+    : success(chiSquareOutcome(method, value, rank));
 }
 
 function issueOfShape(

@@ -1,6 +1,6 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
-import { chiSquareUpperTail } from '../../distributions';
+import { chiSquareOutcome } from '../../chi-square-outcome';
 import type { EstimationIssue, TestOutcome } from '../../estimate';
 import type { FourfoldTable, StratifiedTable } from '../../fourfold-table';
 import type { MethodWords } from '../../intervals/interval-method';
@@ -59,8 +59,5 @@ function outcomeOf(
   if (!found.ok) {
     return found;
   }
-  const value = Math.max(0, found.value);
-  const degreesOfFreedom = used.length - 1;
-  const pValue = chiSquareUpperTail(value, degreesOfFreedom);
-  return success({ method: id, statistic: value, degreesOfFreedom, pValue });
+  return success(chiSquareOutcome(id, Math.max(0, found.value), used.length - 1));
 }

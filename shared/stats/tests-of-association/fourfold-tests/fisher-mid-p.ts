@@ -3,7 +3,8 @@ import type { Result } from '#shared/core';
 import { hypergeometricProbability } from '../../distributions';
 import type { EstimationIssue, TestOutcome } from '../../estimate';
 import type { FourfoldTable } from '../../fourfold-table';
-import { fisherOfFourfold, urnOf } from '../fisher';
+import { urnOf } from '../../urn-of';
+import { fisherOfFourfold } from '../fisher';
 import type { FourfoldTest } from './fourfold-test';
 
 /**

@@ -1,7 +1,7 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
+import { chiSquareOutcome } from '../../chi-square-outcome';
 import { cellsOf, marginsOf } from '../../check-counts';
-import { chiSquareUpperTail } from '../../distributions';
 import type { EstimationIssue, TestOutcome } from '../../estimate';
 import { productDifference } from '../../exact';
 import type { FourfoldTable } from '../../fourfold-table';
@@ -46,8 +46,7 @@ function twiceLogRatio(table: FourfoldTable): Result<TestOutcome, EstimationIssu
       part(table.index.total * shares[1], -excess) +
       part(table.reference.total * shares[0], -excess) +
       part(table.reference.total * shares[1], excess));
-  const pValue = chiSquareUpperTail(statistic, 1);
-  return success({ method: 'likelihoodRatio', statistic, degreesOfFreedom: 1, pValue });
+  return success(chiSquareOutcome('likelihoodRatio', statistic));
 }
 
 /**

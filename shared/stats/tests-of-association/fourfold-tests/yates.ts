@@ -1,7 +1,7 @@
 import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
+import { chiSquareOutcome } from '../../chi-square-outcome';
 import { cellsOf, marginsOf } from '../../check-counts';
-import { chiSquareUpperTail } from '../../distributions';
 import type { EstimationIssue, TestOutcome } from '../../estimate';
 import { productDifference } from '../../exact';
 import type { FourfoldTable } from '../../fourfold-table';
@@ -41,6 +41,5 @@ function corrected(table: FourfoldTable): Result<TestOutcome, EstimationIssue> {
   const byGroups = lessened / table.index.total / table.reference.total;
   const byOutcome = lessened / events / others;
   const statistic = byGroups * byOutcome * total;
-  const pValue = chiSquareUpperTail(statistic, 1);
-  return success({ method: 'yates', statistic, degreesOfFreedom: 1, pValue });
+  return success(chiSquareOutcome('yates', statistic));
 }
