@@ -2,14 +2,18 @@ import { failure, success } from '#shared/core';
 import type { Result } from '#shared/core';
 import type { Tally } from '#shared/tally';
 import type { AnalysisIssue } from './analysis-issue';
-import type { AnalysisResult, PooledContrastResult, ResultFrame } from './analysis-result';
+import type {
+  AnalysisResult,
+  LayerResult,
+  PooledContrastResult,
+  ResultFrame,
+} from './analysis-result';
 import { computeLayer } from './compute-layer';
 import { computePooled } from './compute-pooled';
 import { ENGINE_VERSION } from './engine-version';
 import type { AnalysisSpecification } from './specification';
 import { issueOfSpecification } from './specification-issue';
 import { countsOf } from './tables';
-import type { AnalysisCounts } from './tables';
 
 /**
  * Computes an analysis from its counts.
@@ -31,34 +35,36 @@ export function computeAnalysis(
     return failure(issue);
   }
   const counts = countsOf(specification, frame, tally);
-  return counts.ok
-    ? success({
-        schemaVersion: 1,
-        engineVersion,
-        specification,
-        frame,
-        counted: tally.counted,
-        restricted: tally.restricted,
-        leftOut: tally.leftOut,
-        crude: computeLayer(specification, frame, null, counts.value.crude),
-        strata: [...counts.value.strata].map(([id, layer]) =>
-          computeLayer(specification, frame, id, layer),
-        ),
-        pooled: pooledOf(specification, frame, counts.value),
-      })
-    : counts;
+  if (!counts.ok) {
+    return counts;
+  }
+  const strata = [...counts.value.strata].map(([id, layer]) =>
+    computeLayer(specification, frame, id, layer),
+  );
+  return success({
+    schemaVersion: 1,
+    engineVersion,
+    specification,
+    frame,
+    counted: tally.counted,
+    restricted: tally.restricted,
+    leftOut: tally.leftOut,
+    crude: computeLayer(specification, frame, null, counts.value.crude),
+    strata,
+    pooled: pooledOf(specification, frame, strata),
+  });
 }
 
 function pooledOf(
   specification: AnalysisSpecification,
   frame: ResultFrame,
-  counts: AnalysisCounts,
+  strata: readonly LayerResult[],
 ): readonly PooledContrastResult[] {
-  if (specification.adjustment !== 'mantelHaenszel' || counts.strata.size === 0) {
+  if (specification.adjustment !== 'mantelHaenszel' || strata.length === 0) {
     return [];
   }
   const { levels, referenceLevelId } = frame.exposure;
   return levels
     .filter(({ id }) => id !== referenceLevelId)
-    .map(({ id }) => computePooled(specification, frame, counts, id));
+    .map(({ id }) => computePooled(specification, frame, strata, id));
 }

@@ -48,7 +48,7 @@ export function computeLayer(
 }
 
 /** Counts of a level; a level that the layer does not know is a bug. */
-export function countOf(counts: LayerCounts, levelId: string): GroupCount {
+function countOf(counts: LayerCounts, levelId: string): GroupCount {
   const count = counts.get(levelId);
   if (!count) {
     throw new Error(`No counts for level ${levelId}`);
@@ -57,7 +57,7 @@ export function countOf(counts: LayerCounts, levelId: string): GroupCount {
 }
 
 /** The fourfold table of a level against the reference. */
-export function tableOf(
+function tableOf(
   counts: LayerCounts,
   indexLevelId: string,
   referenceLevelId: string,

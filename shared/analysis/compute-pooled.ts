@@ -1,26 +1,31 @@
 import { failure } from '#shared/core';
-import type { Result } from '#shared/core';
 import { EFFECT_MEASURES, EFFECT_MEASURE_IDS } from '#shared/effects';
 import type { EffectMeasureId } from '#shared/effects';
 import { cochranMantelHaenszel } from '#shared/stats';
-import type { Estimate, EstimationIssue, HomogeneityTest, StratifiedTable } from '#shared/stats';
+import type { HomogeneityTest, StratifiedTable } from '#shared/stats';
 import { homogeneityId, poolingId } from './chosen-methods';
-import type { PooledContrastResult, ResultFrame, StratumLeftOut } from './analysis-result';
+import type {
+  LayerResult,
+  PooledContrastResult,
+  ResultFrame,
+  StratumLeftOut,
+} from './analysis-result';
 import { computeInteraction } from './compute-interaction';
-import { byMeasure, ifGiven, tableOf } from './compute-layer';
+import { byMeasure, ifGiven } from './compute-layer';
+import { poolOver } from './pool-over';
+import { contrastStrata } from './result-places';
 import type { AnalysisSpecification } from './specification';
-import type { AnalysisCounts } from './tables';
 
 /** One level against the reference, pooled over strata, with what was left out of which number. */
 export function computePooled(
   specification: AnalysisSpecification,
   frame: ResultFrame,
-  counts: AnalysisCounts,
+  layers: readonly LayerResult[],
   indexLevelId: string,
 ): PooledContrastResult {
   const { level } = specification;
   const { referenceLevelId } = frame.exposure;
-  const strata = strataOf(specification, counts, indexLevelId, referenceLevelId);
+  const strata = contrastStrata({ specification, strata: layers }, indexLevelId);
   const homogeneity = byMeasure((id) => homogeneityOf(id, specification, frame, strata));
   const measureLeftOut = byMeasure((id) => leftOutOf(id, specification, frame, strata));
   return {
@@ -28,7 +33,7 @@ export function computePooled(
     referenceLevelId,
     measures: byMeasure((id) =>
       ifGiven(id, frame, () =>
-        withLabel(EFFECT_MEASURES[id].pooled(strata, level, poolingId(specification, id)), frame),
+        poolOver(strata, id, poolingId(specification, id), { level, frame }),
       ),
     ),
     homogeneity: byMeasure((id) => homogeneity[id].outcome),
@@ -38,39 +43,6 @@ export function computePooled(
     measureLeftOut,
     homogeneityLeftOut: byMeasure((id) => homogeneity[id].leftOut),
   };
-}
-
-/** The contrast's tables, with what standardisation needs to know of each stratum. */
-function strataOf(
-  { otherMethods }: AnalysisSpecification,
-  counts: AnalysisCounts,
-  indexLevelId: string,
-  referenceLevelId: string,
-): StratifiedTable {
-  return [...counts.strata].map(([id, layer]) => {
-    const share = otherMethods?.standardShares?.[id];
-    return {
-      id,
-      table: tableOf(layer, indexLevelId, referenceLevelId),
-      members: [...layer.values()].reduce((sum, { total }) => sum + total, 0),
-      ...(share === undefined ? {} : { share }),
-    };
-  });
-}
-
-/** An issue that names a stratum gets the stratum's label in place of its id. */
-function withLabel(
-  estimate: Result<Estimate, EstimationIssue>,
-  { strata }: ResultFrame,
-): Result<Estimate, EstimationIssue> {
-  const stratum = estimate.ok
-    ? undefined
-    : strata.find(({ id }) => id === estimate.issue.facts?.stratum);
-  if (estimate.ok || stratum === undefined) {
-    return estimate;
-  }
-  const facts = { ...estimate.issue.facts, stratum: stratum.label };
-  return failure({ ...estimate.issue, facts });
 }
 
 function homogeneityOf(

@@ -35,6 +35,8 @@ export type {
 } from './guards/guard';
 export { listValues } from './list-values';
 export type { AddressedValue } from './list-values';
+export { poolOver } from './pool-over';
+export type { PoolingSetting } from './pool-over';
 export { printedTest } from './printed-test';
 export type { PrintedTest } from './printed-test';
 export { numberOf } from './quantity';

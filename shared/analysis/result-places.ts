@@ -39,9 +39,12 @@ export function contrastTable(
  * The tables of a contrast by stratum, with what standardisation asks of a stratum: its members in
  * the whole analysis, and its share in a chosen standard population.
  */
-export function contrastStrata(result: AnalysisResult, indexLevelId: string): StratifiedTable {
-  const shares = result.specification.otherMethods?.standardShares;
-  return result.strata.flatMap((layer) => {
+export function contrastStrata(
+  { specification, strata }: Pick<AnalysisResult, 'specification' | 'strata'>,
+  indexLevelId: string,
+): StratifiedTable {
+  const shares = specification.otherMethods?.standardShares;
+  return strata.flatMap((layer) => {
     const { stratumId: id, total } = layer;
     const table = contrastTable(layer, indexLevelId);
     if (id === null || table === undefined) {

@@ -1,4 +1,4 @@
-import { contrastStrata, layerAt, poolingId, type ResultScope } from '#shared/analysis';
+import { contrastStrata, layerAt, poolingId, poolOver, type ResultScope } from '#shared/analysis';
 import type { Result } from '#shared/core';
 import { EFFECT_MEASURES, type EffectMeasureId } from '#shared/effects';
 import { DIFFERENCE_SCALES, formatShareLimit, joinLimits } from '#shared/format';
@@ -100,7 +100,10 @@ function poolingGroup(
     chosenId: poolingId(specification, measure),
     answerOf: (method) => ({
       kind: 'computed',
-      estimate: method.pooled(strata, specification.level),
+      estimate: poolOver(strata, measure, method.id, {
+        level: specification.level,
+        frame: print.result.frame,
+      }),
     }),
     printed: (estimate) => printedMeasure(print, measure, estimate, undefined),
   });
