@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { impactOf } from './read-impact';
+import { fractionInExposedAt } from './read-impact';
 import { readValue } from './read-value';
 import { resultOf } from './testing/counts-analysis';
 import type { CountsAnalysis } from './testing/counts-analysis';
@@ -68,9 +68,9 @@ describe('impact', () => {
     expect(read(TWO_STRATA, 'fractionInExposed', 'value', crude)).toBeCloseTo(1 - 1 / ratio, 12);
     expect(read(TWO_STRATA, 'fractionInExposed')).not.toBeNaN();
     const result = resultOf(TWO_STRATA);
-    const impact = impactOf(result, { scope: crude, levelId: 'yes' });
-    expect(impact?.fractionInExposed).toMatchObject({ value: { needsCausalReading: true } });
-    expect(impactOf(result, { scope: crude, levelId: 'no' })).toBeUndefined();
+    const fraction = fractionInExposedAt(result, { scope: crude, levelId: 'yes' });
+    expect(fraction).toMatchObject({ value: { needsCausalReading: true } });
+    expect(fractionInExposedAt(result, { scope: crude, levelId: 'no' })).toBeUndefined();
   });
 
   it('gives the population fraction of counts as they are, never of pooled numbers', () => {

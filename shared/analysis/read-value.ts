@@ -14,7 +14,7 @@ import type {
 } from '#shared/stats';
 import type { AnalysisResult, LayerResult, PooledContrastResult } from './analysis-result';
 import { readCaseControl } from './read-case-control';
-import { impactOf } from './read-impact';
+import { eValueAt, fractionInExposedAt, populationFractionAt } from './read-impact';
 import { contrastTable, layerAt, pooledAt } from './result-places';
 import type { Quantity } from './quantity';
 import type {
@@ -73,17 +73,18 @@ const READERS: Readonly<
   excessRisk: (result, address) =>
     readInteraction(pooledContrast(result, address)?.excessRisk, address.facet),
   fractionInExposed: (result, address) =>
-    readReal(impactOf(result, address)?.fractionInExposed, ({ value, interval }) =>
+    readReal(fractionInExposedAt(result, address), ({ value, interval }) =>
       estimateFacet(address.facet, value, interval),
     ),
   populationFraction: (result, address) =>
-    readReal(impactOf(result, address)?.populationFraction, ({ value, interval }) =>
+    readReal(populationFractionAt(result, address), ({ value, interval }) =>
       estimateFacet(address.facet, value, interval),
     ),
   eValue: (result, address) =>
-    readReal(impactOf(result, address)?.eValue, (found) =>
-      address.facet === 'value' || address.facet === 'lower' ? found[address.facet] : null,
-    ),
+    readReal(eValueAt(result, address), ({ ofValue, ofLimit }) => {
+      const parts: Partial<Record<AddressFacet, number>> = { value: ofValue, lower: ofLimit };
+      return parts[address.facet] ?? null;
+    }),
   counted: (result, address) => readWholeCount(result.counted, address),
   leftOut: (result, address) =>
     readWholeCount(

@@ -1,5 +1,5 @@
 import type { AddressedQuantity, AddressFacet, ResultScope, ValueAddress } from '#shared/analysis';
-import { contrastTestId, impactOf } from '#shared/analysis';
+import { contrastTestId, fractionInExposedAt } from '#shared/analysis';
 import type { AnalysisResult } from '#shared/analysis';
 import type { EffectMeasureId } from '#shared/effects';
 import { TEST_METHODS } from '#shared/stats';
@@ -102,7 +102,7 @@ function between(id: EffectMeasureId, direction: 'minus' | 'over'): QuantityWord
 }
 
 function readsAsPrevented(result: AnalysisResult, place: ValueAddress): boolean {
-  const impact = impactOf(result, place)?.fractionInExposed;
+  const impact = fractionInExposedAt(result, place);
   return impact?.ok === true && impact.value.kind === 'prevented';
 }
 
