@@ -26,7 +26,8 @@ function quantityKey({ quantity, estimateId }: ValueAddress): string {
   return estimateId === undefined ? quantity : `${quantity}:${encodeURIComponent(estimateId)}`;
 }
 
-function scopeKey(scope: ResultScope): string {
+/** A scope as the part of an address: text that only this scope has. */
+export function scopeKey(scope: ResultScope): string {
   return scope.kind === 'stratum' ? `stratum:${encodeURIComponent(scope.stratumId)}` : scope.kind;
 }
 

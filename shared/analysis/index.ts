@@ -1,4 +1,4 @@
-export { addressKey, parseAddress } from './address-key';
+export { addressKey, parseAddress, scopeKey } from './address-key';
 export type { AnalysisIssue, AnalysisIssueCode } from './analysis-issue';
 export type {
   AnalysisResult,

@@ -5,7 +5,7 @@ import type { EffectMeasureId } from '#shared/effects';
 import { TEST_METHODS } from '#shared/stats';
 import type { MethodWords } from '#shared/stats';
 import type { PinnedAnalysis } from './report';
-import { outsideMeasureName } from '#shared/wording';
+import { capitalised, outsideMeasureName } from '#shared/wording';
 import type { DesignTerms, Phrasebook } from '#shared/wording';
 
 /** A value in words, for lists: what it is, of whom, and where. */
@@ -148,10 +148,6 @@ function scopeWords(scope: ResultScope, { result }: PinnedAnalysis): string {
     case 'stratum':
       return result.frame.strata.find(({ id }) => id === scope.stratumId)?.label ?? '';
   }
-}
-
-function capitalised(text: string): string {
-  return text.charAt(0).toUpperCase() + text.slice(1);
 }
 
 /** Numbers of a level that are about its difference from the reference. */

@@ -20,7 +20,7 @@ export type { OutsideColumn } from './outside/outside-words';
 export { addressesOfPart, FRAMINGS, phraseText } from './phrase';
 export type { Direction, Framing, Phrase, PhrasePart } from './phrase';
 export { availableFramings, phraseOfClaim } from './phrase-of-claim';
-export { fillPattern, fillWords } from './phrasebook/fill-pattern';
+export { capitalised, fillPattern, fillWords } from './phrasebook/fill-pattern';
 export type { Fillings, SlotFilling } from './phrasebook/fill-pattern';
 export { parsePhrasebook } from './phrasebook/parse-phrasebook';
 export type { PhrasebookIssue } from './phrasebook/parse-phrasebook';

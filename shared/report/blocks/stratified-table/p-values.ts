@@ -1,5 +1,5 @@
 import type { AddressedQuantity, AnalysisResult, ResultScope } from '#shared/analysis';
-import { layerAt, pooledAt, printedTest } from '#shared/analysis';
+import { layerAt, pooledAt, printedTest, scopeKey } from '#shared/analysis';
 import type { Result } from '#shared/core';
 import { ADJUSTMENTS, adjustPValues } from '#shared/stats';
 import type { AdjustmentId, EstimationIssue, TestOutcome } from '#shared/stats';
@@ -24,7 +24,8 @@ export interface PlacedPValue {
 /** All p-values of a table; together they are the family that is adjusted for. */
 export interface TablePValues {
   readonly adjustment: AdjustmentId | null;
-  readonly placed: readonly PlacedPValue[];
+  /** By layer and level, in the order of the table. */
+  readonly placed: ReadonlyMap<string, PlacedPValue>;
 }
 
 /**
@@ -38,13 +39,13 @@ export function tablePValues(
 ): TablePValues | null {
   if (choice === undefined || choice === 'none') return null;
   const raw = plan.layers.flatMap(({ scope }) => pValuesAt(scope, result));
-  if (choice === 'unadjusted') return { adjustment: null, placed: raw };
+  if (choice === 'unadjusted') return { adjustment: null, placed: byPlace(raw) };
   const adjusted = adjustPValues(
     choice,
     raw.map(({ pValue }) => pValue),
   );
   const placed = raw.map((each, at) => ({ ...each, pValue: adjusted[at] ?? each.pValue }));
-  return { adjustment: choice, placed };
+  return { adjustment: choice, placed: byPlace(placed) };
 }
 
 /** The p-value of a level in a layer, if there is one. */
@@ -53,9 +54,15 @@ export function pValueAt(
   scope: ResultScope,
   levelId: string,
 ): PlacedPValue | undefined {
-  return placed.find(
-    (each) => each.levelId === levelId && JSON.stringify(each.scope) === JSON.stringify(scope),
-  );
+  return placed.get(placeKey(scope, levelId));
+}
+
+function byPlace(placed: readonly PlacedPValue[]): ReadonlyMap<string, PlacedPValue> {
+  return new Map(placed.map((each) => [placeKey(each.scope, each.levelId), each]));
+}
+
+function placeKey(scope: ResultScope, levelId: string): string {
+  return `${scopeKey(scope)}/${levelId}`;
 }
 
 function adjustmentIds(): readonly AdjustmentId[] {

@@ -49,8 +49,8 @@ function contentsOf(show: TableChoice, plan: TablePlan): TableContents {
 function pValuesNote({ pValues, houseStyle, phrasebook }: TableSetting): readonly Phrase[] {
   if (pValues === null) return [];
   const { placed, adjustment } = pValues;
-  const methods = [...new Set(placed.map(({ method }) => method))];
-  return pValueNotes({ methods, contrasts: placed.length, adjustment }, houseStyle, phrasebook);
+  const methods = [...new Set([...placed.values()].map(({ method }) => method))];
+  return pValueNotes({ methods, contrasts: placed.size, adjustment }, houseStyle, phrasebook);
 }
 
 /** What stands behind each column of estimates from elsewhere, and who computed it. */

@@ -1,4 +1,4 @@
-import type { AnalysisResult, ResultScope } from '#shared/analysis';
+import { type AnalysisResult, type ResultScope, scopeKey } from '#shared/analysis';
 
 /** The layers of a result in the order of their tabs: all records, each stratum, pooled. */
 export function scopesOf(result: AnalysisResult): readonly ResultScope[] {
@@ -12,11 +12,6 @@ export function scopesOf(result: AnalysisResult): readonly ResultScope[] {
 /** Whether two scopes are the same layer. */
 export function sameScope(one: ResultScope, other: ResultScope): boolean {
   return scopeKey(one) === scopeKey(other);
-}
-
-/** A short text that only this scope has. */
-export function scopeKey(scope: ResultScope): string {
-  return scope.kind === 'stratum' ? `stratum:${scope.stratumId}` : scope.kind;
 }
 
 /** The scope's name on a tab. */
@@ -44,4 +39,10 @@ export function stratumLabel(result: AnalysisResult, stratumId: string): string 
 /** An exposure level's label. */
 export function levelLabel(result: AnalysisResult, levelId: string | null): string {
   return result.frame.exposure.levels.find(({ id }) => id === levelId)?.label ?? levelId ?? '';
+}
+
+/** The contrast of a level with the reference: "6 h or more against None". */
+export function contrastLabel(result: AnalysisResult, levelId: string | null): string {
+  const { referenceLevelId } = result.frame.exposure;
+  return `${levelLabel(result, levelId)} against ${levelLabel(result, referenceLevelId)}`;
 }

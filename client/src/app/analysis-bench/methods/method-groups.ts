@@ -10,6 +10,7 @@ import {
   RISK_INTERVALS,
   type StratifiedTable,
 } from '#shared/stats';
+import { capitalised } from '#shared/wording';
 import { type BenchPrint, estimateText } from '../print/bench-print';
 import { tableAt } from '../print/estimate-rows';
 import { type MethodAnswer, type MethodGroup, methodGroup } from './method-group';
@@ -96,7 +97,7 @@ function poolingGroup(
     scale,
     factor: measureFactor(print, measure),
     methods: Object.values(poolings),
-    nameOf: ({ shortLabel }) => shortLabel.charAt(0).toUpperCase() + shortLabel.slice(1),
+    nameOf: ({ shortLabel }) => capitalised(shortLabel),
     chosenId: poolingId(specification, measure),
     answerOf: (method) => ({
       kind: 'computed',

@@ -9,7 +9,7 @@ import {
 import { boundText, type PinnedAnalysis, valueWords } from '#shared/report';
 import { issueWords } from '#shared/wording';
 import { BenchStore } from '../bench/bench-store';
-import { levelLabel, scopeLabel } from '../bench/result-scopes';
+import { contrastLabel, scopeLabel } from '../bench/result-scopes';
 import { type BenchPrint, sentenceOf } from '../print/bench-print';
 
 /** A further number of the contrast in view: what it is, and its print or why there is none. */
@@ -87,10 +87,8 @@ export class FurtherPanel {
     const print = this.store.print();
     if (print === null) return '';
     const { result } = print;
-    const { referenceLevelId } = result.frame.exposure;
-    const [index, reference] = [this.store.levelId(), referenceLevelId];
-    const pair = `${levelLabel(result, index)} against ${levelLabel(result, reference)}`;
-    return `${scopeLabel(result, this.store.scope())}, ${pair}`;
+    const contrast = contrastLabel(result, this.store.levelId());
+    return `${scopeLabel(result, this.store.scope())}, ${contrast}`;
   });
   protected readonly between = computed(() => {
     const scope = { kind: 'pooled' } as const;

@@ -5,7 +5,7 @@ import { intervalLabel } from '#shared/format';
 import { columnHeads } from '#shared/wording';
 import { FramingGlyph } from '../../ui/framing/framing-glyph';
 import { BenchStore } from '../bench/bench-store';
-import { levelLabel, scopeLabel } from '../bench/result-scopes';
+import { contrastLabel, levelLabel, scopeLabel } from '../bench/result-scopes';
 import { withMethod, withPooling } from '../draft/analysis-draft';
 import { shownMeasures } from '../print/bench-print';
 import type { MethodGroup, MethodRow } from '../methods/method-group';
@@ -43,11 +43,9 @@ export class MethodsPanel {
     const print = this.store.print();
     if (print === null) return '';
     const { result, style } = print;
-    const [index, reference] = [this.store.levelId(), result.frame.exposure.referenceLevelId];
     const layer = scopeLabel(result, this.scope());
     const interval = intervalLabel(result.specification.level, style);
-    const pair = `${levelLabel(result, index)} against ${levelLabel(result, reference)}`;
-    return `${layer}, ${pair}, ${interval}`;
+    return `${layer}, ${contrastLabel(result, this.store.levelId())}, ${interval}`;
   });
   private readonly heads = computed(() => {
     const print = this.store.print();

@@ -1,6 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, ElementRef, inject } from '@angular/core';
+import { scopeKey } from '#shared/analysis';
 import { BenchStore } from '../bench/bench-store';
-import { sameScope, scopeKey, scopeLabel } from '../bench/result-scopes';
+import { sameScope, scopeLabel } from '../bench/result-scopes';
 
 /** More layers than this are picked from a list. */
 const MOST_TABS = 5;

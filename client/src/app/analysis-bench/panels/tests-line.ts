@@ -15,7 +15,7 @@ import {
   type TestOutcome,
 } from '#shared/stats';
 import { BenchStore } from '../bench/bench-store';
-import { levelLabel } from '../bench/result-scopes';
+import { contrastLabel } from '../bench/result-scopes';
 import { type BenchPrint, printedPValue } from '../print/bench-print';
 
 interface PrintedTest {
@@ -78,8 +78,7 @@ const METHODS: Readonly<Record<string, MethodWords>> = TEST_METHODS;
 function testsOf(print: BenchPrint, store: BenchStore): readonly PrintedTest[] {
   const { result } = print;
   const levelId = store.levelId();
-  const { referenceLevelId } = result.frame.exposure;
-  const pair = `${levelLabel(result, levelId)} against ${levelLabel(result, referenceLevelId)}`;
+  const pair = contrastLabel(result, levelId);
   const scope = store.scope();
   const pooled = scope.kind === 'pooled' ? pooledAt(result, levelId) : undefined;
   if (pooled !== undefined) {

@@ -12,7 +12,7 @@ import { EFFECT_MEASURES, type EffectMeasureId } from '#shared/effects';
 import type { HouseStyle } from '#shared/house-style';
 import type { Result } from '#shared/core';
 import type { Estimate, EstimationIssue, FourfoldTable, TestOutcome } from '#shared/stats';
-import { issueWords, type Phrasebook } from '#shared/wording';
+import { capitalised, issueWords, type Phrasebook } from '#shared/wording';
 
 /** What a result is printed with on the bench: the same as in a report. */
 export interface BenchPrint {
@@ -80,7 +80,7 @@ export function notEstimable({ book }: BenchPrint, issue: EstimationIssue): stri
 
 /** Words with a capital and a full stop. */
 export function sentenceOf(words: string): string {
-  return `${words.charAt(0).toUpperCase()}${words.slice(1)}.`;
+  return `${capitalised(words)}.`;
 }
 
 /** The measures that a design shows beside each other. */
