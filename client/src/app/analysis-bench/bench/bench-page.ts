@@ -27,9 +27,8 @@ import { MethodsPanel } from '../panels/methods-panel';
 import { PooledPanel } from '../panels/pooled-panel';
 import { SayPanel } from '../panels/say-panel';
 import { SettingPanel } from '../panels/setting-panel';
+import { ComputedAnswers } from '../computing/computed-answers';
 import { Computing } from '../computing/computing';
-import { SlowResults } from '../computing/slow-results';
-import { MethodAnswers } from '../methods/method-answers';
 import { AnalysisKeeper } from './analysis-keeper';
 import { BenchLoader } from './bench-loader';
 import { BenchStore } from './bench-store';
@@ -59,15 +58,7 @@ import { StaleAnalysis } from './stale-analysis';
     SettingPanel,
     StaleAnalysis,
   ],
-  providers: [
-    AnalysisKeeper,
-    BenchLoader,
-    BenchStore,
-    Computing,
-    CountsStore,
-    MethodAnswers,
-    SlowResults,
-  ],
+  providers: [AnalysisKeeper, BenchLoader, BenchStore, ComputedAnswers, Computing, CountsStore],
   templateUrl: './bench-page.html',
   styleUrl: './bench-page.scss',
   host: { '(window:beforeunload)': 'warn($event)' },

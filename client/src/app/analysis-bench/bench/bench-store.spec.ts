@@ -7,8 +7,8 @@ import { beforeEach, expect, it } from 'vitest';
 import { ApiProblem } from '../../server-api/api-problem';
 import { DataApi } from '../../server-api/data-api';
 import { CurrentStudy } from '../../session/current-study';
+import { ComputedAnswers } from '../computing/computed-answers';
 import { Computing, COMPUTING_WORKER } from '../computing/computing';
-import { SlowResults } from '../computing/slow-results';
 import { withMethod, withReference, withStratumToggled } from '../draft/analysis-draft';
 import { OwnWorker } from '../testing/own-worker';
 import { CODE_BOOK, OUTCOME, SPECIFICATION, TALLY } from '../testing/wet-work';
@@ -43,7 +43,7 @@ beforeEach(() => {
       BenchStore,
       Computing,
       CountsStore,
-      SlowResults,
+      ComputedAnswers,
       { provide: COMPUTING_WORKER, useValue: () => worker },
       { provide: DataApi, useValue: api },
       { provide: CurrentStudy, useValue: { study: signal(study), may: () => true } },

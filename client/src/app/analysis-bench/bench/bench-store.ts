@@ -26,7 +26,8 @@ import { PHRASEBOOK } from '../../ui/phrasebook';
 import { type AnalysisDraft, emptyDraft, specificationOf } from '../draft/analysis-draft';
 import { benchPrint } from '../print/bench-print';
 import { columnById } from '../draft/column-choices';
-import { SlowResults, type WantedResult } from '../computing/slow-results';
+import { ComputedAnswers } from '../computing/computed-answers';
+import type { AnalysisTask } from '../computing/computing-task';
 import { CountsStore, wantedCounts, type WantedCounts } from './counts-store';
 import { type CutPlace, cutPlaceOf } from './cut-place';
 import { repeatedIdentifiers } from './repeated-identifiers';
@@ -45,7 +46,7 @@ export type BenchState =
 @Injectable()
 export class BenchStore {
   private readonly counts = inject(CountsStore);
-  private readonly slow = inject(SlowResults);
+  private readonly answers = inject(ComputedAnswers);
   private readonly current = inject(CurrentStudy);
   private readonly book = inject(PHRASEBOOK);
 
@@ -83,7 +84,13 @@ export class BenchStore {
   readonly wanted = computed<WantedCounts | null>(() => this.findWanted(), {
     equal: (one, other) => one?.key === other?.key,
   });
-  private readonly wantedResult = computed<WantedResult | null>(() => this.findWantedResult());
+  private readonly task = computed<AnalysisTask | null>(() => this.findTask());
+  /** Names the task for the worker; null where the methods are light. */
+  private readonly taskKey = computed(() => {
+    const task = this.task();
+    if (task === null || !takesTime(task.specification)) return null;
+    return JSON.stringify([this.wanted()?.key, task.specification, task.frame]);
+  });
   readonly state = computed<BenchState>(() => this.findState());
 
   /** The last result, kept in view while the next is counted. */
@@ -141,10 +148,9 @@ export class BenchStore {
       }
     });
     effect(() => {
-      const wanted = this.wantedResult();
-      if (wanted !== null && takesTime(wanted.specification)) {
+      if (this.taskKey() !== null) {
         untracked(() => {
-          this.slow.want(wanted);
+          this.computeAgain();
         });
       }
     });
@@ -159,9 +165,10 @@ export class BenchStore {
     if (wanted !== null) this.counts.again(wanted);
   }
 
+  /** Has the worker compute what takes its time, unless it does or did so already. */
   computeAgain(): void {
-    const wanted = this.wantedResult();
-    if (wanted !== null) this.slow.want(wanted);
+    const [key, task] = [this.taskKey(), this.task()];
+    if (key !== null && task !== null) this.answers.want<'analysis'>(key, task);
   }
 
   private indexLevelIds(): readonly string[] {
@@ -187,32 +194,31 @@ export class BenchStore {
     if (wanted === null) return { kind: 'unpicked' };
     const counts = this.counts.known().get(wanted.key) ?? { kind: 'counting' };
     if (counts.kind !== 'counted') return counts;
-    const computing = this.wantedResult();
-    return computing === null ? { kind: 'counting' } : this.computedState(computing);
+    const task = this.task();
+    return task === null ? { kind: 'counting' } : this.computedState(task);
   }
 
   /** Light methods at once; what takes its time comes from the worker. */
-  private computedState(wanted: WantedResult): BenchState {
-    const { specification, frame, tally } = wanted;
-    if (!takesTime(specification)) return stateOf(computeAnalysis(specification, frame, tally));
-    const state = this.slow.stateOf(wanted);
+  private computedState({ specification, frame, tally }: AnalysisTask): BenchState {
+    const key = this.taskKey();
+    if (key === null) return stateOf(computeAnalysis(specification, frame, tally));
+    const state = this.answers.stateOf<'analysis'>(key) ?? { kind: 'computing' };
     switch (state.kind) {
       case 'computing':
         return { kind: 'counting' };
       case 'broken':
         return { kind: 'broken' };
       case 'computed':
-        return stateOf(state.result);
+        return stateOf(state.answer);
     }
   }
 
-  private findWantedResult(): WantedResult | null {
+  private findTask(): AnalysisTask | null {
     const [frame, specification, wanted] = [this.frame(), this.specification(), this.wanted()];
     if (frame?.ok !== true || specification === null || wanted === null) return null;
     const counts = this.counts.known().get(wanted.key);
     if (counts?.kind !== 'counted') return null;
-    const key = JSON.stringify([wanted.key, specification, frame.value]);
-    return { key, specification, frame: frame.value, tally: counts.tally };
+    return { kind: 'analysis', specification, frame: frame.value, tally: counts.tally };
   }
 }
 

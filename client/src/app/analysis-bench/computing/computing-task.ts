@@ -10,15 +10,17 @@ import type { Estimate, EstimationIssue } from '#shared/stats';
 import type { Tally } from '#shared/tally';
 import { answerTo, type MethodQuestion } from '../methods/method-question';
 
+/** A whole analysis to compute. */
+export interface AnalysisTask {
+  readonly kind: 'analysis';
+  readonly specification: AnalysisSpecification;
+  readonly frame: ResultFrame;
+  readonly tally: Tally;
+}
+
 /** Work that takes its time: a whole analysis, or one method for one table. */
 export type ComputingTask =
-  | {
-      readonly kind: 'analysis';
-      readonly specification: AnalysisSpecification;
-      readonly frame: ResultFrame;
-      readonly tally: Tally;
-    }
-  | { readonly kind: 'method'; readonly question: MethodQuestion };
+  AnalysisTask | { readonly kind: 'method'; readonly question: MethodQuestion };
 
 /** What a task gives, by its kind. */
 export interface ComputingAnswers {

@@ -8,9 +8,10 @@ import { BenchStore } from '../bench/bench-store';
 import { contrastLabel, levelLabel, scopeLabel } from '../bench/result-scopes';
 import { withMethod, withPooling } from '../draft/analysis-draft';
 import { shownMeasures } from '../print/bench-print';
+import { type AnswerState, ComputedAnswers } from '../computing/computed-answers';
+import { type MethodQuestion, questionKey } from '../methods/method-question';
 import type { MethodGroup, MethodRow } from '../methods/method-group';
 import { measureGroups, poolingGroups, riskGroup } from '../methods/method-groups';
-import { type AnswerState, MethodAnswers } from '../methods/method-answers';
 
 /** The interval methods side by side, drawn on one axis; the chosen one holds for all strata. */
 @Component({
@@ -22,7 +23,7 @@ import { type AnswerState, MethodAnswers } from '../methods/method-answers';
 })
 export class MethodsPanel {
   protected readonly store = inject(BenchStore);
-  private readonly answers = inject(MethodAnswers);
+  private readonly answers = inject(ComputedAnswers);
 
   protected readonly scope = computed<ResultScope>(() => this.store.scope());
   protected readonly isPooled = computed(() => this.scope().kind === 'pooled');
@@ -34,9 +35,10 @@ export class MethodsPanel {
     if (this.isPooled()) return poolingGroups(print, measures, levelId);
     const risk =
       print.result.frame.design === 'caseControl' ? null : riskGroup(print, scope, levelId);
-    const groups = measureGroups(print, measures, { scope, levelId }, (question) =>
-      this.answers.known(question),
-    );
+    const groups = measureGroups(print, measures, { scope, levelId }, (question) => {
+      const state = this.stateOf(question);
+      return state?.kind === 'computed' ? state.answer : null;
+    });
     return [...groups, ...(risk === null ? [] : [risk])];
   });
   protected readonly about = computed(() => {
@@ -78,11 +80,16 @@ export class MethodsPanel {
     );
   }
 
-  protected progressOf({ question }: MethodRow): AnswerState['kind'] | 'open' {
-    return (question && this.answers.stateOf(question)?.kind) ?? 'open';
+  protected progressOf({ question }: MethodRow): AnswerState<'method'>['kind'] | 'open' {
+    return (question && this.stateOf(question)?.kind) ?? 'open';
   }
 
   protected compute({ question }: MethodRow): void {
-    if (question !== null) this.answers.ask(question);
+    if (question === null) return;
+    this.answers.want<'method'>(questionKey(question), { kind: 'method', question });
+  }
+
+  private stateOf(question: MethodQuestion): AnswerState<'method'> | undefined {
+    return this.answers.stateOf<'method'>(questionKey(question));
   }
 }
